@@ -1,0 +1,24 @@
+// Three projects: pure units, integration on real SQLite files, and browser journeys against the production build.
+import { fileURLToPath } from 'node:url'
+import { defineConfig } from 'vitest/config'
+
+const alias = {
+  '@': fileURLToPath(new URL('.', import.meta.url)).replace(/\/$/, ''),
+  // server-only throws outside the framework's bundler; here it only marks a room.
+  'server-only': fileURLToPath(new URL('./tests/support/server-only.ts', import.meta.url)),
+}
+const project = (name: string, extra: object) => ({
+  resolve: { alias },
+  test: { name, include: [`tests/${name}/**/*.test.{ts,tsx}`], setupFiles: ['tests/support/setup.ts'], ...extra },
+})
+
+export default defineConfig({
+  resolve: { alias },
+  test: {
+    projects: [
+      project('unit', { testTimeout: 10_000 }),
+      project('integration', { testTimeout: 30_000, hookTimeout: 60_000, globalSetup: ['tests/support/template-database.ts'], maxWorkers: 2 }),
+      project('e2e', { testTimeout: 120_000, hookTimeout: 180_000, globalSetup: ['tests/support/production-server.ts'], fileParallelism: false }),
+    ],
+  },
+})
