@@ -1,0 +1,51 @@
+// One search hit: what it is, its title, its cautions, the passage found, tags, how it went, and its stamps flat at the right
+// (below everything on a phone).
+import type { Route } from 'next'
+import Link from 'next/link'
+import type { ReactNode } from 'react'
+import { CautionLine, type LineCaution } from '@/components/cautions/caution-line'
+import { StampFlat } from '@/components/stamps/stamp-flat'
+import type { StampState } from '@/lib/domain/stamps/stamp-state'
+import type { StampFace } from '@/lib/format/stamp-words'
+import { HowItWent, type HowItWentProps } from './how-it-went'
+import { MarkedSnippet } from './marked-snippet'
+import { PartTags, type PartTagProps } from './part-tag'
+
+export interface HitRowProps {
+  /** 'Lesson · Dela Whitcombe · Rev B'; set in capitals by the style. */
+  kindLine: string
+  title: string
+  href: Route
+  cautions: readonly LineCaution[]
+  snippet: string
+  marks: readonly (readonly [number, number])[]
+  partTags: readonly PartTagProps[]
+  outcomes?: HowItWentProps['outcomes'] | undefined
+  /** The passage is on a critical system. */
+  critical: boolean
+  stamps: readonly (StampFace & { readonly id: number | string })[]
+  stampState: StampState
+  /** A next step in the row, such as a link button Tell what to do. */
+  action?: ReactNode
+}
+
+export function HitRow({ kindLine, title, href, cautions, snippet, marks, partTags, outcomes, critical, stamps, stampState, action }: HitRowProps) {
+  return (
+    <article className="hit">
+      <div className="hit-text">
+        <p className="label">{kindLine}</p>
+        <h3><Link href={href}>{title}</Link></h3>
+        <CautionLine cautions={cautions} />
+        <p className="hit-snippet"><MarkedSnippet text={snippet} marks={marks} /></p>
+        <div className="hit-foot">
+          <PartTags items={partTags} />
+          {outcomes ? <HowItWent outcomes={outcomes} critical={critical} /> : null}
+          {action}
+        </div>
+      </div>
+      {stamps.length > 0 ? (
+        <div className="hit-stamps">{stamps.map((stamp) => <StampFlat key={stamp.id} stamp={stamp} state={stampState} />)}</div>
+      ) : null}
+    </article>
+  )
+}

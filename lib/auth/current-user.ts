@@ -1,0 +1,18 @@
+// Who is signed in on this request. The cookie only names a member: role, mentorship and suspension are read from the database.
+import 'server-only'
+import { cache } from 'react'
+import { getServerSession } from 'next-auth'
+import { getActiveMember } from '@/db/queries/people'
+import type { Actor } from '@/lib/policy/actor'
+import { runtime } from '@/lib/runtime'
+import { authOptions } from './options'
+
+/** The actor of this request, or null for a visitor, a suspended member, or a session older than the last password change. */
+export const currentActor = cache(async (): Promise<Actor> => {
+  const session = await getServerSession(authOptions())
+  if (!session || !Number.isSafeInteger(session.user.id)) return null
+  const { database } = await runtime()
+  const found = await getActiveMember(database.reader, session.user.id)
+  if (!found || found.member.sessionEpoch !== session.user.epoch) return null
+  return { id: found.member.id, name: found.member.name, role: found.member.role, mark: found.mark }
+})

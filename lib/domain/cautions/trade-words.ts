@@ -1,0 +1,48 @@
+// Trade text as a row of words: lower case, stemmed, with the place of each in the text. Knows nothing of cautions.
+import { stemmer } from 'stemmer'
+
+/** One word. `position` counts words, with extra steps at the end of a sentence or paragraph. */
+export interface TradeWord {
+  form: string
+  stem: string
+  start: number
+  end: number
+  position: number
+  sentence: number
+}
+
+const SENTENCE_STEPS = 3
+const PARAGRAPH_STEPS = 30
+// Longer runs are part numbers or noise; Porter's rules are for words.
+const LONGEST_STEMMED = 24
+
+/** The stem of a lower-case word. The word "ribs" and "rib", "drilled" and "drilling" meet here. */
+export function stemOf(form: string): string {
+  return form.length > LONGEST_STEMMED ? form : stemmer(form)
+}
+
+/** The form a word is compared in: lower case, straight apostrophe, no possessive. */
+export function formOf(word: string): string {
+  return word.toLowerCase().replace('\u2019', "'").replace(/'s?$/, '')
+}
+
+/** Words of a text in order. Linear in its length; offsets are UTF-16 code units of the text as given. */
+export function tradeWords(text: string): TradeWord[] {
+  const words: TradeWord[] = []
+  const stems = new Map<string, string>()
+  let position = 0
+  let sentence = 0
+  let end = 0
+  for (const match of text.matchAll(/[\p{L}\p{N}]+(?:['\u2019]\p{L}+)?/gu)) {
+    const between = text.slice(end, match.index)
+    if (/\n\s*\n/.test(between)) [position, sentence] = [position + PARAGRAPH_STEPS, sentence + 1]
+    else if (/[.!?;:]\s|\n/.test(between)) [position, sentence] = [position + SENTENCE_STEPS, sentence + 1]
+    const form = formOf(match[0])
+    const stem = stems.get(form) ?? stemOf(form)
+    stems.set(form, stem)
+    end = match.index + match[0].length
+    words.push({ form, stem, start: match.index, end, position, sentence })
+    position += 1
+  }
+  return words
+}

@@ -1,0 +1,21 @@
+// The address a request came from, as the socket says; X-Forwarded-For counts only with TRUST_PROXY.
+import 'server-only'
+import { subscribe } from 'node:diagnostics_channel'
+import type { IncomingMessage } from 'node:http'
+import { env } from '@/lib/env'
+
+const header = 'x-client-address'
+
+/**
+ * Writes the socket's address into each request before anybody sees it, so that no client can claim another one.
+ * The framework only fills X-Forwarded-For when it is absent, which would let clients choose their own.
+ */
+export function watchClientAddresses(): void {
+  subscribe('http.server.request.start', (message) => {
+    const { request } = message as { request: IncomingMessage }
+    const forwarded = env().TRUST_PROXY ? String(request.headers['x-forwarded-for'] ?? '').split(',').at(-1)?.trim() : undefined
+    request.headers[header] = forwarded || request.socket.remoteAddress || 'unknown'
+  })
+}
+
+export const clientAddress = (headers: Headers): string => headers.get(header) ?? 'unknown'

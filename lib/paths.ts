@@ -1,0 +1,35 @@
+// Every address of the product, typed. Nobody else puts slashes together.
+import type { Route } from 'next'
+
+const query = (values: Record<string, string | number | undefined>): string => {
+  const params = new URLSearchParams()
+  for (const [key, value] of Object.entries(values)) if (value !== undefined && value !== '') params.set(key, String(value))
+  const text = params.toString()
+  return text ? `?${text}` : ''
+}
+
+export interface SearchAddress { q?: string | undefined; kit?: string | undefined; section?: string | undefined; operation?: string | undefined; kind?: string | undefined; stamped?: '1' | undefined; offset?: number | undefined }
+
+export const paths = {
+  home: '/' as Route,
+  search: (address: SearchAddress = {}) => `/search${query({ ...address })}` as Route,
+  entry: (id: number, anchor?: number) => `/entries/${id}${anchor && anchor !== id ? `#post-${anchor}` : ''}` as Route,
+  entryPrint: (id: number) => `/entries/${id}/print` as Route,
+  editEntry: (id: number) => `/entries/${id}/edit` as Route,
+  revisions: (postId: number, from?: string, to?: string) => `/posts/${postId}/revisions${query({ from, to })}` as Route,
+  editAnswer: (id: number) => `/answers/${id}/edit` as Route,
+  ask: (words: { title?: string; kit?: string; section?: string } = {}) => `/ask${query(words)}` as Route,
+  lesson: (words: { title?: string; kit?: string; section?: string } = {}) => `/lesson${query(words)}` as Route,
+  kits: '/kits' as Route,
+  kit: (slug: string) => `/kits/${slug}` as Route,
+  section: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}` as Route,
+  sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
+  feed: '/feed.atom' as Route,
+  desk: (address: { open?: number; operation?: string; section?: string } = {}) => `/desk${query(address)}` as Route,
+  signIn: (from?: string) => `/sign-in${query({ from })}` as Route,
+  signUp: '/sign-up' as Route,
+  account: '/account' as Route,
+  people: '/people' as Route,
+  person: (id: number) => `/people/${id}` as Route,
+  guide: (slug: string) => `/guide/${slug}` as Route,
+}

@@ -1,0 +1,64 @@
+// What passes through the search door, as plain messages: the index lives in a worker thread. Shared by both sides; no I/O.
+
+/** One entry as the index sees it. Built in lib/search/build-document.ts from CautionedPosts. */
+export interface SearchDocument {
+  id: number
+  kind: 'question' | 'lesson'
+  kit: string
+  sections: string[]
+  operations: string[]
+  tasks: string[]
+  /** A visible answer or the lesson itself stands in state `stamped`. */
+  stamped: boolean
+  /** A question without a visible answer. */
+  open: boolean
+  createdAt: number
+  title: string
+  /** Labels that also find it: section codes and titles, task titles, hardware, plans pages and steps. */
+  labels: string
+  /** The entry itself first, then its visible answers; `weight` is the evidence factor from lib/domain/search. */
+  passages: { postId: number; text: string; weight: number }[]
+}
+
+export interface SearchFilters {
+  kit?: string | undefined
+  section?: string | undefined
+  operation?: string | undefined
+  kind?: 'question' | 'lesson' | undefined
+  stamped?: boolean | undefined
+}
+
+export interface SearchRequest { text: string; filters: SearchFilters; limit: number; offset: number }
+
+export interface SearchAnswer {
+  hits: { id: number; postId: number; score: number; /** words as they stand in the text, for marking */ terms: string[] }[]
+  total: number
+  /** Query words that were not searched (too many, or stop words only). */
+  ignored: string[]
+  didYouMean: string | null
+  /** Sequence of the change log that this answer includes. */
+  sequence: number
+}
+
+export interface SearchHealth { state: 'loading' | 'ready'; documents: number; sequence: number }
+
+/** The asynchronous door. Nobody outside lib/search knows what stands behind it. */
+export interface SearchDoor {
+  search(request: SearchRequest): Promise<SearchAnswer>
+  /** Entries like this text: for asking. */
+  similar(text: string, filters: SearchFilters, limit: number): Promise<SearchAnswer['hits']>
+  /** Titles that complete what is being typed. */
+  suggest(text: string, limit: number): Promise<{ id: number; title: string }[]>
+  health(): SearchHealth
+  /** Reads the change log now and resolves when everything committed before the call can be found. */
+  catchUp(): Promise<void>
+  close(): Promise<void>
+}
+
+/** Thrown by search, similar and suggest while the index loads. */
+export class SearchLoadingError extends Error {
+  constructor() {
+    super('Search is loading')
+    this.name = 'SearchLoadingError'
+  }
+}

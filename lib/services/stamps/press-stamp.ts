@@ -1,0 +1,49 @@
+// A mentor stamps a revision with a basis. A mentor who looks again while it is in question renews their own stamp.
+import 'server-only'
+import { and, eq, isNull } from 'drizzle-orm'
+import { getCautionedPost } from '@/db/queries/cautioned-post'
+import { askedFor, stamp } from '@/db/schema'
+import { write } from '@/db/transaction'
+import type { AppContext } from '@/lib/context'
+import { revisionLetter, revisionNumber } from '@/lib/domain/entries/revision-letter'
+import { isLive } from '@/lib/domain/stamps/stamp-state'
+import { AppError, refuse } from '@/lib/errors'
+import { can } from '@/lib/policy/can'
+import { whyNot } from '@/lib/policy/why-not'
+import type { NewStamp } from '@/lib/schemas/acts'
+import { judge, judgePost } from '@/lib/services/posts/judge-post'
+import { subjectOf } from '@/lib/services/posts/load-entry'
+
+/**
+ * Returns the stamp's id. 403 own words, no mentor, or a reply for one serial; 409 when `revision` is not the current one,
+ * or this mentor's stamp stands on it already.
+ */
+export async function pressStamp(context: AppContext, postId: number, input: NewStamp): Promise<{ id: number; entryId: number }> {
+  const { actor, now } = context
+  if (!actor) throw refuse.signIn()
+  const made = await write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
+    const found = await getCautionedPost(tx, postId)
+    if (!found || !can(actor, 'post.read', subjectOf(found))) throw refuse.notFound('This post')
+    if (!can(actor, 'post.stamp', subjectOf(found)) || actor.mark === null) throw refuse.forbidden(whyNot['post.stamp'])
+    const question = found.parentId === null ? null : await getCautionedPost(tx, found.parentId)
+    const questionRevision = question?.current.number ?? 0
+    if (revisionNumber(input.revision) !== found.current.number) {
+      const current = { id: postId, revision: revisionLetter(found.current.number) }
+      throw new AppError('conflict', `This is Rev ${current.revision} now. Read it again before you stamp it.`, { current })
+    }
+    const own = found.stamps.find((s) => s.mentorId === actor.id && isLive(s, { currentRevision: found.current.number, questionRevision }))
+    if (own && judge(found, questionRevision).state !== 'in-question') throw new AppError('conflict', 'Your stamp stands on this revision already.', { current: { id: postId, revision: input.revision } })
+    if (own) await tx.update(stamp).set({ withdrawnAt: now, withdrawnReason: 'Looked at again after a report that it did not work.' }).where(eq(stamp.id, own.id))
+    const [row] = await tx.insert(stamp).values({
+      postId, revision: found.current.number, questionRevision, mentorId: actor.id, mark: actor.mark, basis: input.basis, reference: input.reference,
+      plansRevision: input.plansRevision ?? null, scope: input.scope ?? null, conflictReason: input.conflictReason ?? null, createdAt: now,
+    }).returning({ id: stamp.id })
+    if (!row) throw new Error('The stamp was not inserted')
+    await tx.update(askedFor).set({ answeredAt: now }).where(and(eq(askedFor.postId, postId), isNull(askedFor.answeredAt)))
+    await judgePost(tx, postId)
+    record('stamp.press', `stamp:${row.id}`, `post:${postId} ${input.revision}`)
+    return { id: row.id, entryId: found.parentId ?? postId }
+  })
+  await context.search.catchUp()
+  return made
+}
