@@ -3,7 +3,7 @@ import next from 'eslint-config-next/core-web-vitals'
 import typescript from 'eslint-config-next/typescript'
 
 const zone = (target, from, message, except) => ({ target, from, message, ...(except ? { except } : {}) })
-const browserSafe = ['./schemas', './domain', './policy', './format', './paths.ts', './client', './fonts', './measure']
+const browserSafe = ['./schemas', './domain', './policy', './format', './paths.ts', './form-state.ts', './client', './fonts']
 
 export default [
   { ignores: ['.next/**', 'dist/**', 'data/**', 'node_modules/**', 'next-env.d.ts', 'drizzle/**'] },

@@ -1,2 +1,4 @@
 // Tailwind 4 is configured in app/globals.css; this file only plugs it in.
-export default { plugins: { '@tailwindcss/postcss': {} } }
+const config = { plugins: { '@tailwindcss/postcss': {} } }
+
+export default config

@@ -41,7 +41,11 @@ let parsed: Env | undefined
 
 /** The settings, parsed at first use. Throws SettingsError. */
 export function env(): Env {
-  parsed ??= readEnv(process.env)
+  if (!parsed) {
+    parsed = readEnv(process.env)
+    // next-auth reads its own address from here and warns without it.
+    process.env['NEXTAUTH_URL'] ??= parsed.publicUrl
+  }
   return parsed
 }
 

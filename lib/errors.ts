@@ -13,13 +13,15 @@ export const errorTitle: Record<ErrorCode, string> = {
 }
 
 export interface FieldError { path: string; message: string }
-interface Details { errors?: FieldError[]; current?: unknown; retryAfterSeconds?: number }
+interface Details { errors?: FieldError[]; current?: unknown; cautions?: unknown; retryAfterSeconds?: number }
 
 /** A refusal that was expected. Its message is shown to people and names the next step. */
 export class AppError extends Error {
   readonly code: ErrorCode
   readonly errors: FieldError[]
   readonly current: unknown
+  /** Cautions that have to be acknowledged, with their words. */
+  readonly cautions: unknown
   readonly retryAfterSeconds: number | undefined
 
   constructor(code: ErrorCode, message: string, details: Details = {}) {
@@ -28,6 +30,7 @@ export class AppError extends Error {
     this.code = code
     this.errors = details.errors ?? []
     this.current = details.current
+    this.cautions = details.cautions
     this.retryAfterSeconds = details.retryAfterSeconds
   }
 
@@ -35,11 +38,6 @@ export class AppError extends Error {
     return errorStatus[this.code]
   }
 }
-
-/** What a form gets back. The text that was typed stays in the form; nothing is lost. */
-export type ActionResult<T = undefined> =
-  | { ok: true; data: T }
-  | { ok: false; code: ErrorCode; message: string; errors: FieldError[]; current?: unknown }
 
 /** Refusals every service says the same way. */
 export const refuse = {

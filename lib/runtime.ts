@@ -1,19 +1,16 @@
 // What one server process holds open: the database, the search door and the renderer. Opened once, at start.
 import 'server-only'
-import path from 'node:path'
 import { openDatabase, type Database } from '@/db/client'
 import { env } from './env'
 import { createRenderer, type Renderer } from './render/renderer'
 import type { SearchDoor } from './search/messages'
 import { openSearch } from './search/open-search'
+import { workerFile } from './worker-file'
 
 export interface Runtime { database: Database; search: SearchDoor; renderer: Renderer }
 
 // On globalThis, because the framework bundles instrumentation and routes apart and hot reload would open new files.
 const holder = globalThis as unknown as { pilotholeRuntime?: Promise<Runtime> }
-
-/** Path of a bundled worker (npm run build:workers). */
-export const workerFile = (name: 'render' | 'search') => path.join(process.cwd(), 'dist', 'workers', `${name}.mjs`)
 
 /** The open runtime of this process. */
 export function runtime(): Promise<Runtime> {

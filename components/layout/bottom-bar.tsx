@@ -1,7 +1,7 @@
 // Navigation within reach of a thumb, on phones only. The page makes room below itself for it (layout.css).
-import Link from 'next/link'
 import { Icon } from '@/components/ui/icon'
 import type { BarItem } from './nav-items'
+import { NavLink } from './nav-link'
 
 /** Three to five items. */
 export function BottomBar({ items }: { items: readonly BarItem[] }) {
@@ -10,7 +10,7 @@ export function BottomBar({ items }: { items: readonly BarItem[] }) {
       <ul>
         {items.map((item) => (
           <li key={item.href}>
-            <Link href={item.href} aria-current={item.current ? 'page' : undefined}><Icon name={item.icon} />{item.label}</Link>
+            <NavLink href={item.href}><Icon name={item.icon} />{item.label}</NavLink>
           </li>
         ))}
       </ul>

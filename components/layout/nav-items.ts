@@ -5,7 +5,6 @@ import type { IconName } from '@/components/ui/icon'
 export interface NavItem {
   readonly href: Route
   readonly label: string
-  readonly current?: boolean
 }
 
 export interface BarItem extends NavItem {

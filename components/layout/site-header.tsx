@@ -3,6 +3,7 @@ import Link from 'next/link'
 import type { ReactNode } from 'react'
 import { Mark } from './mark'
 import type { NavItem } from './nav-items'
+import { NavLink } from './nav-link'
 
 export interface SiteHeaderProps {
   items: readonly NavItem[]
@@ -21,7 +22,7 @@ export function SiteHeader({ items, search, end }: SiteHeaderProps) {
         <div className="site-header-search">{search}</div>
         <nav className="site-nav" aria-label="Rooms">
           <ul>
-            {items.map((item) => <li key={item.href}><Link href={item.href} aria-current={item.current ? 'page' : undefined}>{item.label}</Link></li>)}
+            {items.map((item) => <li key={item.href}><NavLink href={item.href}>{item.label}</NavLink></li>)}
             {end ? <li className="site-nav-item">{end}</li> : null}
           </ul>
         </nav>

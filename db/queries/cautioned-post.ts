@@ -117,3 +117,10 @@ async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTrans
     } as unknown as CautionedPost)
   }
 }
+
+/** A post with every revision's text: history leaves with its cautions like everything else. */
+export async function getCautionedHistory(reader: ReaderOrTransaction, id: number): Promise<{ found: CautionedPost; history: Row<typeof revision>[] } | null> {
+  const found = await getCautionedPost(reader, id)
+  if (!found) return null
+  return { found, history: await reader.select().from(revision).where(eq(revision.postId, id)).orderBy(asc(revision.number)) }
+}

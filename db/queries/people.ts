@@ -1,8 +1,10 @@
 // Members and mentorships: who may act, and the steward's list.
 import 'server-only'
 import { and, asc, count, desc, eq, gt, isNull, sql } from 'drizzle-orm'
+import { alias } from 'drizzle-orm/sqlite-core'
 import type { ReaderOrTransaction } from '../client'
-import { attempt, member, mentorship, token } from '../schema'
+import { attempt, member, mentorship, post, token } from '../schema'
+import { isVisible } from './cautioned-post'
 
 const live = and(eq(mentorship.memberId, member.id), isNull(mentorship.endedAt))
 
@@ -56,4 +58,20 @@ export async function countAttempts(reader: ReaderOrTransaction, key: string, si
 /** Mentorship history of a member, newest first. */
 export async function listMentorships(reader: ReaderOrTransaction, memberId: number) {
   return reader.select().from(mentorship).where(eq(mentorship.memberId, memberId)).orderBy(desc(mentorship.id))
+}
+
+/** How many stewards can act. */
+export async function countActiveStewards(reader: ReaderOrTransaction): Promise<number> {
+  const [row] = await reader.select({ n: count() }).from(member).where(and(eq(member.role, 'steward'), eq(member.state, 'active')))
+  return row?.n ?? 0
+}
+
+const entry = alias(post, 'entry')
+
+/** Ids of a member's visible posts in visible entries, newest first. Text comes through cautioned-post.ts. */
+export async function listRecentPosts(reader: ReaderOrTransaction, memberId: number, limit: number): Promise<{ id: number; entryId: number }[]> {
+  return reader.select({ id: post.id, entryId: entry.id }).from(post)
+    .innerJoin(entry, eq(entry.id, sql`coalesce(${post.parentId}, ${post.id})`))
+    .where(and(eq(post.authorId, memberId), isVisible, eq(entry.state, 'visible')))
+    .orderBy(desc(post.createdAt), desc(post.id)).limit(limit)
 }

@@ -30,8 +30,8 @@ const ruleSchema = z.strictObject({
 const tableSchema = z.strictObject({
   version: z.int().positive(),
   cautions: z.array(cautionSchema),
-  placing: terms,
-  vocabularies: z.record(z.string(), z.strictObject({ words: terms, not: terms.optional(), asSubject: z.boolean().optional() })),
+  placing: z.strictObject({ loose: terms, strict: terms }),
+  vocabularies: z.record(z.string(), z.strictObject({ words: terms, not: terms.optional(), asSubject: z.enum(['loose', 'strict']).optional() })),
   rules: z.array(ruleSchema),
 }).superRefine((table, context) => {
   const fault = (message: string) => context.addIssue({ code: 'custom', message })

@@ -65,7 +65,7 @@ const signExtended = localFont({
   declarations: [{ prop: 'unicode-range', value: 'U+0100-02BA, U+02BD-02C5, U+02C7-02CC, U+02CE-02D7, U+02DD-02FF, U+1E00-1E9F, U+1EF2-1EFF, U+20A0-20AB, U+20AD-20C0' }],
 })
 
-// Sizes that stand alone, designations and part codes.
+// Sizes that stand alone, designations and part codes. Preloaded like the digits because only then do both share one file.
 const gauge = localFont({
   src: [
     { path: './b612-latin-400-normal.woff2', weight: '400', style: 'normal' },
@@ -73,7 +73,6 @@ const gauge = localFont({
   ],
   variable: '--font-b612',
   display: 'swap',
-  preload: false,
   adjustFontFallback: false,
 })
 

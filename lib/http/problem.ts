@@ -9,7 +9,7 @@ import type { z } from 'zod'
 export function problem(error: AppError): Response {
   const body = {
     type: `about:blank#${error.code}`, title: errorTitle[error.code], status: error.status, detail: error.message,
-    ...(error.errors.length ? { errors: error.errors } : {}), ...(error.current !== undefined ? { current: error.current } : {}),
+    ...(error.errors.length ? { errors: error.errors } : {}), ...(error.current !== undefined ? { current: error.current } : {}), ...(error.cautions !== undefined ? { cautions: error.cautions } : {}),
   }
   const wait = error.retryAfterSeconds ?? (error.status === 503 ? 1 : undefined)
   return Response.json(body, {

@@ -1,5 +1,6 @@
 // The one wrapper in front of every API handler: who asks, from where, how often, with what; and how refusals look.
 import 'server-only'
+import { createHash } from 'node:crypto'
 import { getMemberByTokenHash } from '@/db/queries/people'
 import { currentActor } from '@/lib/auth/current-user'
 import { tokenHash } from '@/lib/auth/tokens'
@@ -18,21 +19,45 @@ import { requireSameOrigin } from './origin'
 import { asAppError, invalid, problem } from './problem'
 import { countRequest, rateHeaders } from './rate-limit'
 import { readJson } from './read-body'
+import { readUpload, type Upload } from './read-upload'
 
-export interface Handled { status?: number; body: unknown; headers?: Record<string, string> }
-interface Call<B, Q> { context: AppContext; params: Record<string, string>; query: Q; body: B; request: Request }
-type RouteContext = { params: Promise<Record<string, string | string[]>> }
+interface Sent { status: number; body: string | null; headers: Record<string, string> }
+export interface Handled { status?: number; body?: unknown; headers?: Record<string, string> }
+interface Call<B, Q> {
+  context: AppContext
+  params: Record<string, string>
+  query: Q
+  body: B
+  /** The whole body of an endpoint that takes a file; empty otherwise. */
+  bytes: Uint8Array
+  request: Request
+}
+/** An address without variables has no params at all. */
+type RouteContext = { params: Promise<Record<string, string | string[]> | undefined> }
 
 export interface Endpoint<B, Q> {
-  /** What the method takes. A body schema makes it a write with JSON. */
+  /** One line for GET /api/openapi.json. */
+  summary: string
+  /** What the method takes. */
   query?: z.ZodType<Q>
   body?: z.ZodType<B>
+  upload?: Upload
+  /** What it gives when it went well, and with which status; 204 gives nothing. */
+  response?: z.ZodType
+  status?: 200 | 201 | 204
+  /** Sends a body only to ask: counted as a read, open to whoever may read, from anywhere. */
+  isRead?: true
   /** Open to visitors even with public reading off (health). */
   isAlwaysOpen?: boolean
   handle(call: Call<B, Q>): Promise<Handled>
 }
-type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
-type Handler = (request: Request, route: RouteContext) => Promise<Response>
+export const methodNames = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const
+export type Method = (typeof methodNames)[number]
+export type Handler = (request: Request, route: RouteContext) => Promise<Response>
+
+const declarations = new WeakMap<Handler, Endpoint<unknown, unknown>>()
+/** What a handler was declared with, for the description of the interface; undefined for a method that is not given. */
+export const declarationOf = (handler: Handler) => declarations.get(handler)
 
 /** Declares one method; keeps the schemas' types. */
 export const endpoint = <B = undefined, Q = undefined>(e: Endpoint<B, Q>): Endpoint<unknown, unknown> => e as unknown as Endpoint<unknown, unknown>
@@ -40,14 +65,16 @@ export const endpoint = <B = undefined, Q = undefined>(e: Endpoint<B, Q>): Endpo
 /** Route handlers of one address; methods that are not given answer 405 as a problem. */
 export function routes(methods: Partial<Record<Method, Endpoint<unknown, unknown>>>): Record<Method, Handler> {
   const allow = Object.keys(methods).join(', ')
-  const handler = (method: Method): Handler => async (request, route) => {
+  const handler = (method: Method): Handler => {
     const declared = methods[method]
-    if (!declared) {
+    if (!declared) return async () => {
       const response = problem(new AppError('method-not-allowed', `Use ${allow}.`))
       response.headers.set('allow', allow)
       return response
     }
-    return answer(request, route, method, declared)
+    const made: Handler = (request, route) => answer(request, route, method, declared)
+    declarations.set(made, declared)
+    return made
   }
   return { GET: handler('GET'), POST: handler('POST'), PUT: handler('PUT'), PATCH: handler('PATCH'), DELETE: handler('DELETE') }
 }
@@ -57,13 +84,16 @@ async function answer(request: Request, route: RouteContext, method: Method, dec
   try {
     const { actor, isBearer } = await whoAsks(request)
     const key = actor ? `member:${actor.id}` : `address:${clientAddress(request.headers)}`
-    const isWrite = method !== 'GET'
+    const isWrite = method !== 'GET' && !declared.isRead
     headers = { ...headers, ...rateHeaders(countRequest(`${isWrite ? 'write' : 'read'}:${key}`, isWrite ? env().WRITES_PER_MINUTE : env().READS_PER_MINUTE, systemClock())) }
     const context = await contextFor(actor)
     if (!declared.isAlwaysOpen && !can(actor, 'read', { publicReading: context.publicReading })) throw refuse.signIn()
-    if (isWrite && actor && !isBearer) requireSameOrigin(request)
+    // Before the body is read: a visitor's megabytes are nobody's work.
+    if (isWrite && !actor) throw refuse.signIn()
+    if (isWrite && !isBearer) requireSameOrigin(request)
     const handled = await perform(request, route, method, declared, context)
-    return new Response(handled.body, { status: handled.status, headers: { ...headers, 'content-type': 'application/json; charset=utf-8', ...handled.headers } })
+    const type: Record<string, string> = handled.body === null ? {} : { 'content-type': 'application/json; charset=utf-8' }
+    return new Response(handled.body, { status: handled.status, headers: { ...headers, ...type, ...handled.headers } })
   } catch (error) {
     const expected = asAppError(error)
     if (!expected) logError('api', error, { path: new URL(request.url).pathname })
@@ -73,29 +103,37 @@ async function answer(request: Request, route: RouteContext, method: Method, dec
   }
 }
 
-async function perform(request: Request, route: RouteContext, method: Method, declared: Endpoint<unknown, unknown>, context: AppContext): Promise<{ status: number; body: string | null; headers?: Record<string, string> }> {
-  const params = Object.fromEntries(Object.entries(await route.params).map(([k, v]) => [k, Array.isArray(v) ? v.join('/') : v]))
+async function perform(request: Request, route: RouteContext, method: Method, declared: Endpoint<unknown, unknown>, context: AppContext): Promise<Sent> {
+  const params = Object.fromEntries(Object.entries((await route.params) ?? {}).map(([k, v]) => [k, Array.isArray(v) ? v.join('/') : v]))
   const query = parse(declared.query, readQuery(request))
   const sent = declared.body ? await readJson(request) : null
   const body = declared.body && sent ? parse(declared.body, sent.value) : undefined
-  const run = async () => {
-    const handled = await declared.handle({ context, params, query, body, request })
-    const status = handled.status ?? 200
-    return { status, body: status === 204 ? '' : JSON.stringify(handled.body), ...(handled.headers ? { headers: handled.headers } : {}) }
+  const bytes = declared.upload ? await readUpload(request, declared.upload, context.actor) : new Uint8Array()
+  const run = async (): Promise<Sent> => {
+    const handled = await declared.handle({ context, params, query, body, bytes, request })
+    const status = handled.status ?? declared.status ?? 200
+    return { status, body: status === 204 ? null : JSON.stringify(handled.body), headers: handled.headers ?? {} }
   }
-  const key = method === 'GET' ? null : request.headers.get('idempotency-key')
-  if (key === null || !context.actor) return nullBody(await run())
-  if (!/^[\x21-\x7e]{1,200}$/.test(key)) throw refuse.invalid('Idempotency-Key', 'An Idempotency-Key has 1 to 200 visible characters.')
-  const memberId = context.actor.id
-  return nullBody(await once(context, { memberId, route: `${method} ${new URL(request.url).pathname}`, key, bodyText: sent?.text ?? '' }, run))
+  if (method === 'GET' || declared.isRead) return run()
+  return onceWhenAsked(request, method, context, sent?.text ?? createHash('sha256').update(bytes).digest('hex'), run)
 }
 
-const nullBody = <T extends { status: number; body: string }>(r: T) => ({ ...r, body: r.status === 204 ? null : r.body })
+/** With an Idempotency-Key the answer is kept, its headers included, so that a repeat reads the same. */
+async function onceWhenAsked(request: Request, method: Method, context: AppContext, bodyText: string, run: () => Promise<Sent>): Promise<Sent> {
+  const key = request.headers.get('idempotency-key')
+  if (key === null || !context.actor) return run()
+  if (!/^[\x21-\x7e]{1,200}$/.test(key)) throw refuse.invalid('Idempotency-Key', 'An Idempotency-Key has 1 to 200 visible characters.')
+  const kept = await once(context, { memberId: context.actor.id, route: `${method} ${new URL(request.url).pathname}`, key, bodyText }, async () => {
+    const { status, ...sent } = await run()
+    return { status, body: JSON.stringify(sent) }
+  })
+  return { status: kept.status, ...(JSON.parse(kept.body) as Omit<Sent, 'status'>) }
+}
 
 /** Session or bearer token. A token that is not (or no longer) good is 401, never silently a visitor. */
 async function whoAsks(request: Request): Promise<{ actor: Actor; isBearer: boolean }> {
   const authorization = request.headers.get('authorization')
-  if (authorization === null) return { actor: await currentActor(), isBearer: false }
+  if (authorization === null) return { actor: request.headers.has('cookie') ? await currentActor() : null, isBearer: false }
   const token = /^Bearer (pht_[A-Za-z0-9_-]{20,100})$/.exec(authorization)?.[1]
   const { database } = await runtime()
   const found = token ? await getMemberByTokenHash(database.reader, tokenHash(token)) : null

@@ -21,6 +21,8 @@ function dress(node: Element): ElementContent[] {
       // The address was refused: what is left is text, and must not look like a link.
       if (node.properties['href'] === undefined) return node.children
       node.properties['rel'] = ['nofollow', 'noopener', 'ugc']
+      // Legal inside an attribute, but no later reader of the HTML should have to know that.
+      if (typeof node.properties['title'] === 'string') node.properties['title'] = node.properties['title'].replaceAll('<', '‹').replaceAll('>', '›')
       return [node]
     case 'input':
       node.properties['ariaLabel'] = node.properties['checked'] ? 'done' : 'to do'

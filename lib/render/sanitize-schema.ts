@@ -15,7 +15,8 @@ export const sanitizeSchema: Options = {
   ],
   attributes: {
     a: ['href', 'title'],
-    code: [['className', /^language-./]],
+    // Characters of markup are legal inside an attribute, but no later reader of the HTML should have to know that.
+    code: [['className', /^language-[^<>"'&]+$/]],
     input: [['disabled', true], ['type', 'checkbox'], 'checked'],
     li: [['className', 'task-list-item']],
     ol: ['start', ['className', 'contains-task-list']],

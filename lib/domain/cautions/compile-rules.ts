@@ -1,10 +1,10 @@
 // Turns the rule table's words into matchers, once a table. No judgement here: required-cautions.ts asks, this answers where.
 import type { CautionRule, CautionRuleTable, Vocabulary, WordCondition } from './rule-table'
 import { compileTerms, type TermHit, type TermMatcher } from './term-matcher'
-import type { TradeWord } from './trade-words'
+import type { TradeText, TradeWord } from './trade-words'
 
 /** The words that met a condition, a hit a group, or null. */
-export type ConditionMatcher = (words: readonly TradeWord[], memo: HitMemo) => TermHit[] | null
+export type ConditionMatcher = (text: TradeText, memo: HitMemo) => TermHit[] | null
 /** Hits of each word list in one text: several rules ask for the same list. */
 export type HitMemo = Map<TermMatcher, TermHit[]>
 
@@ -16,13 +16,15 @@ export interface CompiledRule {
 
 const DEFAULT_WITHIN = 12
 const PLACING_REACH = 3
+// No term of the table is longer in words, its gaps included.
+const LONGEST_TERM = 16
 const compiled = new WeakMap<CautionRuleTable, CompiledRule[]>()
 
 /** The table's rules with their matchers. Throws on an unknown `@vocabulary`. */
 export function compiledRules(table: CautionRuleTable): CompiledRule[] {
   const known = compiled.get(table)
   if (known) return known
-  const placing = compileTerms(table.placing)
+  const placing = { loose: compileTerms(table.placing.loose), strict: compileTerms(table.placing.strict) }
   const vocabularies = new Map(Object.entries(table.vocabularies).map(([name, list]) => [name, vocabularyMatcher(list, placing)]))
   const rules = table.rules.map((rule) => ({
     rule,
@@ -33,24 +35,28 @@ export function compiledRules(table: CautionRuleTable): CompiledRule[] {
   return rules
 }
 
-function vocabularyMatcher(list: Vocabulary, placing: TermMatcher): TermMatcher {
+function vocabularyMatcher(list: Vocabulary, placing: Record<'loose' | 'strict', TermMatcher>): TermMatcher {
   const find = compileTerms(list.words)
   const hide = compileTerms(list.not ?? [])
-  return (words) => {
-    const hidden = hide(words)
-    const places = list.asSubject ? placing(words) : []
-    return find(words).filter((hit) => !hidden.some((mask) => covers(mask, hit)) && !places.some((place) => placedBy(words, place, hit)))
+  return (text) => {
+    const hidden = new Set<number>()
+    for (const { first, last } of hide(text)) for (let index = first; index <= last; index += 1) hidden.add(index)
+    const places = list.asSubject ? new Set(placing[list.asSubject](text).map((hit) => hit.last)) : new Set<number>()
+    return find(text).filter((hit) => !hides(hidden, hit) && !placedBy(text.words, places, hit))
   }
 }
 
-function covers(mask: TermHit, hit: TermHit): boolean {
-  return mask.first <= hit.last && hit.first <= mask.last
+function hides(hidden: ReadonlySet<number>, hit: TermHit): boolean {
+  for (let index = hit.first; index <= hit.last; index += 1) if (hidden.has(index)) return true
+  return false
 }
 
-/** "near the gear": the placing word stands at most three words before, in the same sentence. */
-function placedBy(words: readonly TradeWord[], place: TermHit, hit: TermHit): boolean {
-  const distance = hit.first - place.last
-  return distance > 0 && distance <= PLACING_REACH && words[place.last]?.sentence === words[hit.first]?.sentence
+/** "near the gear": a placing word ends at most three words before, in the same sentence. */
+function placedBy(words: readonly TradeWord[], places: ReadonlySet<number>, hit: TermHit): boolean {
+  for (let index = hit.first - 1; index >= hit.first - PLACING_REACH; index -= 1) {
+    if (places.has(index) && words[index]?.sentence === words[hit.first]?.sentence) return true
+  }
+  return false
 }
 
 /** A group's hits: its own terms and those of the vocabularies it names, in text order. */
@@ -68,34 +74,58 @@ function conditionMatcher(condition: WordCondition, vocabularies: Map<string, Te
   const groups = condition.all.map((terms) => groupMatcher(terms, vocabularies))
   const unless = groupMatcher(condition.unless ?? [], vocabularies)
   const within = condition.within ?? DEFAULT_WITHIN
-  return (words, memo) => {
-    const hits = groups.map((group) => hitsOf(group, words, memo))
-    const [anchors, ...others] = hits
-    if (!anchors || hits.some((list) => list.length === 0)) return null
-    const against = hitsOf(unless, words, memo)
+  return (text, memo) => {
+    const { words } = text
+    const hits: (readonly TermHit[])[] = []
+    for (const group of groups) {
+      const found = hitsOf(group, text, memo)
+      // Most rules end here: nothing of the group stands in the text.
+      if (found.length === 0) return null
+      hits.push(found)
+    }
+    const [anchors = [], ...others] = hits
+    const against = hitsOf(unless, text, memo)
     for (const anchor of anchors) {
-      if (against.some((hit) => distance(words, anchor, hit) <= within)) continue
-      const met = others.map((list) => list.find((hit) => distance(words, anchor, hit) <= within && !same(hit, anchor)))
+      if (nearest(words, against, anchor, within)) continue
+      const met = others.map((list) => nearest(words, list, anchor, within))
       if (met.every((hit) => hit !== undefined)) return [anchor, ...met]
     }
     return null
   }
 }
 
-function hitsOf(group: readonly TermMatcher[], words: readonly TradeWord[], memo: HitMemo): TermHit[] {
-  return group.flatMap((matcher) => {
-    const hits = memo.get(matcher) ?? matcher(words)
+/** A group's hits in text order. */
+function hitsOf(group: readonly TermMatcher[], text: TradeText, memo: HitMemo): readonly TermHit[] {
+  const lists = group.map((matcher) => {
+    const hits = memo.get(matcher) ?? matcher(text)
     memo.set(matcher, hits)
     return hits
-  })
+  }).filter((hits) => hits.length > 0)
+  const [only = []] = lists
+  return lists.length < 2 ? only : lists.flat().sort((x, y) => x.first - y.first)
 }
 
-function same(a: TermHit, b: TermHit): boolean {
-  return a.first === b.first && a.last === b.last
+/** The first hit at most `within` words from the anchor that shares no word with it. Binary search: texts repeat themselves. */
+function nearest(words: readonly TradeWord[], hits: readonly TermHit[], anchor: TermHit, within: number): TermHit | undefined {
+  const from = (words[anchor.first]?.position ?? 0) - within - LONGEST_TERM
+  let low = 0
+  let high = hits.length
+  while (low < high) {
+    const middle = (low + high) >> 1
+    if ((words[hits[middle]?.first ?? 0]?.position ?? 0) < from) low = middle + 1
+    else high = middle
+  }
+  for (let index = low; index < hits.length; index += 1) {
+    const hit = hits[index]
+    if (!hit || (hit.first > anchor.last && distance(words, anchor, hit) > within)) return undefined
+    const apart = hit.last < anchor.first || hit.first > anchor.last
+    if (apart && distance(words, anchor, hit) <= within) return hit
+  }
+  return undefined
 }
 
-/** Words between two hits, 0 when they touch or overlap. */
+/** Steps from the end of the earlier hit to the start of the later. */
 function distance(words: readonly TradeWord[], a: TermHit, b: TermHit): number {
   const [early, late] = a.first <= b.first ? [a, b] : [b, a]
-  return Math.max(0, (words[late.first]?.position ?? 0) - (words[early.last]?.position ?? 0))
+  return (words[late.first]?.position ?? 0) - (words[early.last]?.position ?? 0)
 }

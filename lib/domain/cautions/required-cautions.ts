@@ -3,11 +3,11 @@ import { compiledRules, type CompiledRule, type HitMemo } from './compile-rules'
 import { topicsOfSystem } from './critical-systems'
 import { SIGNAL_WORDS, type CautionRuleTable, type CautionSubject, type RequiredCaution } from './rule-table'
 import type { TermHit } from './term-matcher'
-import { tradeWords, type TradeWord } from './trade-words'
+import { readTrade, type TradeText } from './trade-words'
 
 interface ReadText {
   text: string
-  words: TradeWord[]
+  trade: TradeText
   memo: HitMemo
 }
 
@@ -34,7 +34,7 @@ export function requiredCautions(table: CautionRuleTable, subject: CautionSubjec
 }
 
 function read(text: string): ReadText {
-  return { text, words: tradeWords(text), memo: new Map() }
+  return { text, trade: readTrade(text), memo: new Map() }
 }
 
 /** Why a rule holds for the subject, or null: every dimension the rule names must be met. */
@@ -45,8 +45,8 @@ function reasonOf(compiledRule: CompiledRule, subject: CautionSubject, text: Rea
   if (rule.tasks) reasons.push(named('task', rule.tasks, subject.tasks))
   if (rule.jasc) reasons.push(system(subject.jasc, (code) => (rule.jasc ?? []).some((prefix) => code.startsWith(prefix))))
   if (rule.system) reasons.push(system(subject.jasc, (code) => topicsOfSystem(code).some((topic) => topic === rule.system)))
-  if (compiledRule.hardware) reasons.push(quoted('hardware', hardware, compiledRule.hardware(hardware.words).slice(0, 1)))
-  if (compiledRule.words) reasons.push(quoted('the words', text, compiledRule.words(text.words, text.memo) ?? []))
+  if (compiledRule.hardware) reasons.push(quoted('hardware', hardware, compiledRule.hardware(hardware.trade).slice(0, 1)))
+  if (compiledRule.words) reasons.push(quoted('the words', text, compiledRule.words(text.trade, text.memo) ?? []))
   if (reasons.length === 0 || reasons.some((reason) => reason === null)) return null
   return reasons.join(' with ')
 }
@@ -63,10 +63,10 @@ function system(codes: readonly string[], matches: (code: string) => boolean): s
 }
 
 /** The author's own words, in text order, each once. */
-function quoted(label: string, { text, words }: ReadText, hits: readonly TermHit[]): string | null {
+function quoted(label: string, { text, trade }: ReadText, hits: readonly TermHit[]): string | null {
   if (hits.length === 0) return null
   const phrases = [...hits]
     .sort((a, b) => a.first - b.first)
-    .map(({ first, last }) => text.slice(words[first]?.start, words[last]?.end).replace(/\s+/g, ' '))
+    .map(({ first, last }) => text.slice(trade.words[first]?.start, trade.words[last]?.end).replace(/\s+/g, ' '))
   return `${label} ${[...new Set(phrases)].map((phrase) => `“${phrase}”`).join(' and ')}`
 }

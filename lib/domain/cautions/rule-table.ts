@@ -32,12 +32,12 @@ export interface CautionDefinition {
  * A named list of terms. A term is one or more words in a row, matched by stem and in any case:
  * `a/b` either word · `=word` this form only · `word*` any word that begins so · `_` exactly one word · `..` up to three words, or none.
  * `not` lists phrases that hide a term standing inside them ("bending brake" is no brake).
- * `asSubject`: a term that only says where something lies ("near the gear") doesn't count.
+ * `asSubject`: a term that only says where something lies doesn't count: 'loose' "near the gear", 'strict' also "on the gear", "to the gear".
  */
 export interface Vocabulary {
   words: string[]
   not?: string[]
-  asSubject?: boolean
+  asSubject?: 'loose' | 'strict'
 }
 
 /** Terms that must stand together: each group of `all` (terms or `@vocabulary`) within `within` words of the first group's term. */
@@ -67,8 +67,8 @@ export interface CautionRuleTable {
   version: number
   cautions: CautionDefinition[]
   vocabularies: Record<string, Vocabulary>
-  /** Words that make what follows a place and not the thing worked on: near, beside, past … */
-  placing: string[]
+  /** Words that make what follows a place and not the thing worked on: near, beside, past …; strict adds on, under, to … */
+  placing: { loose: string[]; strict: string[] }
   rules: CautionRule[]
 }
 

@@ -1,6 +1,6 @@
-// Finds the terms of one word list in a row of trade words, in one pass and without regular expressions made from data.
+// Finds the terms of one word list in a text's trade words, by look-up and without regular expressions made from data.
 // The term language is told in rule-table.ts.
-import { formOf, stemOf, type TradeWord } from './trade-words'
+import { formOf, stemOf, type TradeText, type TradeWord } from './trade-words'
 
 /** Where a term stands: indices into the row of words, `last` included. */
 export interface TermHit {
@@ -10,11 +10,11 @@ export interface TermHit {
 
 type WordTest = (word: TradeWord) => boolean
 type Step = { kind: 'word'; test: WordTest } | { kind: 'gap' }
-export type TermMatcher = (words: readonly TradeWord[]) => TermHit[]
+export type TermMatcher = (text: TradeText) => TermHit[]
 
 const LONGEST_GAP = 3
 
-/** Compiles terms to a matcher. Hits come in text order; an empty list of terms finds nothing. */
+/** Compiles terms to a matcher. Hits come in text order and never overlap; an empty list of terms finds nothing. */
 export function compileTerms(terms: readonly string[]): TermMatcher {
   const byStem = new Map<string, Step[][]>()
   const byForm = new Map<string, Step[][]>()
@@ -28,18 +28,30 @@ export function compileTerms(terms: readonly string[]): TermMatcher {
       else append(byStem, stemOf(formOf(word)), steps)
     }
   }
-  return (words) => {
-    const hits: TermHit[] = []
-    words.forEach((word, first) => {
-      const last = Math.max(
-        longest(words, first, byStem.get(word.stem)),
-        longest(words, first, byForm.get(word.form)),
-        longest(words, first, byPrefix.filter(({ prefix }) => word.form.startsWith(prefix)).map(({ steps }) => steps)),
-      )
-      if (last >= first) hits.push({ first, last })
-    })
-    return hits
+  return ({ words, byStem: stems, byForm: forms }) => {
+    const ends = new Map<number, number>()
+    const look = (starts: readonly number[] | undefined, candidates: readonly Step[][]) => {
+      for (const first of starts ?? []) {
+        const last = longest(words, first, candidates)
+        if (last > (ends.get(first) ?? -1)) ends.set(first, last)
+      }
+    }
+    for (const [stem, candidates] of byStem) look(stems.get(stem), candidates)
+    for (const [form, candidates] of byForm) look(forms.get(form), candidates)
+    for (const { prefix, steps } of byPrefix) {
+      for (const [form, starts] of forms) if (form.startsWith(prefix)) look(starts, [steps])
+    }
+    return leftmost(ends)
   }
+}
+
+/** Leftmost and longest: the "gear" inside "landing gear" is no hit of its own. */
+function leftmost(ends: ReadonlyMap<number, number>): TermHit[] {
+  const hits: TermHit[] = []
+  for (const [first, last] of [...ends].sort(([a], [b]) => a - b)) {
+    if (first > (hits.at(-1)?.last ?? -1)) hits.push({ first, last })
+  }
+  return hits
 }
 
 function append(map: Map<string, Step[][]>, key: string, steps: Step[]): void {
@@ -69,9 +81,9 @@ function wordTest(token: string): WordTest {
 }
 
 /** Index of the last word of the longest term that starts at `first`, or -1. */
-function longest(words: readonly TradeWord[], first: number, candidates: readonly Step[][] | undefined): number {
+function longest(words: readonly TradeWord[], first: number, candidates: readonly Step[][]): number {
   let best = -1
-  for (const steps of candidates ?? []) best = Math.max(best, endOf(words, first, steps, 0))
+  for (const steps of candidates) best = Math.max(best, endOf(words, first, steps, 0))
   return best
 }
 

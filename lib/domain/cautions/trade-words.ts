@@ -11,6 +11,13 @@ export interface TradeWord {
   sentence: number
 }
 
+/** A text's words, and where each stem and form stands (indices in order): a matcher looks up its own few instead of reading all. */
+export interface TradeText {
+  words: readonly TradeWord[]
+  byStem: ReadonlyMap<string, readonly number[]>
+  byForm: ReadonlyMap<string, readonly number[]>
+}
+
 const SENTENCE_STEPS = 3
 const PARAGRAPH_STEPS = 30
 // Longer runs are part numbers or noise; Porter's rules are for words.
@@ -33,7 +40,7 @@ export function tradeWords(text: string): TradeWord[] {
   let position = 0
   let sentence = 0
   let end = 0
-  for (const match of text.matchAll(/[\p{L}\p{N}]+(?:['\u2019]\p{L}+)?/gu)) {
+  for (const match of text.matchAll(/\p{N}+(?:\.\p{N}+)?(?=[^\p{L}\p{N}]|$)|[\p{L}\p{N}]+(?:['\u2019]\p{L}+)?/gu)) {
     const between = text.slice(end, match.index)
     if (/\n\s*\n/.test(between)) [position, sentence] = [position + PARAGRAPH_STEPS, sentence + 1]
     else if (/[.!?;:]\s|\n/.test(between)) [position, sentence] = [position + SENTENCE_STEPS, sentence + 1]
@@ -45,4 +52,22 @@ export function tradeWords(text: string): TradeWord[] {
     position += 1
   }
   return words
+}
+
+/** A text read once for many matchers. */
+export function readTrade(text: string): TradeText {
+  const words = tradeWords(text)
+  const byStem = new Map<string, number[]>()
+  const byForm = new Map<string, number[]>()
+  words.forEach(({ stem, form }, index) => {
+    add(byStem, stem, index)
+    add(byForm, form, index)
+  })
+  return { words, byStem, byForm }
+}
+
+function add(map: Map<string, number[]>, key: string, index: number): void {
+  const list = map.get(key)
+  if (list) list.push(index)
+  else map.set(key, [index])
 }

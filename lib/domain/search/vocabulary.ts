@@ -36,9 +36,9 @@ export class Vocabulary {
   near(word: string, limit: number, most: number): Candidate[] {
     const found: Candidate[] = []
     const mask = lettersOf(word)
-    for (const [place, other] of this.words.entries()) {
-      if (Math.abs(other.length - word.length) > limit || (this.documents[place] ?? 0) === 0) continue
-      if (bitCount(mask ^ (this.letters[place] ?? 0)) > 2 * limit) continue
+    for (let place = 0; place < this.words.length; place++) {
+      if (bitCount(mask ^ (this.letters[place] ?? 0)) > 2 * limit || (this.documents[place] ?? 0) === 0) continue
+      const other = this.words[place] ?? ''
       const distance = editDistance(word, other, limit)
       if (distance <= limit) found.push({ word: other, documents: this.documents[place] ?? 0, cost: costOf(word, other, distance) })
     }
@@ -49,8 +49,10 @@ export class Vocabulary {
   startingWith(prefix: string, most: number): Candidate[] {
     const found: Candidate[] = []
     const mask = lettersOf(prefix)
-    for (const [place, word] of this.words.entries()) {
-      if ((mask & ~(this.letters[place] ?? 0)) !== 0 || (this.documents[place] ?? 0) === 0 || !word.startsWith(prefix)) continue
+    for (let place = 0; place < this.words.length; place++) {
+      if ((mask & ~(this.letters[place] ?? 0)) !== 0 || (this.documents[place] ?? 0) === 0) continue
+      const word = this.words[place] ?? ''
+      if (!word.startsWith(prefix)) continue
       found.push({ word, documents: this.documents[place] ?? 0, cost: 0 })
     }
     return found.sort(byCost).slice(0, most)

@@ -1,8 +1,7 @@
 // Its author edits an entry: a new revision. An edit of a question lapses the stamps on its answers and re-runs their cautions.
 import 'server-only'
 import { insertRevision, saveRendering } from '@/db/mutations/posts'
-import { getCautionedPost, listAnswerIds, listCautionedPosts, renderingKey, type CautionedPost } from '@/db/queries/cautioned-post'
-import type { Transaction } from '@/db/client'
+import { getCautionedPost, renderingKey, type CautionedPost } from '@/db/queries/cautioned-post'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { textFields } from '@/lib/domain/entries/entry-text'
@@ -11,11 +10,12 @@ import { AppError, refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import { lessonPartsSchema, questionPartsSchema, type EntryEdit } from '@/lib/schemas/entry-input'
-import { acknowledgeCautions, attachCautions, cautionsOfAnswer, cautionsOfEntry } from '@/lib/services/posts/attach-cautions'
+import { acknowledgeCautions, cautionsOfEntry } from '@/lib/services/posts/attach-cautions'
 import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
 import { placeEntry, type Placement } from '@/lib/services/posts/place-entry'
+import { rejudgeAnswers } from '@/lib/services/posts/rejudge-answers'
 import { renderText } from '@/lib/services/posts/render-text'
 import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { cleanParts } from './create-entry'
@@ -61,17 +61,6 @@ export async function editEntry(context: AppContext, id: number, input: EntryEdi
   if (letter === null) throw await stale()
   await context.search.catchUp()
   return letter
-}
-
-/** After its question changed: what the new text requires is added, and stamps on the old text lapse. */
-async function rejudgeAnswers(tx: Transaction, questionId: number, now: number): Promise<void> {
-  const question = await getCautionedPost(tx, questionId)
-  if (!question) return
-  const answers = await listCautionedPosts(tx, (await listAnswerIds(tx, [questionId])).map((a) => a.id))
-  for (const answer of answers) {
-    await attachCautions(tx, answer.id, cautionsOfAnswer(question, answer.current.body), 'added-later', now)
-    await judgePost(tx, answer.id)
-  }
 }
 
 function merged(before: CautionedPost, input: EntryEdit) {

@@ -35,9 +35,10 @@ export async function acknowledgeCautions(tx: Transaction, postId: number, requi
   const fresh = required.filter((c) => !rows.some((r) => r.code === c.code))
   const open = [...fresh, ...standing].filter((c) => !acknowledged.includes(c.code))
   if (open.length > 0) {
-    const title = (code: string) => cautionTable.cautions.find((c) => c.code === code)?.title ?? code
+    const words = (code: string) => cautionTable.cautions.find((c) => c.code === code)
     throw new AppError('invalid', 'Read and acknowledge the cautions first.', {
-      errors: open.map((c) => ({ path: `acknowledgedCautions.${c.code}`, message: `Acknowledge: ${title(c.code)} (${c.because}).` })),
+      errors: open.map((c) => ({ path: `acknowledgedCautions.${c.code}`, message: `Acknowledge: ${words(c.code)?.title ?? c.code} (${c.because}).` })),
+      cautions: open.flatMap((c) => { const w = words(c.code); return w ? [{ ...w, because: c.because, origin: 'rule' }] : [] }),
     })
   }
   if (fresh.length) await tx.insert(postCaution).values(fresh.map((c) => ({ postId, code: c.code, origin: 'rule' as const, because: c.because, createdAt: now, acknowledgedAt: now })))

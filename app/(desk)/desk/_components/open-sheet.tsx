@@ -1,0 +1,107 @@
+// The open sheet of the desk: the question at the left, the advice at the right, stamps and the empty place below, then what else a
+// mentor can do with it. The whole text stays in view above the stamp.
+import type { Route } from 'next'
+import Link from 'next/link'
+import { randomUUID } from 'node:crypto'
+import { CautionPlate } from '@/components/cautions/caution-plate'
+import { AskForForm } from '@/components/desk/ask-for-form'
+import { AskedForLine } from '@/components/desk/asked-for-line'
+import { RevisionLetter } from '@/components/entries/revision-letter'
+import { Sheet } from '@/components/entries/sheet'
+import { TitleBlock } from '@/components/entries/title-block'
+import { PlansWin } from '@/components/layout/plans-win'
+import { StampForm } from '@/components/stamps/stamp-form'
+import { StampOctagon } from '@/components/stamps/stamp-octagon'
+import { LinkButton } from '@/components/ui/link-button'
+import { NoticeLine } from '@/components/ui/notice-line'
+import { askForAction, pressStampAction } from '@/app/(site)/stamp-actions'
+import { groupCautions } from '@/lib/domain/cautions/group-cautions'
+import { formatDate } from '@/lib/format/date'
+import { paths } from '@/lib/paths'
+import type { DeskSheet } from '@/lib/services/desk/load-sheet'
+import { Advice, Found, standing, type Shown } from './sheet-text'
+
+interface OpenSheetProps {
+  sheet: DeskSheet
+  /** The desk with the next tag open. */
+  next: Route
+  /** The desk with nothing open. */
+  closed: Route
+}
+
+export function OpenSheet({ sheet, next, closed }: OpenSheetProps) {
+  const { entry, post, row } = sheet
+  const kicker = [`${entry.kind === 'question' ? 'Discrepancy sheet' : 'Lesson'} ${entry.id}`, row === null ? '' : `row ${row}`, `Rev ${post.revision}`].filter(Boolean).join(' · ')
+  return (
+    <>
+      <SheetPlate sheet={sheet} />
+      <Sheet as="article" id="open-sheet" labelledBy="open-sheet-title" className="border-2 border-ink">
+        <div className="flex flex-wrap items-center justify-between gap-4 border-b border-edge px-5 py-4">
+          <div className="min-w-0">
+            <p className="label">{kicker}</p>
+            <h2 id="open-sheet-title" className="text-section"><Link href={paths.entry(entry.id, post.id)}>{entry.title}</Link></h2>
+          </div>
+          <LinkButton href={closed}>Put back on the rail</LinkButton>
+        </div>
+        {row === null ? <Advice post={post} /> : (
+          <div className="grid lg:grid-cols-[minmax(0,22rem)_minmax(0,1fr)]">
+            <Found entry={entry} />
+            <Advice post={post} />
+          </div>
+        )}
+        <Facts sheet={sheet} />
+        <StampPlace sheet={sheet} next={next} />
+        <Foot sheet={sheet} next={next} />
+      </Sheet>
+      <PlansWin maker={sheet.maker} />
+    </>
+  )
+}
+
+/** The plate of the page: the cautions of what is open, with where each applies. */
+function SheetPlate({ sheet: { entry, post, row } }: { sheet: DeskSheet }) {
+  const own = { where: row === null ? 'this sheet' : `row ${row}`, cautions: standing(post) }
+  const plate = groupCautions(row === null ? [own] : [{ where: 'Found', cautions: standing(entry) }, own])
+  return plate ? <CautionPlate cautions={plate.lines.map((line) => ({ ...line, where: row === null ? undefined : line.where.join(', ') }))} /> : null
+}
+
+/** By, revision, system, how many go by it, and the stamps that were pressed. */
+function Facts({ sheet: { post, systems } }: { sheet: DeskSheet }) {
+  const pressed = post.stamps.filter((s) => s.withdrawn === undefined)
+  const cells = [
+    { label: 'By', value: post.author.id === undefined ? post.author.name : <Link href={paths.person(post.author.id)}>{post.author.name}</Link> },
+    { label: 'Rev · date', value: <><RevisionLetter revision={post.revision} /> · {formatDate(post.updatedAt)}</> },
+    { label: 'System', value: systems.length > 0 ? systems.join(', ') : 'None named' },
+    ...(post.kind === 'question' ? [] : [{ label: 'Going by it', value: post.goingByThis === 1 ? '1 builder' : `${post.goingByThis} builders` }]),
+  ]
+  const stamps = { label: post.needsTwo ? 'Stamps so far' : 'Stamp so far', content: <div className="stamp-row">{pressed.map((s) => <StampOctagon key={s.id} stamp={s} state={post.stamp} />)}</div> }
+  return <TitleBlock cells={cells} {...(pressed.length > 0 ? { stamps } : {})} />
+}
+
+/** The empty place with the form, or the next step where there is nothing to stamp. */
+function StampPlace({ sheet: { entry, post, mayStamp }, next }: { sheet: DeskSheet; next: Route }) {
+  const frame = 'border-t border-line px-5 py-5'
+  if (post.kind === 'question') return <div className={frame}><LinkButton href={paths.entry(entry.id)} look="primary">Say what to do</LinkButton></div>
+  if (!mayStamp) return <div className={frame}><NoticeLine>{stampedWords(post)} <Link href={next}>Open the next tag</Link></NoticeLine></div>
+  return (
+    <div className={frame}>
+      <StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} submission={randomUUID()} plans={entry.plans[0]} returnTo={next} />
+    </div>
+  )
+}
+
+const stampedWords = (post: Shown) => ('makerReply' in post && post.makerReply === 'one-serial'
+  ? 'A reply for one serial cannot be stamped: each builder asks for their own.'
+  : 'There is nothing here for you to stamp: these are your words, or your stamp stands.')
+
+function Foot({ sheet: { entry, post, mayAsk, requests }, next }: { sheet: DeskSheet; next: Route }) {
+  return (
+    <div className="grid gap-4 border-t border-line px-5 py-4">
+      <AskedForLine requests={requests} />
+      <div className="flex flex-wrap items-center justify-between gap-4">
+        {mayAsk ? <AskForForm action={askForAction} postId={post.id} returnTo={next} asked={requests} /> : null}
+        <LinkButton href={paths.entry(entry.id, post.id)}>Write what is wrong</LinkButton>
+      </div>
+    </div>
+  )
+}

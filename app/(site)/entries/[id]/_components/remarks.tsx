@@ -1,0 +1,28 @@
+// Remarks under a post. A remark shows what its own words require beyond its post's line, which stands right above.
+import { randomUUID } from 'node:crypto'
+import { CautionLine } from '@/components/cautions/caution-line'
+import { RemarkForm } from '@/components/entries/remark-form'
+import { Prose } from '@/components/prose/prose'
+import { Disclosure } from '@/components/ui/disclosure'
+import { formatDate } from '@/lib/format/date'
+import type { Answer, Entry } from '@/lib/schemas/post'
+import { remarkAction } from '../../actions'
+
+export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: boolean }) {
+  const known = new Set(post.cautions.map((c) => c.code))
+  if (post.remarks.length === 0 && !mayRemark) return null
+  return (
+    <Disclosure summary={post.remarks.length > 0 ? `Remarks (${post.remarks.length})` : 'Remark'} look="quiet" open={post.remarks.length > 0 && post.remarks.length <= 3}>
+      <ul className="remarks">
+        {post.remarks.map((r) => (
+          <li key={r.id}>
+            <p className="label">{r.author.name} · {formatDate(r.createdAt)}</p>
+            <CautionLine cautions={r.cautions.filter((c) => !known.has(c.code))} />
+            <Prose html={r.html} small />
+          </li>
+        ))}
+      </ul>
+      {mayRemark ? <RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} /> : null}
+    </Disclosure>
+  )
+}

@@ -1,0 +1,37 @@
+// What is known about one section, newest first.
+import type { Metadata } from 'next'
+import { HitList, HitPlate } from '@/components/entries/hit-list'
+import { PageTitle } from '@/components/layout/page-title'
+import { PlansWin } from '@/components/layout/plans-win'
+import { EmptyState } from '@/components/ui/empty-state'
+import { LinkButton } from '@/components/ui/link-button'
+import { pageContext } from '@/lib/auth/guards'
+import { paths } from '@/lib/paths'
+import { notFound } from 'next/navigation'
+import { getSectionPage } from '@/lib/services/kits/get-section-page'
+
+export async function generateMetadata({ params }: PageProps<'/kits/[kit]/[section]'>): Promise<Metadata> {
+  const { section } = await params
+  return { title: decodeURIComponent(section) }
+}
+
+export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[section]'>) {
+  const context = await pageContext()
+  const { kit, section } = await params
+  const page = await getSectionPage(context, kit, decodeURIComponent(section))
+  if (!page) notFound()
+  const here = { kit: page.kit.slug, section: page.code }
+  return (
+    <>
+      <PageTitle kicker={`${page.kit.name} · ${page.system}`} title={`${page.code} ${page.title}`} aside={<div className="button-row"><LinkButton href={paths.ask(here)} look="primary">Ask about it</LinkButton><LinkButton href={paths.lesson(here)}>Write a lesson</LinkButton></div>} />
+      {page.hits.length === 0 ? <EmptyState title="Nothing yet about this section" action={<LinkButton href={paths.ask(here)} look="primary">Ask the first question</LinkButton>}>Whoever finishes it first can spare the others an evening.</EmptyState> : (
+        <>
+          <HitPlate hits={page.hits} />
+          <HitList hits={page.hits} />
+          {page.total > page.hits.length ? <p><LinkButton href={paths.search(here)}>All {page.total}</LinkButton></p> : null}
+        </>
+      )}
+      <PlansWin maker={page.kit.maker} />
+    </>
+  )
+}

@@ -1,0 +1,44 @@
+// Every route of the API by its address, except the description itself, which is built from this list.
+// A test compares it with the folders, so that no route stays undescribed.
+import type { Handler, Method } from '@/lib/http/route'
+import * as answer from './answers/[id]/route'
+import * as requiredCautions from './cautions/required/route'
+import * as entry from './entries/[id]/route'
+import * as answers from './entries/[id]/answers/route'
+import * as entries from './entries/route'
+import * as health from './health/route'
+import * as importing from './import/route'
+import * as kit from './kits/[kit]/route'
+import * as kits from './kits/route'
+import * as operations from './operations/route'
+import * as outcome from './posts/[id]/outcome/route'
+import * as reliance from './posts/[id]/reliance/route'
+import * as remarks from './posts/[id]/remarks/route'
+import * as stamps from './posts/[id]/stamps/route'
+import * as preview from './preview/route'
+import * as search from './search/route'
+import * as similar from './similar/route'
+import * as withdraw from './stamps/[id]/withdraw/route'
+import * as suggest from './suggest/route'
+
+export const allRoutes: Record<string, Record<Method, Handler>> = {
+  '/api/search': search,
+  '/api/suggest': suggest,
+  '/api/similar': similar,
+  '/api/preview': preview,
+  '/api/entries': entries,
+  '/api/entries/{id}': entry,
+  '/api/entries/{id}/answers': answers,
+  '/api/answers/{id}': answer,
+  '/api/posts/{id}/remarks': remarks,
+  '/api/posts/{id}/stamps': stamps,
+  '/api/posts/{id}/outcome': outcome,
+  '/api/posts/{id}/reliance': reliance,
+  '/api/stamps/{id}/withdraw': withdraw,
+  '/api/cautions/required': requiredCautions,
+  '/api/kits': kits,
+  '/api/kits/{kit}': kit,
+  '/api/operations': operations,
+  '/api/import': importing,
+  '/api/health': health,
+}

@@ -1,0 +1,21 @@
+// Which rooms the navigation shows to whom. Asks the policy; rooms that do not exist yet are not here.
+import type { BarItem, NavItem } from '@/components/layout/nav-items'
+import { paths } from '@/lib/paths'
+import type { Actor } from '@/lib/policy/actor'
+import { can } from '@/lib/policy/can'
+
+/** Header, phone bar and footer for this actor. */
+export function navigationFor(actor: Actor): { rooms: NavItem[]; bar: BarItem[]; footer: NavItem[] } {
+  const desk: NavItem[] = can(actor, 'desk.open') ? [{ href: paths.desk(), label: 'Desk' }] : []
+  const people: NavItem[] = can(actor, 'people.open') ? [{ href: paths.people, label: 'People' }] : []
+  const me: NavItem = actor ? { href: paths.account, label: 'Account' } : { href: paths.signIn(), label: 'Sign in' }
+  const kits: NavItem = { href: paths.kits, label: 'Kits' }
+  return {
+    rooms: [{ href: paths.ask(), label: 'Ask' }, { href: paths.lesson(), label: 'Write a lesson' }, kits, ...desk, ...people, me],
+    bar: [
+      { href: paths.search(), label: 'Search', icon: 'search' }, { href: paths.ask(), label: 'Ask', icon: 'ask' }, { href: paths.lesson(), label: 'Lesson', icon: 'lesson' },
+      ...(desk[0] ? [{ ...desk[0], icon: 'desk' as const }] : [{ ...kits, icon: 'kits' as const }]), { ...me, icon: 'account' },
+    ],
+    footer: [kits, ...desk, ...people, { href: paths.guide('how-stamps-work'), label: 'How stamps work' }, { href: paths.guide('cautions-and-limits'), label: 'Cautions and limits' }, { href: paths.guide('privacy'), label: 'Privacy' }],
+  }
+}

@@ -1,0 +1,31 @@
+// Hits as rows of one sheet, and the grouped plate of all their cautions above a page of them.
+import type { ReactNode } from 'react'
+import { CautionPlate } from '@/components/cautions/caution-plate'
+import { groupCautions } from '@/lib/domain/cautions/group-cautions'
+import { hitKindLine } from '@/lib/format/kind-line'
+import type { Hit } from '@/lib/schemas/search'
+import type { Route } from 'next'
+import { HitRow } from './hit-row'
+import { Sheet } from './sheet'
+
+/** One sheet; nothing when there are no hits. */
+export function HitList({ hits, actionFor }: { hits: readonly Hit[]; actionFor?: (hit: Hit) => ReactNode }) {
+  if (hits.length === 0) return null
+  return (
+    <Sheet>
+      {hits.map((hit) => (
+        <HitRow key={hit.id} kindLine={hitKindLine(hit)} title={hit.title} href={hit.url as Route} cautions={standing(hit)} snippet={hit.snippet} marks={hit.marks}
+          partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} action={actionFor?.(hit)} />
+      ))}
+    </Sheet>
+  )
+}
+
+/** One plate for all hits of a page: each line says on how many of them it stands. */
+export function HitPlate({ hits }: { hits: readonly Hit[] }) {
+  const plate = groupCautions(hits.map((hit) => ({ where: String(hit.id), cautions: standing(hit) })))
+  if (!plate) return null
+  return <CautionPlate cautions={plate.lines.map((line) => ({ ...line, where: hits.length === 1 ? undefined : `On ${line.where.length} of ${hits.length}` }))} />
+}
+
+const standing = (hit: Hit) => hit.cautions.filter((c) => !c.waived)

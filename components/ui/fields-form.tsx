@@ -1,0 +1,61 @@
+'use client'
+// A small form of plain fields and one button, described as data by the page: errors in words, what was typed stays, and it works
+// without JavaScript. Forms that need more than fields in a column have files of their own.
+import { useForm, type FormAction } from '@/components/entries/use-form'
+import { Button, type ButtonLook } from './button'
+import { ErrorSummary } from './error-summary'
+import { NoticeLine } from './notice-line'
+import { Select } from './select'
+import { TextArea } from './text-area'
+import { TextField } from './text-field'
+
+export interface FormField {
+  name: string
+  label: string
+  /** 'area' and 'select' name their element; anything else is an input's type. */
+  kind?: 'text' | 'email' | 'password' | 'area' | 'select'
+  help?: string
+  /** What stands in it before anybody types. */
+  value?: string
+  optional?: boolean
+  maxLength?: number
+  autoComplete?: string
+  placeholder?: string
+  /** Choices of a select, in order. */
+  options?: readonly { value: string; label: string }[]
+}
+
+export interface FieldsFormProps {
+  action: FormAction
+  /** Unique on the page; the fields' ids begin with it. */
+  id: string
+  fields: readonly FormField[]
+  button: string
+  look?: ButtonLook
+  /** Values that travel along unseen. */
+  hidden?: Readonly<Record<string, string | number>>
+}
+
+export function FieldsForm({ action, id, fields, button, look = 'plain', hidden = {} }: FieldsFormProps) {
+  const { state, submit, isPending, form, errorOf, valueOf } = useForm(action)
+  const idOf = (path: string) => (fields.some((f) => f.name === path) ? { id: `${id}-${path}` } : {})
+  const errors = state.errors.length > 0 ? state.errors.map((e) => ({ ...idOf(e.path), message: e.message })) : state.message ? [{ message: state.message }] : []
+  return (
+    <form ref={form} action={submit} className="form-small grid max-w-2xl gap-4">
+      <ErrorSummary errors={errors} />
+      {state.done ? <NoticeLine boxed live>{state.done}</NoticeLine> : null}
+      {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" name={name} value={value} />)}
+      {fields.map((field) => <PlainField key={field.name} field={field} id={`${id}-${field.name}`} error={errorOf(field.name)} value={valueOf(field.name, field.value)} />)}
+      <div className="button-row"><Button type="submit" look={look} disabled={isPending}>{button}</Button></div>
+    </form>
+  )
+}
+
+function PlainField({ field, id, error, value }: { field: FormField; id: string; error: string | undefined; value: string }) {
+  const { name, label, kind = 'text', help, optional = false, maxLength, autoComplete, placeholder, options = [] } = field
+  const shared = { id, name, label, error, optional, ...(help ? { help } : {}) }
+  if (kind === 'area') return <TextArea {...shared} rows={3} maxLength={maxLength} defaultValue={value} />
+  // The key draws it anew: a select does not follow a changed defaultValue when the form is reset after an action.
+  if (kind === 'select') return <Select key={value} {...shared} defaultValue={value}>{options.map((o) => <option key={o.value} value={o.value}>{o.label}</option>)}</Select>
+  return <TextField {...shared} type={kind} maxLength={maxLength} autoComplete={autoComplete} placeholder={placeholder} defaultValue={kind === 'password' ? undefined : value} />
+}

@@ -1,0 +1,38 @@
+// The demo scenario under content/demo: invented people, kits and posts. Times are days before the seed day.
+import 'server-only'
+import entries1 from '@/content/demo/entries-1.json'
+import entries2 from '@/content/demo/entries-2.json'
+import kits from '@/content/demo/kits.json'
+import members from '@/content/demo/members.json'
+import operations from '@/content/operations.json'
+import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
+
+export interface DemoStamp { by: string; day: number; revision: string; basis: Basis; reference: string; plansRevision?: string; scope?: ReplyScope; withdrawn?: { day: number; reason: string } }
+export interface DemoOutcome { by: string; day: number; revision: string; result: 'as-written' | 'with-change' | 'did-not-work'; note: string }
+interface DemoMarks {
+  stamps?: DemoStamp[]
+  outcomes?: DemoOutcome[]
+  goingByThis?: { by: string; day: number; revision: string }[]
+  remarks?: { by: string; day: number; body: string }[]
+  addedCautions?: { code: string; by: string; because: string; day: number }[]
+  waivedCautions?: { code: string; by: string; reason: string; day: number }[]
+}
+export interface DemoAnswer extends DemoMarks { ref: string; author: string; day: number; body: string; makerReply?: ReplyScope; revisions?: { day: number; body: string }[] }
+export interface DemoText {
+  title: string; sections: string[]; tasks: string[]; operations?: string[]; hardware: string[]
+  plans?: { page: string; step?: string; revision?: string }[]; parts: Record<string, string | number>; orderAdvice?: { before: string; after: string }[]
+}
+export interface DemoEntry extends DemoMarks, DemoText {
+  ref: string; kind: 'question' | 'lesson'; kit: string; author: string; day: number
+  revisions?: { day: number; changes: Partial<DemoText> }[]
+  answers?: DemoAnswer[]
+}
+export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
+
+/** The password of every demo member. The demo says so when it starts. */
+export const demoPassword = 'whimbrel-demo'
+
+export const demoContent = {
+  kits, operations, members: members as DemoMember[],
+  entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
+}

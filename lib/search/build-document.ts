@@ -1,0 +1,57 @@
+// From an entry and its answers, as the database gives them with their cautions, to what the index holds.
+import 'server-only'
+import type { CautionedPost } from '@/db/queries/cautioned-post'
+import { evidenceWeight } from '@/lib/domain/search/evidence-weight'
+import type { SearchDocument } from './messages'
+
+/** Titles by slug: what people type instead of a slug. Sections bring their titles along. */
+export interface SearchTitles { tasks: ReadonlyMap<string, string>; operations: ReadonlyMap<string, string> }
+
+/**
+ * The document of `entry`, or null when it must not be found: not visible, or its own text was withdrawn.
+ * Answers that are not visible are left out, and so are withdrawn ones.
+ */
+export function buildDocument(entry: CautionedPost, answers: readonly CautionedPost[], titles: SearchTitles): SearchDocument | null {
+  if (entry.kind === 'answer' || entry.state !== 'visible') return null
+  const standing = answers.filter((answer) => answer.state === 'visible')
+  const passages = [entry, ...standing].map(passageOf).filter(({ weight }) => weight > 0)
+  if (passages[0]?.postId !== entry.id) return null
+  const { kit, current } = entry
+  return {
+    id: entry.id, kind: entry.kind, kit: kit?.slug ?? '', sections: current.sections, operations: current.operations, tasks: current.tasks,
+    stamped: (entry.kind === 'lesson' ? [entry] : standing).some((post) => post.stampState === 'stamped'),
+    open: entry.kind === 'question' && standing.length === 0,
+    createdAt: entry.createdAt, title: current.title, labels: labelsOf(entry, titles), passages,
+  }
+}
+
+function passageOf(post: CautionedPost): SearchDocument['passages'][number] {
+  return { postId: post.id, text: plainText(post), weight: post.kind === 'question' ? 1 : weightOf(post) }
+}
+
+function weightOf(post: CautionedPost): number {
+  const told = (result: CautionedPost['outcomes'][number]['result']) =>
+    post.outcomes.filter((o) => o.revision === post.current.number && o.result === result).length
+  return evidenceWeight({
+    stampState: post.stampState, critical: post.needsTwo,
+    asWritten: told('as-written'), withChange: told('with-change'), didNotWork: told('did-not-work'),
+  })
+}
+
+/** The rendered text when it is at hand, else the Markdown as typed: it finds the same words. */
+function plainText({ rendering, current }: CautionedPost): string {
+  if (rendering) return rendering.plain
+  const parts = Object.values(current.parts ?? {}).filter((part) => typeof part === 'string')
+  return [...parts, current.body].filter((text) => text !== '').join('\n')
+}
+
+function labelsOf({ kit, sections, current }: CautionedPost, titles: SearchTitles): string {
+  const titled = (slugs: readonly string[], known: ReadonlyMap<string, string>) => slugs.map((slug) => known.get(slug) ?? slug.replaceAll('-', ' '))
+  return [
+    kit?.name ?? '',
+    ...sections.flatMap(({ code, title }) => [code, title]),
+    ...titled(current.operations, titles.operations), ...titled(current.tasks, titles.tasks),
+    ...current.hardware,
+    ...current.plans.map(({ page, step }) => (step ? `${page} step ${step}` : page)),
+  ].filter((label) => label !== '').join('\n')
+}

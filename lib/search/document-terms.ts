@@ -1,0 +1,46 @@
+// Which terms an entry is indexed under: title three times, labels once, its passages, and the synonym groups they stand in.
+import 'server-only'
+import { analyseText } from '@/lib/domain/search/analyse-text'
+import type { Synonyms } from '@/lib/domain/search/synonyms'
+import type { SearchDocument } from './messages'
+
+export interface DocumentTerms {
+  /** With repetition: how often a term stands there is what ranks. */
+  all: string[]
+  /** Different words as written (lower case), for spelling and completion. */
+  words: Set<string>
+}
+
+/** Weight by repetition, because one joined field ranks better than several (measured). */
+const titleRepeats = 3
+
+/** Terms of an entry; the same document always gives the same terms, so that it can be counted out again. */
+export function termsOfDocument(document: SearchDocument, synonyms: Synonyms): DocumentTerms {
+  const result: DocumentTerms = { all: [], words: new Set() }
+  const title = readPart(document.title, synonyms, result)
+  for (let repeat = 1; repeat < titleRepeats; repeat++) result.all.push(...title)
+  readPart(document.labels, synonyms, result)
+  for (const passage of document.passages) readPart(passage.text, synonyms, result)
+  return result
+}
+
+function readPart(text: string, synonyms: Synonyms, result: DocumentTerms): string[] {
+  const { tokens } = analyseText(text)
+  const terms: string[] = []
+  for (const token of tokens) {
+    terms.push(token.term, ...token.also)
+    if (token.word.length > 2) result.words.add(token.word)
+  }
+  for (const match of synonyms.labelText(tokens)) terms.push(...match.terms)
+  for (const term of terms) result.all.push(term)
+  return terms
+}
+
+/** Adds or takes away one entry's different terms from the counts of entries a term. */
+export function countTerms(frequencies: Map<string, number>, terms: readonly string[], by: 1 | -1): void {
+  for (const term of new Set(terms)) {
+    const count = (frequencies.get(term) ?? 0) + by
+    if (count > 0) frequencies.set(term, count)
+    else frequencies.delete(term)
+  }
+}

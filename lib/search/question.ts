@@ -1,0 +1,61 @@
+// A question made ready for one pass over the postings: its terms numbered, its concepts and routes as numbers.
+import 'server-only'
+import type { Concept } from '@/lib/domain/search/understand-query'
+
+interface NumberedRoute { terms: readonly number[]; weight: number; strength: number }
+interface NumberedConcept { mass: number; routes: readonly NumberedRoute[] }
+
+/** Which of a question's terms something holds. */
+export type Holds = (term: number) => boolean
+
+export class Question {
+  readonly terms: readonly string[]
+  readonly mass: number
+  private readonly numbers = new Map<string, number>()
+  private readonly concepts: readonly NumberedConcept[]
+  /** Routes by each term that is part of them. */
+  private readonly routesOf: readonly (readonly NumberedRoute[])[]
+
+  constructor(concepts: readonly Concept[]) {
+    // Strongest first, so that coverage can stop at the first route that holds.
+    this.concepts = concepts.map(({ mass, routes }) => ({
+      mass,
+      routes: [...routes].sort((a, b) => b.strength - a.strength).map((route) => ({ ...route, terms: route.terms.map((term) => this.numberOf(term)) })),
+    }))
+    this.terms = [...this.numbers.keys()]
+    this.mass = concepts.reduce((sum, { mass }) => sum + mass, 0)
+    const routes = this.concepts.flatMap((concept) => concept.routes)
+    this.routesOf = this.terms.map((_, number) => routes.filter((route) => route.terms.includes(number)))
+  }
+
+  /** Number of a term of the question, undefined for others. */
+  find(term: string): number | undefined {
+    return this.numbers.get(term)
+  }
+
+  /** Share of the question that is held, 0 … 1: each concept by its strongest route. */
+  coverage(holds: Holds): number {
+    if (this.mass === 0) return 0
+    let covered = 0
+    for (const { mass, routes } of this.concepts) covered += mass * (routes.find((route) => route.terms.every(holds))?.strength ?? 0)
+    return covered / this.mass
+  }
+
+  /** Factor of a term's text score: the sum of the routes it completes. */
+  weight(term: number, holds: Holds): number {
+    let sum = 0
+    for (const { terms, weight } of this.routesOf[term] ?? []) {
+      if (terms.length === 1) sum += weight
+      else if (terms.every(holds)) sum += weight / terms.length
+    }
+    return sum
+  }
+
+  private numberOf(term: string): number {
+    const known = this.numbers.get(term)
+    if (known !== undefined) return known
+    const number = this.numbers.size
+    this.numbers.set(term, number)
+    return number
+  }
+}

@@ -1,0 +1,190 @@
+// The index itself: MiniSearch over one joined field, the words of the corpus beside it, and the order of what it finds.
+// Lives in the worker thread; knows entries only as SearchDocuments.
+import 'server-only'
+import MiniSearch from 'minisearch'
+import { leastCoverage } from '@/lib/domain/search/least-coverage'
+import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/understand-query'
+import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
+import { Vocabulary } from '@/lib/domain/search/vocabulary'
+import { entryWeight } from '@/lib/domain/search/entry-weight'
+import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
+import { findPassage } from './find-passage'
+import { HeldTerms } from './held-terms'
+import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest } from './messages'
+import { Question } from './question'
+import { TitleIndex } from './title-index'
+
+/** Measured on 1,400 abstracts and on a trade collection: one joined field, no lower bound on term frequency. */
+const bm25 = { k: 1.8, b: 0.7, d: 0 }
+const mostConcepts = 24
+const mostConceptsOfSimilar = 12
+const leastCoverageOfSimilar = 0.25
+/** Entries far below the best one only share a common word with the question. */
+const leastShareOfBest = 0.25
+/** Of more entries than this only those that hold most of the question are scored; the rest follow by what they hold. */
+const mostScored = 1_500
+/** Postings read for one question; the commonest words are left out beyond it, so that no text takes long. */
+const mostPostings = 120_000
+
+/** MiniSearch knows an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
+interface Kept { slot: number; document: SearchDocument; weight: number }
+interface Covering extends Kept { coverage: number }
+interface Scored extends Covering { score: number }
+type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
+
+export class SearchIndex {
+  private readonly mini = new MiniSearch<{ id: number; terms: string }>({
+    fields: ['terms'],
+    tokenize: (text) => text.split('\n'),
+    processTerm: (term) => term,
+    searchOptions: { combineWith: 'OR', bm25 },
+    autoVacuum: { minDirtCount: 50, minDirtFactor: 0.05, batchSize: 100, batchWait: 5 },
+  })
+  private readonly kept = new Map<number, Kept>()
+  private readonly slots: (Kept | undefined)[] = []
+  private readonly freeSlots: number[] = []
+  private readonly frequencies = new Map<string, number>()
+  private readonly vocabulary = new Vocabulary()
+  private readonly titles = new TitleIndex()
+  private readonly synonyms: Synonyms
+
+  constructor(synonyms: SynonymList) {
+    this.synonyms = new Synonyms(synonyms)
+  }
+
+  get documents(): number {
+    return this.kept.size
+  }
+
+  /** Adds an entry or puts its new text in place of the old. */
+  put(document: SearchDocument): void {
+    this.remove(document.id)
+    const terms = termsOfDocument(document, this.synonyms)
+    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
+    this.mini.add({ id: kept.slot, terms: terms.all.join('\n') })
+    this.titles.put(document.id, document.title)
+    this.count(terms, 1)
+    this.kept.set(document.id, kept)
+    this.slots[kept.slot] = kept
+  }
+
+  /** Takes an entry out; nothing happens when it is not in. */
+  remove(id: number): void {
+    const old = this.kept.get(id)
+    if (!old) return
+    this.count(termsOfDocument(old.document, this.synonyms), -1)
+    this.mini.discard(old.slot)
+    this.slots[old.slot] = undefined
+    this.freeSlots.push(old.slot)
+    this.titles.remove(id)
+    this.kept.delete(id)
+  }
+
+  search({ text, filters, limit, offset }: SearchRequest): Found {
+    const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
+    const { affordable, tooCommon } = this.afford(concepts)
+    const question = new Question(affordable)
+    const found = this.rank(question, filters, leastCoverage(affordable.length))
+    return {
+      hits: found.slice(offset, offset + limit).map((scored) => this.hit(scored, question)),
+      total: found.length,
+      ignored: [...ignored, ...tooCommon],
+      // A spelling under which nothing is found either helps nobody.
+      didYouMean: found.length > 0 ? didYouMean : null,
+    }
+  }
+
+  similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
+    const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
+    const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
+    return this.rank(question, filters, leastCoverageOfSimilar).slice(0, limit).map((scored) => this.hit(scored, question))
+  }
+
+  suggest(text: string, limit: number): { id: number; title: string }[] {
+    return this.titles.complete(text, limit).flatMap((id) => {
+      const title = this.kept.get(id)?.document.title
+      return title === undefined ? [] : [{ id, title }]
+    })
+  }
+
+  private corpus(): Corpus {
+    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms }
+  }
+
+  private count(terms: DocumentTerms, by: 1 | -1): void {
+    countTerms(this.frequencies, terms.all, by)
+    for (const word of terms.words) {
+      if (by === 1) this.vocabulary.add(word)
+      else this.vocabulary.remove(word)
+    }
+  }
+
+  /** Keeps the rarest concepts whose postings can be read in time. */
+  private afford(concepts: readonly Concept[]): { affordable: Concept[]; tooCommon: string[] } {
+    const affordable = new Set<Concept>()
+    let postings = 0
+    for (const concept of [...concepts].sort((a, b) => b.mass - a.mass)) {
+      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + (this.frequencies.get(term) ?? 0), 0), 0)
+      if (affordable.size === 0 || postings <= mostPostings) affordable.add(concept)
+    }
+    return { affordable: concepts.filter((c) => affordable.has(c)), tooCommon: concepts.filter((c) => !affordable.has(c)).map((c) => c.word) }
+  }
+
+  /** Best first, newest of equals first; empty when even the best holds less than `least` of the question. */
+  private rank(question: Question, filters: SearchFilters, least: number): Scored[] {
+    if (question.terms.length === 0) return []
+    const held = this.findHeld(question)
+    const covering: Covering[] = []
+    let best = 0
+    for (const slot of held.slots) {
+      const kept = this.slots[slot]
+      if (!kept || kept.weight === 0 || !passes(kept.document, filters)) continue
+      const coverage = question.coverage(held.at(slot))
+      best = Math.max(best, coverage)
+      covering.push({ ...kept, coverage })
+    }
+    if (best < least) return []
+    const found = covering.filter(({ coverage }) => coverage >= best * leastShareOfBest)
+    const cut = found.length <= mostScored ? 0 : ([...found].sort((a, b) => b.coverage - a.coverage)[mostScored - 1]?.coverage ?? 0)
+    const scores = this.score(question, held, new Set(found.filter(({ coverage }) => coverage >= cut).map(({ slot }) => slot)))
+    const lowest = Math.min(...scores.values())
+    return found.map((entry) => ({ ...entry, score: scores.get(entry.slot) ?? lowest * entry.coverage })).sort(byScore)
+  }
+
+  /** First pass: who holds what. Every posting is refused a score, so MiniSearch makes no result of it. */
+  private findHeld(question: Question): HeldTerms {
+    const held = new HeldTerms(question.terms.length, this.slots.length)
+    this.searchTerms(question, (slot, term) => {
+      held.note(slot, term)
+      return 0
+    })
+    return held
+  }
+
+  /** Second pass: BM25 of the chosen slots, without MiniSearch's coordination factor, × the weight of their evidence. */
+  private score(question: Question, held: HeldTerms, chosen: ReadonlySet<number>): Map<number, number> {
+    const results = this.searchTerms(question, (slot, term) => (chosen.has(slot) ? question.weight(term, held.at(slot)) : 0))
+    return new Map(results.map(({ id, score, queryTerms }) => {
+      const slot = Number(id)
+      return [slot, (score / Math.max(1, queryTerms.length)) * (this.slots[slot]?.weight ?? 0)]
+    }))
+  }
+
+  private searchTerms(question: Question, weigh: (slot: number, term: number) => number) {
+    return this.mini.search(question.terms.join('\n'), { boostDocument: (id, term) => weigh(Number(id), question.find(term) ?? 0) })
+  }
+
+  private hit({ document, score }: Scored, question: Question): SearchAnswer['hits'][number] {
+    return { id: document.id, score, ...findPassage(document, question, this.synonyms) }
+  }
+}
+
+const byScore = (a: Scored, b: Scored): number => b.score - a.score || b.document.createdAt - a.document.createdAt || a.document.id - b.document.id
+
+function passes(document: SearchDocument, filters: SearchFilters): boolean {
+  return (filters.kit === undefined || document.kit === filters.kit)
+    && (filters.section === undefined || document.sections.includes(filters.section))
+    && (filters.operation === undefined || document.operations.includes(filters.operation))
+    && (filters.kind === undefined || document.kind === filters.kind)
+    && (filters.stamped === undefined || document.stamped === filters.stamped)
+}

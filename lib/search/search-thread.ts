@@ -1,0 +1,76 @@
+// One run of the search thread: calls with a time limit, and word of its end. Starting another one is open-search.ts.
+import 'server-only'
+import { Worker } from 'node:worker_threads'
+import { SearchLoadingError } from './messages'
+import type { CallName, WorkerCalls, WorkerReply, WorkerRequest } from './worker-messages'
+
+interface Waiting { resolve(given: WorkerReply): void; reject(error: Error): void; timer: NodeJS.Timeout }
+
+export class SearchThread {
+  /** Resolves with the reason when the thread has ended, for whatever reason. */
+  readonly lost: Promise<Error>
+  private readonly worker: Worker
+  private readonly waiting = new Map<number, Waiting>()
+  private lastNumber = 0
+  private ended = false
+  private tellLost: (error: Error) => void = () => undefined
+
+  constructor(workerFile: string) {
+    this.lost = new Promise((resolve) => { this.tellLost = resolve })
+    // No environment and no flags of the parent: the thread sees no secrets and starts the same under tsx.
+    this.worker = new Worker(/* turbopackIgnore: true */ workerFile, { env: {}, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: 1024 } })
+    // The thread alone does not keep a process alive; a call that waits does.
+    this.worker.unref()
+    this.worker.on('message', (reply: WorkerReply) => this.receive(reply))
+    this.worker.on('error', (error: Error) => this.finish(error))
+    this.worker.on('exit', (code) => this.finish(new Error(`the search thread ended with code ${code}`)))
+  }
+
+  /**
+   * Asks the thread. Rejects with SearchLoadingError when the thread ends first or does not answer within `timeoutMs`
+   * (a thread that hangs is ended), with another error when the call itself failed.
+   */
+  call<Name extends CallName>(name: Name, asked: WorkerCalls[Name]['asked'], timeoutMs: number): Promise<WorkerCalls[Name]['given']> {
+    if (this.ended) return Promise.reject(new SearchLoadingError())
+    const number = ++this.lastNumber
+    const reply = new Promise<WorkerReply>((resolve, reject) => {
+      const timer = setTimeout(() => void this.end(new Error(`the search thread did not answer "${name}" within ${timeoutMs} ms`)), timeoutMs)
+      this.waiting.set(number, { resolve, reject, timer })
+    })
+    this.worker.ref()
+    this.worker.postMessage({ call: name, number, asked } as WorkerRequest)
+    // The number ties a reply to its call, so its shape is that of the call.
+    return reply.then((given) => unwrap(given) as WorkerCalls[Name]['given'])
+  }
+
+  /** Ends the thread; calls that wait are rejected. */
+  async end(reason: Error): Promise<void> {
+    this.finish(reason)
+    await this.worker.terminate()
+  }
+
+  private receive(reply: WorkerReply): void {
+    const waiting = this.waiting.get(reply.number)
+    if (!waiting) return
+    this.waiting.delete(reply.number)
+    clearTimeout(waiting.timer)
+    if (this.waiting.size === 0) this.worker.unref()
+    waiting.resolve(reply)
+  }
+
+  private finish(reason: Error): void {
+    if (this.ended) return
+    this.ended = true
+    for (const { reject, timer } of this.waiting.values()) {
+      clearTimeout(timer)
+      reject(new SearchLoadingError())
+    }
+    this.waiting.clear()
+    this.tellLost(reason)
+  }
+}
+
+function unwrap(reply: WorkerReply): WorkerCalls[CallName]['given'] {
+  if ('failed' in reply) throw new Error(`search failed: ${reply.failed}`)
+  return reply.given
+}

@@ -1,0 +1,17 @@
+// What passes between the search door and the worker thread, both ways. Every request gets one reply with its number.
+import 'server-only'
+import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest } from './messages'
+
+/** Entries to put and to take out, and the change sequence that is reached with them. */
+export interface Changes { put: SearchDocument[]; remove: number[]; sequence: number }
+
+export interface WorkerCalls {
+  apply: { asked: Changes; given: { documents: number } }
+  search: { asked: SearchRequest; given: SearchAnswer }
+  similar: { asked: { text: string; filters: SearchFilters; limit: number }; given: SearchAnswer['hits'] }
+  suggest: { asked: { text: string; limit: number }; given: { id: number; title: string }[] }
+}
+
+export type CallName = keyof WorkerCalls
+export type WorkerRequest = { [Name in CallName]: { call: Name; number: number; asked: WorkerCalls[Name]['asked'] } }[CallName]
+export type WorkerReply = { number: number; given: WorkerCalls[CallName]['given'] } | { number: number; failed: string }

@@ -1,0 +1,63 @@
+// Fills an empty database with the demo scenario, through the same laws as everybody: posts, revisions, stamps, reports.
+import 'server-only'
+import { count } from 'drizzle-orm'
+import type { Database, Transaction } from '@/db/client'
+import { kit, member, mentorship, operation, section, task } from '@/db/schema'
+import { write } from '@/db/transaction'
+import { hashPassword } from '@/lib/auth/password'
+import { demoContent, demoPassword } from '@/lib/content/demo-content'
+import type { Renderer } from '@/lib/render/renderer'
+import { seedEntry, type SeedPeople } from './seed-entry'
+
+const dayMs = 24 * 3600 * 1000
+/** Everybody joined, and mentorship was granted, before the oldest post. */
+const joinedDaysAgo = 900
+
+/** Seeds when there is no member yet; returns the number of entries, 0 when there was something. */
+export async function seedDemo(database: Database, renderer: Renderer, now: number): Promise<number> {
+  const [members] = await database.reader.select({ n: count() }).from(member)
+  if (!members || members.n > 0) return 0
+  // The seed day ends at the moment of seeding, so that nothing lies in the future.
+  const at = (daysAgo: number) => Math.round(now - daysAgo * dayMs)
+  const people = await seedPeople(database, at)
+  await seedPlaces(database, at(joinedDaysAgo))
+  for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
+  return demoContent.entries.length
+}
+
+async function seedPeople(database: Database, at: (daysAgo: number) => number): Promise<SeedPeople> {
+  const passwordHash = await hashPassword(demoPassword)
+  return write(database, { actorId: null, at: at(joinedDaysAgo) }, async (tx, record) => {
+    const people: SeedPeople = new Map()
+    for (const m of demoContent.members) {
+      const [row] = await tx.insert(member).values({ email: m.email, name: m.name, bio: m.bio, role: m.role, passwordHash, createdAt: at(joinedDaysAgo) }).returning({ id: member.id })
+      if (!row) throw new Error('The member was not inserted')
+      people.set(m.key, { id: row.id, mark: m.mentor?.number ?? null })
+      record('member.seed', `member:${row.id}`)
+    }
+    const steward = [...demoContent.members].find((m) => m.role === 'steward')
+    const grantedBy = steward ? people.get(steward.key)?.id : undefined
+    if (grantedBy === undefined) throw new Error('The demo has no steward')
+    for (const m of demoContent.members) if (m.mentor) await grant(tx, people.get(m.key)?.id, m.mentor, grantedBy, at(joinedDaysAgo))
+    return people
+  })
+}
+
+async function grant(tx: Transaction, memberId: number | undefined, mentor: { number: string; fields: string; reason: string }, grantedBy: number, createdAt: number): Promise<void> {
+  if (memberId !== undefined) await tx.insert(mentorship).values({ memberId, ...mentor, grantedBy, createdAt })
+}
+
+async function seedPlaces(database: Database, at: number): Promise<void> {
+  await write(database, { actorId: null, at }, async (tx, record) => {
+    for (const k of demoContent.kits) {
+      const [row] = await tx.insert(kit).values({ slug: k.slug, name: k.name, maker: k.maker }).returning({ id: kit.id })
+      if (!row) throw new Error('The kit was not inserted')
+      await tx.insert(section).values(k.sections.map((s, position) => ({ kitId: row.id, code: s.code, title: s.title, jasc: s.jasc, position })))
+      record('kit.seed', `kit:${row.id}`)
+    }
+    for (const [position, o] of demoContent.operations.entries()) {
+      const [row] = await tx.insert(operation).values({ slug: o.slug, title: o.title, position }).returning({ id: operation.id })
+      if (row && o.tasks.length) await tx.insert(task).values(o.tasks.map((t, i) => ({ operationId: row.id, slug: t.slug, title: t.title, position: i })))
+    }
+  })
+}

@@ -1,0 +1,98 @@
+// Imports a file, one entry a line. A bad line is named and passed over; the others are written, a batch a transaction.
+// What a line may say stands in parse-line.ts, what is done before and in a transaction in prepare-entry.ts and write-entry.ts.
+import 'server-only'
+import { write } from '@/db/transaction'
+import type { AppContext } from '@/lib/context'
+import { AppError, refuse } from '@/lib/errors'
+import { logError } from '@/lib/log'
+import { can } from '@/lib/policy/can'
+import { whyNot } from '@/lib/policy/why-not'
+import type { ImportResult } from '@/lib/schemas/import'
+import { asLawBroken } from './as-law-broken'
+import { readNameBook } from './name-book'
+import { parseLine } from './parse-line'
+import { prepareEntry, type PreparedEntry } from './prepare-entry'
+import { readLines } from './read-lines'
+import { writeEntry, type Done } from './write-entry'
+
+export type ImportContext = Pick<AppContext, 'database' | 'reader' | 'actor' | 'now' | 'renderer'>
+
+const linesABatch = 50
+/** A file that is none of ours fails on every line: this many are named, then the rest is left unread. */
+const mostFailures = 1000
+
+/** The import of the API: what was written can be found when it answers. */
+export async function importFile(context: AppContext, bytes: Uint8Array): Promise<ImportResult> {
+  const result = await importLines(context, bytes)
+  await context.search.catchUp()
+  return result
+}
+
+/** Imports NDJSON as a steward; 403 for others. Throws only when the database stays busy: batches before that are written. */
+export async function importLines(context: ImportContext, bytes: Uint8Array): Promise<ImportResult> {
+  if (!can(context.actor, 'import')) throw refuse.forbidden(whyNot.import)
+  const names = await readNameBook(context.reader)
+  const result: ImportResult = { imported: 0, updated: 0, unchanged: 0, failed: [] }
+  const fail = (line: number, message: string) => result.failed.push({ line, message })
+  let batch: PreparedEntry[] = []
+  for (const read of readLines(bytes)) {
+    if (result.failed.length >= mostFailures) {
+      fail(read.line, 'Too many lines failed; this one and those after it were not read.')
+      break
+    }
+    if ('fault' in read) {
+      fail(read.line, read.fault)
+      continue
+    }
+    try {
+      batch.push(await prepareEntry(context, read.line, parseLine(names, read.value, context.now)))
+    } catch (error) {
+      fail(read.line, wordsOf(error))
+    }
+    if (batch.length >= linesABatch) {
+      await writeBatch(context, batch, result)
+      batch = []
+    }
+  }
+  await writeBatch(context, batch, result)
+  result.failed.sort((a, b) => a.line - b.line)
+  return result
+}
+
+/** One transaction for all; when one line breaks it, each line has its own. */
+async function writeBatch(context: ImportContext, batch: readonly PreparedEntry[], result: ImportResult): Promise<void> {
+  if (batch.length === 0) return
+  const done = await writeTogether(context, batch).catch(async (error: unknown) => {
+    if (!isOfTheLine(error)) throw error
+    const each: Done[] = []
+    for (const prepared of batch) {
+      await writeTogether(context, [prepared]).then((d) => each.push(...d), (own: unknown) => {
+        if (!isOfTheLine(own)) throw own
+        result.failed.push({ line: prepared.line, message: wordsOf(own) })
+      })
+    }
+    return each
+  })
+  for (const kind of done) result[kind]++
+}
+
+function writeTogether(context: ImportContext, batch: readonly PreparedEntry[]): Promise<Done[]> {
+  return write(context.database, { actorId: context.actor?.id ?? null, at: context.now }, async (tx, record) => {
+    const done: Done[] = []
+    for (const prepared of batch) {
+      done.push(await writeEntry(tx, prepared, record, context.now))
+      // The driver never leaves the microtask queue: without a turn of the loop a batch would hold up every reader.
+      await new Promise((resolve) => setImmediate(resolve))
+    }
+    return done
+  })
+}
+
+const isOfTheLine = (error: unknown) => error instanceof AppError || asLawBroken(error) !== null
+
+function wordsOf(error: unknown): string {
+  if (error instanceof AppError) return error.message
+  const law = asLawBroken(error)
+  if (law === null) logError('import', error)
+  return law ?? 'This line could not be written.'
+}

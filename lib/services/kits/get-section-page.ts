@@ -1,0 +1,19 @@
+// One section with what was written about it.
+import 'server-only'
+import { countEntries, listEntryIds } from '@/db/queries/entries'
+import { getSection } from '@/db/queries/kits'
+import { jascTitle } from '@/lib/content/jasc'
+import type { AppContext } from '@/lib/context'
+import { presentHits } from '@/lib/services/search/present-hits'
+
+/** Null when there is no such section. */
+export async function getSectionPage(context: AppContext, kitSlug: string, code: string) {
+  const found = await getSection(context.reader, kitSlug, code)
+  if (!found) return null
+  const filters = { kit: kitSlug, section: code }
+  const ids = await listEntryIds(context.reader, filters, { limit: 30, offset: 0 })
+  return {
+    kit: found.kit, code: found.section.code, title: found.section.title, system: found.section.jasc ? `JASC ${found.section.jasc} ${jascTitle(found.section.jasc)}` : 'no system',
+    total: await countEntries(context.reader, filters), hits: await presentHits(context, ids.map((id) => ({ id, postId: id, score: 0, terms: [] }))),
+  }
+}

@@ -1,0 +1,49 @@
+// Entry ids and passages from the search door -> hits, read from the database with a fixed number of queries.
+import 'server-only'
+import { listAnswerIds, listCautionedPosts, type CautionedPost } from '@/db/queries/cautioned-post'
+import { listTasksBySlug } from '@/db/queries/kits'
+import type { AppContext } from '@/lib/context'
+import { unionCautions } from '@/lib/domain/cautions/group-cautions'
+import { textFields } from '@/lib/domain/entries/entry-text'
+import { revisionLetter } from '@/lib/domain/entries/revision-letter'
+import { makeSnippet } from '@/lib/domain/search/snippet'
+import { paths } from '@/lib/paths'
+import type { Hit } from '@/lib/schemas/search'
+import { presentCautions, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
+
+interface Found { id: number; postId: number; score: number; terms: readonly string[] }
+
+/** Hits in the order given. Anything not visible any more is left out, whatever the index says. */
+export async function presentHits(context: AppContext, found: readonly Found[]): Promise<Hit[]> {
+  const answers = await listAnswerIds(context.reader, found.map((f) => f.id))
+  const wanted = [...new Set(found.flatMap((f) => [f.id, f.postId]))]
+  const posts = new Map((await listCautionedPosts(context.reader, [...wanted, ...answers.map((a) => a.id).filter((id) => !wanted.includes(id))])).map((p) => [p.id, p]))
+  const tasks = new Map((await listTasksBySlug(context.reader, [...new Set([...posts.values()].flatMap((p) => p.current.tasks))])).map((t) => [t.slug, t.title]))
+  return found.flatMap((f) => {
+    const entry = posts.get(f.id)
+    const passage = posts.get(f.postId) ?? entry
+    if (!entry || !passage || entry.state !== 'visible' || entry.kind === 'answer') return []
+    const own = answers.flatMap((a) => (a.parentId === entry.id ? (posts.get(a.id) ?? []) : [])).filter((a) => a.state === 'visible')
+    return [presentHit(f, entry, passage.state === 'visible' ? passage : entry, own, tasks)]
+  })
+}
+
+function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, answers: readonly CautionedPost[], tasks: ReadonlyMap<string, string>): Hit {
+  // A question shows the stamps of the advice under it: the passage's, or the best there is.
+  const advice = passage.kind === 'question' ? (answers.find((a) => a.stampState === 'stamped') ?? answers.find((a) => a.stampState !== 'none') ?? null) : passage
+  const plain = plainText(passage)
+  return {
+    id: entry.id, kind: entry.kind === 'lesson' ? 'lesson' : 'question', ...(entry.ref !== null ? { ref: entry.ref } : {}), title: entry.current.title, url: paths.entry(entry.id, passage.id),
+    passage: { postId: passage.id, kind: passage.kind, author: passage.author.id === null ? { name: passage.author.name } : { id: passage.author.id, name: passage.author.name }, revision: revisionLetter(passage.current.number) },
+    ...makeSnippet(plain, [...found.terms]), score: found.score, kit: entry.kit?.slug ?? '', sections: entry.current.sections, tasks: entry.current.tasks,
+    partTags: [...entry.sections.map((s) => ({ code: s.code, title: s.title })), ...entry.current.tasks.map((slug) => ({ title: tasks.get(slug) ?? slug }))],
+    stamp: advice?.stampState ?? 'none', stamps: advice ? presentStamps(advice, advice.kind === 'answer' ? entry.current.number : 0).filter((s) => s.withdrawn === undefined) : [],
+    needsTwo: passage.needsTwo || entry.needsTwo, open: entry.kind === 'question' && answers.length === 0, answers: answers.length,
+    outcomes: presentOutcomes(advice ?? passage), cautions: unionCautions([presentCautions(entry), presentCautions(passage), ...(advice ? [presentCautions(advice)] : [])]),
+  }
+}
+
+/** The text a snippet is cut from: what was rendered, or the Markdown while that is missing. */
+function plainText(post: CautionedPost): string {
+  return post.rendering?.plain ?? textFields(post.kind, post.current.parts, post.current.body).map((f) => f.text).join('\n\n')
+}
