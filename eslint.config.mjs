@@ -5,7 +5,7 @@ import typescript from 'eslint-config-next/typescript'
 const zone = (target, from, message, except) => ({ target, from, message, ...(except ? { except } : {}) })
 const browserSafe = ['./schemas', './domain', './policy', './format', './paths.ts', './form-state.ts', './client', './fonts']
 
-export default [
+const config = [
   { ignores: ['.next/**', 'dist/**', 'data/**', 'node_modules/**', 'next-env.d.ts', 'drizzle/**'] },
   ...next,
   ...typescript,
@@ -43,3 +43,5 @@ export default [
   },
   { files: ['tests/**'], rules: { '@typescript-eslint/no-non-null-assertion': 'off' } },
 ]
+
+export default config

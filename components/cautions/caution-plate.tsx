@@ -12,11 +12,12 @@ export interface PlateCaution {
   readonly where?: string | undefined
 }
 
-export function CautionPlate({ cautions }: { cautions: readonly PlateCaution[] }) {
+/** `brief` sets the lines in two columns where there is room: the plate of a list. */
+export function CautionPlate({ cautions, brief = false }: { cautions: readonly PlateCaution[], brief?: boolean }) {
   const id = useId()
   if (cautions.length === 0) return null
   return (
-    <section className="caution-plate" aria-labelledby={id}>
+    <section className={brief ? 'caution-plate caution-plate-brief' : 'caution-plate'} aria-labelledby={id}>
       <CautionWord word={gravestWord(cautions.map((caution) => caution.signalWord))} id={id} />
       <ul>
         {cautions.map((caution) => (

@@ -21,11 +21,26 @@ export function HitList({ hits, actionFor }: { hits: readonly Hit[]; actionFor?:
   )
 }
 
-/** One plate for all hits of a page: each line says on how many of them it stands. */
+/**
+ * One plate for all hits of a page, a short line a topic with on how many of them it stands; the full texts head each entry.
+ * A list has to leave room for what was looked up.
+ */
 export function HitPlate({ hits }: { hits: readonly Hit[] }) {
   const plate = groupCautions(hits.map((hit) => ({ where: String(hit.id), cautions: standing(hit) })))
   if (!plate) return null
-  return <CautionPlate cautions={plate.lines.map((line) => ({ ...line, where: hits.length === 1 ? undefined : `On ${line.where.length} of ${hits.length}` }))} />
+  const short = new Map(hits.flatMap((hit) => hit.cautions.map((c) => [c.code, c.short] as const)))
+  return (
+    <CautionPlate brief cautions={plate.lines.map((line) => {
+      const where = hits.length === 1 ? undefined : `${line.where.length} of ${hits.length}`
+      return { ...line, text: withoutTopic(short.get(line.code) ?? line.text), where }
+    })} />
+  )
+}
+
+/** A short text begins with its topic ("Eyes: safety glasses …"), which the plate prints by itself. */
+function withoutTopic(short: string): string {
+  const rest = short.replace(/^[^:]{1,40}:\s*/, '')
+  return rest.charAt(0).toUpperCase() + rest.slice(1)
 }
 
 const standing = (hit: Hit) => hit.cautions.filter((c) => !c.waived)

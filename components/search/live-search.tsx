@@ -4,7 +4,7 @@ import { QueryClient, QueryClientProvider, keepPreviousData, useQuery } from '@t
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useRouter } from 'next/navigation'
-import { useEffect, useState, type RefObject } from 'react'
+import { useEffect, useMemo, useState, type RefObject } from 'react'
 import { CautionWord, gravestWord } from '@/components/cautions/caution-word'
 import { MarkedSnippet } from '@/components/entries/marked-snippet'
 import { liveResults } from '@/lib/client/queries'
@@ -27,7 +27,7 @@ function Results({ input, shown, results }: Props) {
   const [active, setActive] = useState(-1)
   const words = useRested(typed, 150)
   const { data, error, isFetching } = useQuery({ ...liveResults(words), placeholderData: keepPreviousData })
-  const hits = words.trim() === '' ? [] : (data?.results ?? [])
+  const hits = useMemo(() => (words.trim() === '' ? [] : (data?.results ?? [])), [words, data])
   const isShown = isOpen && typed.trim() !== '' && typed !== shown
 
   useEffect(() => {

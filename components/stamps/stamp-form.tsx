@@ -27,54 +27,55 @@ export interface StampFormProps {
   single?: boolean
 }
 
-type Form = ReturnType<typeof useForm>
+/** What was typed before a refusal, and what was wrong with it. */
+type Typed = Pick<ReturnType<typeof useForm>, 'errorOf' | 'valueOf'>
 interface Own { name: string; label: string; help?: string; type?: string; start?: string; className?: string; maxLength?: number }
 
-function OwnField({ form, prefix, name, label, help, type = 'text', start = '', className = '', maxLength = 120 }: Own & { form: Form; prefix: string }) {
+function OwnField({ typed, prefix, name, label, help, type = 'text', start = '', className = '', maxLength = 120 }: Own & { typed: Typed; prefix: string }) {
   return (
     <div className={className}>
-      <TextField id={`${prefix}-${name}`} name={name} label={label} type={type} maxLength={maxLength} autoComplete="off" defaultValue={form.valueOf(name, start)} error={form.errorOf(name)} {...(help ? { help } : {})} />
+      <TextField id={`${prefix}-${name}`} name={name} label={label} type={type} maxLength={maxLength} autoComplete="off" defaultValue={typed.valueOf(name, start)} error={typed.errorOf(name)} {...(help ? { help } : {})} />
     </div>
   )
 }
 
 /** One basis: its radio, and under it the fields it needs. */
-function Basis({ form, value, label, help, children }: { form: Form; value: string; label: string; help: string; children: ReactNode }) {
+function Basis({ typed, value, label, help, children }: { typed: Typed; value: string; label: string; help: string; children: ReactNode }) {
   return (
     <div className="group/basis grid gap-2">
-      <RadioRow name="basis" value={value} label={label} help={help} defaultChecked={form.valueOf('basis') === value} />
+      <RadioRow name="basis" value={value} label={label} help={help} defaultChecked={typed.valueOf('basis') === value} />
       <div className="flex flex-wrap items-end gap-3 pb-3 pl-4 group-not-has-[[name=basis]:checked]/basis:hidden">{children}</div>
     </div>
   )
 }
 
-function Bases({ form, prefix, plans }: { form: Form; prefix: string; plans: StampFormProps['plans'] }) {
-  const own = { form, prefix }
+function Bases({ typed, prefix, plans }: { typed: Typed; prefix: string; plans: StampFormProps['plans'] }) {
+  const own = { typed, prefix }
   return (
     <>
-      <Basis form={form} value="plans" label="Plans step" help="page and revision before me">
+      <Basis typed={typed} value="plans" label="Plans step" help="page and revision before me">
         <OwnField {...own} name="page" label="Page" start={plans?.page ?? ''} className="w-32" maxLength={40} />
         <OwnField {...own} name="plansRevision" label="Rev" className="w-20" maxLength={20} />
         <OwnField {...own} name="step" label="Step" start={plans?.step ?? ''} className="w-24" maxLength={20} />
         <div className="basis-full">
-          <FieldError id={`${prefix}-beforeMe`} error={form.errorOf('beforeMe')} />
-          <Checkbox id={`${prefix}-beforeMe`} name="beforeMe" value="yes" label="I have this page before me" defaultChecked={form.valueOf('beforeMe') === 'yes'} aria-describedby={form.errorOf('beforeMe') ? `${prefix}-beforeMe-error` : undefined} />
+          <FieldError id={`${prefix}-beforeMe`} error={typed.errorOf('beforeMe')} />
+          <Checkbox id={`${prefix}-beforeMe`} name="beforeMe" value="yes" label="I have this page before me" defaultChecked={typed.valueOf('beforeMe') === 'yes'} aria-describedby={typed.errorOf('beforeMe') ? `${prefix}-beforeMe-error` : undefined} />
         </div>
       </Basis>
-      <Basis form={form} value="standard" label="Published standard" help="edition, paragraph">
+      <Basis typed={typed} value="standard" label="Published standard" help="edition, paragraph">
         <OwnField {...own} name="edition" label="Standard and edition" className="min-w-56 flex-1" />
         <OwnField {...own} name="paragraph" label="Paragraph" className="w-32" maxLength={60} />
       </Basis>
-      <Basis form={form} value="own-build" label="Done on own build" help="which, and when">
+      <Basis typed={typed} value="own-build" label="Done on own build" help="which, and when">
         <OwnField {...own} name="build" label="Which build" className="min-w-56 flex-1" />
         <OwnField {...own} name="builtWhen" label="When" className="w-40" maxLength={60} />
       </Basis>
-      <Basis form={form} value="maker-reply" label="Kit maker’s written reply" help="bulletin, all kits">
+      <Basis typed={typed} value="maker-reply" label="Kit maker’s written reply" help="bulletin, all kits">
         <OwnField {...own} name="replyDate" label="Day of the reply" type="date" className="w-48" />
         <div className="basis-full">
-          <ChoiceGroup id={`${prefix}-scope`} legend="It holds for" error={form.errorOf('scope')}>
-            <RadioRow name="scope" value="bulletin" label="Bulletin" help="everybody it names" defaultChecked={form.valueOf('scope') === 'bulletin'} />
-            <RadioRow name="scope" value="all-kits" label="All kits" help="said in general" defaultChecked={form.valueOf('scope') === 'all-kits'} />
+          <ChoiceGroup id={`${prefix}-scope`} legend="It holds for" error={typed.errorOf('scope')}>
+            <RadioRow name="scope" value="bulletin" label="Bulletin" help="everybody it names" defaultChecked={typed.valueOf('scope') === 'bulletin'} />
+            <RadioRow name="scope" value="all-kits" label="All kits" help="said in general" defaultChecked={typed.valueOf('scope') === 'all-kits'} />
           </ChoiceGroup>
         </div>
       </Basis>
@@ -83,11 +84,11 @@ function Bases({ form, prefix, plans }: { form: Form; prefix: string; plans: Sta
 }
 
 export function StampForm({ action, postId, revision, missing, submission, plans, returnTo, single = false }: StampFormProps) {
-  const form = useForm(action)
+  const { state, submit, isPending, form, errorOf, valueOf } = useForm(action)
   const prefix = `stamp-${postId}`
-  const errors = form.state.errors.length > 0 ? form.state.errors.map((e) => ({ id: `${prefix}-${e.path}`, message: e.message })) : form.state.message ? [{ message: form.state.message }] : []
+  const errors = state.errors.length > 0 ? state.errors.map((e) => ({ id: `${prefix}-${e.path}`, message: e.message })) : state.message ? [{ message: state.message }] : []
   return (
-    <form ref={form.form} action={form.submit} className="grid gap-4">
+    <form ref={form} action={submit} className="grid gap-4">
       <ErrorSummary errors={errors} />
       <input type="hidden" name="postId" value={postId} />
       <input type="hidden" name="revision" value={revision} />
@@ -95,13 +96,13 @@ export function StampForm({ action, postId, revision, missing, submission, plans
       {returnTo ? <input type="hidden" name="returnTo" value={returnTo} /> : null}
       <div className="flex flex-wrap items-start gap-6">
         <div className="min-w-0 flex-[1_1_22rem]">
-          <ChoiceGroup id={`${prefix}-basis`} legend="Basis: what makes you sure?" error={form.errorOf('basis')}>
-            <Bases form={form} prefix={prefix} plans={plans} />
+          <ChoiceGroup id={`${prefix}-basis`} legend="Basis: what makes you sure?" error={errorOf('basis')}>
+            <Bases typed={{ errorOf, valueOf }} prefix={prefix} plans={plans} />
           </ChoiceGroup>
         </div>
         <div className="grid justify-items-center gap-3">
           <EmptyStamp which={single && missing === 'first' ? 'only' : (missing ?? 'only')} />
-          <Button type="submit" look="primary" disabled={form.isPending}>Press stamp on Rev {revision}</Button>
+          <Button type="submit" look="primary" disabled={isPending}>Press stamp on Rev {revision}</Button>
           <p className="max-w-44 text-center text-small text-ink-soft">Advice checked, work not inspected.</p>
         </div>
       </div>

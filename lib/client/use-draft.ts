@@ -1,14 +1,13 @@
 // Keeps what is being written on this device, for this member and this form, and brings it back.
-import { useCallback, useEffect, useRef, useState, type RefObject } from 'react'
+import { useCallback, useEffect, useRef, useSyncExternalStore, type RefObject } from 'react'
 import { formValues, type FormValues } from './form-values'
 
 interface Kept { savedAt: number; values: FormValues }
 const saveAfterMs = 400
 
-/** `restored` is what was kept; `generation` changes when fields have to be drawn again from it. */
+/** `restored` is what was kept when the form came up; fields are drawn again from it under the key `generation`. */
 export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, isRefused: boolean) {
-  const [restored, setRestored] = useState<Kept | null>(null)
-  const [generation, setGeneration] = useState(0)
+  const restored = useSyncExternalStore(subscribe, () => keptAtFirst(key), () => null)
   const isSent = useRef(false)
   const refused = useRef(isRefused)
 
@@ -17,14 +16,10 @@ export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, i
     if (isRefused) isSent.current = false
   }, [isRefused])
 
-  useEffect(() => {
-    const kept = readKept(key)
-    if (kept) {
-      setRestored(kept)
-      setGeneration((n) => n + 1)
-    }
+  useEffect(() => () => {
     // A form that was sent and went away without a refusal was accepted: its draft has done its work.
-    return () => { if (isSent.current && !refused.current) localStorage.removeItem(key) }
+    if (isSent.current && !refused.current) localStorage.removeItem(key)
+    atFirst.delete(key)
   }, [key])
 
   useEffect(() => {
@@ -41,14 +36,31 @@ export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, i
       element.removeEventListener('input', onInput)
       element.removeEventListener('submit', onSubmit)
     }
-  }, [form, key, generation])
+  }, [form, key])
 
   const throwAway = useCallback(() => {
     localStorage.removeItem(key)
-    setRestored(null)
-    setGeneration((n) => n + 1)
+    atFirst.set(key, null)
+    for (const listener of listeners) listener()
   }, [key])
-  return { restored, generation, throwAway }
+  return { restored, generation: restored?.savedAt ?? 0, throwAway }
+}
+
+// What storage held when a form came up. Later saves must not draw the fields again under the writer's hands.
+const atFirst = new Map<string, Kept | null>()
+const listeners = new Set<() => void>()
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener)
+  return () => listeners.delete(listener)
+}
+
+function keptAtFirst(key: string): Kept | null {
+  const known = atFirst.get(key)
+  if (known !== undefined) return known
+  const kept = readKept(key)
+  atFirst.set(key, kept)
+  return kept
 }
 
 function readKept(key: string): Kept | null {

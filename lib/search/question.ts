@@ -1,8 +1,8 @@
 // A question made ready for one pass over the postings: its terms numbered, its concepts and routes as numbers.
 import 'server-only'
-import type { Concept } from '@/lib/domain/search/understand-query'
+import type { Concept, Route } from '@/lib/domain/search/understand-query'
 
-interface NumberedRoute { terms: readonly number[]; weight: number; strength: number }
+interface NumberedRoute { first: number; others: readonly number[]; weight: number; strength: number }
 interface NumberedConcept { mass: number; routes: readonly NumberedRoute[] }
 
 /** Which of a question's terms something holds. */
@@ -20,12 +20,12 @@ export class Question {
     // Strongest first, so that coverage can stop at the first route that holds.
     this.concepts = concepts.map(({ mass, routes }) => ({
       mass,
-      routes: [...routes].sort((a, b) => b.strength - a.strength).map((route) => ({ ...route, terms: route.terms.map((term) => this.numberOf(term)) })),
+      routes: [...routes].sort((a, b) => b.strength - a.strength).map((route) => this.numbered(route)),
     }))
     this.terms = [...this.numbers.keys()]
     this.mass = concepts.reduce((sum, { mass }) => sum + mass, 0)
     const routes = this.concepts.flatMap((concept) => concept.routes)
-    this.routesOf = this.terms.map((_, number) => routes.filter((route) => route.terms.includes(number)))
+    this.routesOf = this.terms.map((_, number) => routes.filter(({ first, others }) => first === number || others.includes(number)))
   }
 
   /** Number of a term of the question, undefined for others. */
@@ -37,18 +37,30 @@ export class Question {
   coverage(holds: Holds): number {
     if (this.mass === 0) return 0
     let covered = 0
-    for (const { mass, routes } of this.concepts) covered += mass * (routes.find((route) => route.terms.every(holds))?.strength ?? 0)
+    // Plain loops: this runs for every entry that holds a word of the question.
+    for (const { mass, routes } of this.concepts) {
+      for (const route of routes) {
+        if (!holds(route.first) || !holdsAll(route.others, holds)) continue
+        covered += mass * route.strength
+        break
+      }
+    }
     return covered / this.mass
   }
 
   /** Factor of a term's text score: the sum of the routes it completes. */
   weight(term: number, holds: Holds): number {
     let sum = 0
-    for (const { terms, weight } of this.routesOf[term] ?? []) {
-      if (terms.length === 1) sum += weight
-      else if (terms.every(holds)) sum += weight / terms.length
+    for (const { first, others, weight } of this.routesOf[term] ?? []) {
+      if (others.length === 0) sum += weight
+      else if (holds(first) && holdsAll(others, holds)) sum += weight / (1 + others.length)
     }
     return sum
+  }
+
+  private numbered({ terms, weight, strength }: Route): NumberedRoute {
+    const [first = 0, ...others] = terms.map((term) => this.numberOf(term))
+    return { first, others, weight, strength }
   }
 
   private numberOf(term: string): number {
@@ -58,4 +70,9 @@ export class Question {
     this.numbers.set(term, number)
     return number
   }
+}
+
+function holdsAll(terms: readonly number[], holds: Holds): boolean {
+  for (const term of terms) if (!holds(term)) return false
+  return true
 }

@@ -9,7 +9,7 @@ import type { SearchDocument } from './messages'
 export interface ReadPiece { put: SearchDocument[]; remove: number[]; last: boolean }
 
 /** The driver is synchronous: one piece holds the event loop for about this long. */
-const pieceMs = 8
+const pieceMs = 6
 const smallest = 4
 const largest = 200
 
@@ -24,7 +24,7 @@ export async function readTitles(reader: Reader): Promise<SearchTitles> {
 
 /** Reads documents in pieces whose size follows how long the last one took. One reader a walk. */
 export class DocumentReader {
-  private size = 16
+  private size = smallest
 
   constructor(private readonly database: Database, private readonly titles: SearchTitles) {}
 

@@ -28,8 +28,7 @@ const mostPostings = 120_000
 
 /** MiniSearch knows an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
 interface Kept { slot: number; document: SearchDocument; weight: number }
-interface Covering extends Kept { coverage: number }
-interface Scored extends Covering { score: number }
+interface Scored { kept: Kept; coverage: number; score: number }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
@@ -134,21 +133,27 @@ export class SearchIndex {
   private rank(question: Question, filters: SearchFilters, least: number): Scored[] {
     if (question.terms.length === 0) return []
     const held = this.findHeld(question)
-    const covering: Covering[] = []
+    const found: Scored[] = []
     let best = 0
     for (const slot of held.slots) {
       const kept = this.slots[slot]
       if (!kept || kept.weight === 0 || !passes(kept.document, filters)) continue
       const coverage = question.coverage(held.at(slot))
-      best = Math.max(best, coverage)
-      covering.push({ ...kept, coverage })
+      if (coverage > best) best = coverage
+      if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
     }
     if (best < least) return []
-    const found = covering.filter(({ coverage }) => coverage >= best * leastShareOfBest)
-    const cut = found.length <= mostScored ? 0 : ([...found].sort((a, b) => b.coverage - a.coverage)[mostScored - 1]?.coverage ?? 0)
-    const scores = this.score(question, held, new Set(found.filter(({ coverage }) => coverage >= cut).map(({ slot }) => slot)))
-    const lowest = Math.min(...scores.values())
-    return found.map((entry) => ({ ...entry, score: scores.get(entry.slot) ?? lowest * entry.coverage })).sort(byScore)
+    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held)
+  }
+
+  private order(found: Scored[], question: Question, held: HeldTerms): Scored[] {
+    const cut = found.length <= mostScored ? 0 : nthLargest(found.map(({ coverage }) => coverage), mostScored)
+    const chosen = new Uint8Array(this.slots.length)
+    for (const { kept, coverage } of found) if (coverage >= cut) chosen[kept.slot] = 1
+    const scores = this.score(question, held, chosen)
+    const lowest = scores.reduce((least, score) => (score > 0 && score < least ? score : least), Infinity)
+    for (const entry of found) entry.score = scores[entry.kept.slot] || lowest * entry.coverage
+    return found.sort(byScore)
   }
 
   /** First pass: who holds what. Every posting is refused a score, so MiniSearch makes no result of it. */
@@ -162,24 +167,39 @@ export class SearchIndex {
   }
 
   /** Second pass: BM25 of the chosen slots, without MiniSearch's coordination factor, × the weight of their evidence. */
-  private score(question: Question, held: HeldTerms, chosen: ReadonlySet<number>): Map<number, number> {
-    const results = this.searchTerms(question, (slot, term) => (chosen.has(slot) ? question.weight(term, held.at(slot)) : 0))
-    return new Map(results.map(({ id, score, queryTerms }) => {
+  private score(question: Question, held: HeldTerms, chosen: Uint8Array): Float64Array {
+    const scores = new Float64Array(this.slots.length)
+    for (const { id, score, queryTerms } of this.searchTerms(question, (slot, term) => (chosen[slot] === 1 ? question.weight(term, held.at(slot)) : 0))) {
       const slot = Number(id)
-      return [slot, (score / Math.max(1, queryTerms.length)) * (this.slots[slot]?.weight ?? 0)]
-    }))
+      scores[slot] = (score / Math.max(1, queryTerms.length)) * (this.slots[slot]?.weight ?? 0)
+    }
+    return scores
   }
 
   private searchTerms(question: Question, weigh: (slot: number, term: number) => number) {
-    return this.mini.search(question.terms.join('\n'), { boostDocument: (id, term) => weigh(Number(id), question.find(term) ?? 0) })
+    let last = ''
+    let number = 0
+    return this.mini.search(question.terms.join('\n'), {
+      boostDocument: (id, term) => {
+        // MiniSearch comes term by term, so the number is looked up once a term and not once a posting.
+        if (term !== last) {
+          last = term
+          number = question.find(term) ?? 0
+        }
+        return weigh(Number(id), number)
+      },
+    })
   }
 
-  private hit({ document, score }: Scored, question: Question): SearchAnswer['hits'][number] {
+  private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
     return { id: document.id, score, ...findPassage(document, question, this.synonyms) }
   }
 }
 
-const byScore = (a: Scored, b: Scored): number => b.score - a.score || b.document.createdAt - a.document.createdAt || a.document.id - b.document.id
+const byScore = (a: Scored, b: Scored): number =>
+  b.score - a.score || b.kept.document.createdAt - a.kept.document.createdAt || a.kept.document.id - b.kept.document.id
+
+const nthLargest = (values: readonly number[], n: number): number => Float64Array.from(values).sort()[Math.max(0, values.length - n)] ?? 0
 
 function passes(document: SearchDocument, filters: SearchFilters): boolean {
   return (filters.kit === undefined || document.kit === filters.kit)

@@ -27,7 +27,7 @@ export default async function DeskPage({ searchParams }: PageProps<'/desk'>) {
         aside={<><span className="block">You are <b className="code">{desk.mark}</b></span>{desk.waiting > 0 ? <span className="block">{desk.waiting} {desk.waiting === 1 ? 'tag' : 'tags'} off the rail, waiting for what you asked</span> : null}</>} />
       <DeskFilter action={paths.desk()} {...choices} section={address.section ?? ''} operation={address.operation ?? ''} />
       <Rail desk={desk} address={address} />
-      {desk.open ? <OpenSheet sheet={desk.open} next={paths.desk({ ...address, open: desk.next ?? 0 })} closed={paths.desk({ ...address, open: 0 })} /> : <NothingOpen desk={desk} address={address} />}
+      {desk.open ? <OpenSheet sheet={desk.open} next={paths.desk({ ...address, open: desk.next ?? 0 })} closed={paths.desk({ ...address, open: 0 })} isHanging={desk.tags.some((t) => t.postId === desk.open?.post.id)} /> : <NothingOpen desk={desk} address={address} />}
     </>
   )
 }
@@ -36,13 +36,13 @@ export default async function DeskPage({ searchParams }: PageProps<'/desk'>) {
 function Rail({ desk, address }: { desk: Desk; address: DeskAddress }) {
   if (desk.tags.length === 0) return null
   return (
-    <div>
+    <>
+      {desk.more > 0 ? <p className="text-small text-ink-soft">The first {desk.tags.length} hang here; {desk.more}{desk.isCut ? ' or more' : ''} more behind them.</p> : null}
       <TagRail label="Rail of tags" tags={desk.tags.map((tag) => ({
         label: tagLabel(tag), title: tag.title, note: tagNote(tag), code: tag.section, href: paths.desk({ ...address, open: tag.postId }),
         inQuestion: tag.reason === 'in-question', current: desk.open?.post.id === tag.postId,
       }))} />
-      {desk.more > 0 ? <p className="mt-3 text-small text-ink-soft">{desk.more}{desk.isCut ? ' or more' : ''} more hang behind these.</p> : null}
-    </div>
+    </>
   )
 }
 

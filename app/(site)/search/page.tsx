@@ -3,7 +3,6 @@ import type { Metadata, Route } from 'next'
 import Link from 'next/link'
 import { HitList, HitPlate } from '@/components/entries/hit-list'
 import { RivetLine } from '@/components/layout/rivet-line'
-import { PlansWin } from '@/components/layout/plans-win'
 import { SearchFilters } from '@/components/search/search-filters'
 import { EmptyState } from '@/components/ui/empty-state'
 import { LinkButton } from '@/components/ui/link-button'
@@ -63,7 +62,6 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
             </section>
           ))}
           <Pager address={address} offset={offset} total={total} />
-          <PlansWin />
           <p className="text-small">Not it? <Link href={ask}>Ask this</Link>: your words are filled in.</p>
         </>
       )}

@@ -1,7 +1,7 @@
 // From a text to the terms that are indexed and searched: the same for entries and for questions, or nothing would be found.
 // Stems are Porter's (the stemmer package); numbers and designations are designations.ts.
 import { stemmer } from 'stemmer'
-import { findSpacedDesignations, isUnit, spellChunk, type Spelling } from './designations'
+import { findSpacedDesignations, isUnit, spellChunk } from './designations'
 import { isStopWord } from './stop-words'
 
 export interface Token {
@@ -44,17 +44,33 @@ export function analyseText(text: string): Analysis {
   return joinSteps(analysis)
 }
 
-/** Stem of a normalised word, remembered: a corpus repeats its words, and stemming is most of the work of indexing. */
+/** Stem of a normalised word. */
 export function stemOf(word: string): string {
-  const known = stems.get(word)
-  if (known !== undefined) return known
-  if (stems.size >= 50_000) stems.clear()
-  const stem = stemmer(word)
-  stems.set(word, stem)
-  return stem
+  return readingOf(word).term
 }
 
-const stems = new Map<string, string>()
+interface Reading { stopped: boolean; term: string; word: string; kind: 'word' | 'unit' }
+
+/** Words as written and what was made of them: a corpus repeats its words, and reading them is most of the work of indexing. */
+const readings = new Map<string, Reading>()
+const mostReadings = 100_000
+
+function readingOf(raw: string): Reading {
+  const known = readings.get(raw)
+  if (known) return known
+  if (readings.size >= mostReadings) readings.clear()
+  const reading = readAnew(raw)
+  readings.set(raw, reading)
+  return reading
+}
+
+function readAnew(raw: string): Reading {
+  const written = normaliseWord(raw.replace(/^[#.]+/, ''))
+  const word = written.replace(/'s$/, '').replaceAll("'", '')
+  if (word === '' || word.length > longestTerm) return { stopped: false, term: '', word: '', kind: 'word' }
+  const unit = isUnit(word)
+  return { stopped: isStopWord(written), term: unit ? word : stemmer(word), word, kind: unit ? 'unit' : 'word' }
+}
 
 /** Lower case, compatibility forms and accents removed: ﬂ, é and É become fl, e, e. */
 export function normaliseWord(raw: string): string {
@@ -80,32 +96,32 @@ function readNumber(raw: string, start: number, analysis: Analysis): void {
 function readCompound(raw: string, start: number, analysis: Analysis): void {
   const parts = [...raw.matchAll(/[^.,/·–-]+/gu)].map((m) => ({ raw: m[0], start: start + m.index }))
   const hyphened = /^[^.,/]+$/.test(raw) && parts.length <= 3
-  const joined = normaliseWord(parts.map((part) => part.raw).join('')).replaceAll("'", '')
+  const joined = parts.map((part) => part.raw).join('')
   if (hyphened && parts.some((part) => part.raw.length === 1)) {
-    const long = parts.map((part) => normaliseWord(part.raw)).filter((word) => word.length > 2 && !isStopWord(word)).map(stemOf)
-    push(analysis, joined, { also: long }, start, start + raw.length)
+    const long = parts.map((part) => readingOf(part.raw)).filter(({ word, stopped }) => word.length > 2 && !stopped).map(({ term }) => term)
+    push(analysis, joined, long, start, start + raw.length)
     return
   }
   for (const part of parts) readWord(part.raw, part.start, analysis)
   const last = analysis.tokens.at(-1)
-  if (hyphened && parts.length > 1 && last && last.start >= start && joined.length <= longestTerm) {
-    analysis.tokens[analysis.tokens.length - 1] = { ...last, also: [...last.also, isUnit(joined) ? joined : stemOf(joined)] }
+  const { term } = readingOf(joined.slice(0, longestTerm + 1))
+  if (hyphened && parts.length > 1 && last && last.start >= start && term !== '') {
+    analysis.tokens[analysis.tokens.length - 1] = { ...last, also: [...last.also, term] }
   }
 }
 
 function readWord(raw: string, start: number, analysis: Analysis): void {
-  const word = normaliseWord(raw.replace(/^[#.]+/, ''))
-  if (isStopWord(word)) {
-    analysis.stopped.push(raw)
-    return
-  }
-  push(analysis, word.replace(/'s$/, '').replaceAll("'", ''), { also: [] }, start, start + raw.length)
+  // Longer than any word could be, accents and all: not worth remembering.
+  if (raw.length > 4 * longestTerm) return
+  if (readingOf(raw).stopped) analysis.stopped.push(raw)
+  else push(analysis, raw, nothing, start, start + raw.length)
 }
 
-function push(analysis: Analysis, word: string, { also }: Pick<Spelling, 'also'>, start: number, end: number): void {
-  if (word === '' || word.length > longestTerm) return
-  const unit = isUnit(word)
-  analysis.tokens.push({ term: unit ? word : stemOf(word), also, kind: unit ? 'unit' : 'word', word, start, end })
+const nothing: readonly string[] = []
+
+function push(analysis: Analysis, raw: string, also: readonly string[], start: number, end: number): void {
+  const { term, word, kind } = readingOf(raw)
+  if (term !== '') analysis.tokens.push({ term, also, kind, word, start, end })
 }
 
 /** "step 6" is also one term, so that a plans reference finds its step and not every six. */

@@ -11,8 +11,8 @@ import type { ImportResult } from '@/lib/schemas/import'
 import { asLawBroken } from './as-law-broken'
 import { readNameBook } from './name-book'
 import { parseLine } from './parse-line'
-import { prepareEntry, type PreparedEntry } from './prepare-entry'
-import { readLines } from './read-lines'
+import { entryPreparer, type PreparedEntry } from './prepare-entry'
+import { readLines, type ReadLine } from './read-lines'
 import { writeEntry, type Done } from './write-entry'
 
 export type ImportContext = Pick<AppContext, 'database' | 'reader' | 'actor' | 'now' | 'renderer'>
@@ -32,31 +32,37 @@ export async function importFile(context: AppContext, bytes: Uint8Array): Promis
 export async function importLines(context: ImportContext, bytes: Uint8Array): Promise<ImportResult> {
   if (!can(context.actor, 'import')) throw refuse.forbidden(whyNot.import)
   const names = await readNameBook(context.reader)
+  const prepare = entryPreparer(context)
   const result: ImportResult = { imported: 0, updated: 0, unchanged: 0, failed: [] }
-  const fail = (line: number, message: string) => result.failed.push({ line, message })
-  let batch: PreparedEntry[] = []
-  for (const read of readLines(bytes)) {
+  for (const lines of batches(readLines(bytes))) {
     if (result.failed.length >= mostFailures) {
-      fail(read.line, 'Too many lines failed; this one and those after it were not read.')
+      result.failed.push({ line: lines[0]?.line ?? 0, message: 'Too many lines failed; this one and those after it were not read.' })
       break
     }
-    if ('fault' in read) {
-      fail(read.line, read.fault)
-      continue
-    }
-    try {
-      batch.push(await prepareEntry(context, read.line, parseLine(names, read.value, context.now)))
-    } catch (error) {
-      fail(read.line, wordsOf(error))
-    }
-    if (batch.length >= linesABatch) {
-      await writeBatch(context, batch, result)
-      batch = []
-    }
+    const prepared = await Promise.all(lines.map(async (read) => {
+      try {
+        if ('fault' in read) throw new AppError('invalid', read.fault)
+        return [await prepare(read.line, parseLine(names, read.value, context.now))]
+      } catch (error) {
+        result.failed.push({ line: read.line, message: wordsOf(error) })
+        return []
+      }
+    }))
+    await writeBatch(context, prepared.flat(), result)
   }
-  await writeBatch(context, batch, result)
   result.failed.sort((a, b) => a.line - b.line)
   return result
+}
+
+function* batches(lines: Iterable<ReadLine>): Generator<ReadLine[]> {
+  let batch: ReadLine[] = []
+  for (const line of lines) {
+    batch.push(line)
+    if (batch.length < linesABatch) continue
+    yield batch
+    batch = []
+  }
+  if (batch.length > 0) yield batch
 }
 
 /** One transaction for all; when one line breaks it, each line has its own. */

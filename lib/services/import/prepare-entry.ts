@@ -9,6 +9,7 @@ import { cleanParts } from '@/lib/services/entries/create-entry'
 import { contentHash } from '@/lib/services/posts/content-hash'
 import { placeEntry, type Placement } from '@/lib/services/posts/place-entry'
 import { renderText, type Rendered } from '@/lib/services/posts/render-text'
+import type { NewEntry } from '@/lib/schemas/entry-input'
 import type { ImportAnswer } from '@/lib/schemas/import'
 import type { ImportedEntry } from './parse-line'
 
@@ -22,19 +23,35 @@ export interface PreparedEntry extends PreparedText<ReturnType<typeof judgedOf>>
   answers: PreparedAnswer[]
 }
 
-/** Refuses a text that cannot be rendered safely, naming the part. */
-export async function prepareEntry({ reader, renderer }: { reader: Reader; renderer: Renderer }, line: number, input: ImportedEntry): Promise<PreparedEntry> {
-  const place = await placeEntry(reader, input.entry)
-  const kept = new Set(input.ref === null ? [] : await getImportedHashes(reader, input.ref))
-  const text = async <J>(judged: J, hash: string, fields: { name: string; text: string }[]): Promise<PreparedText<J>> =>
-    ({ judged, hash, rendered: kept.has(hash) ? null : await renderText(renderer, fields) })
-  const judged = judgedOf(input, place)
-  const answers: PreparedAnswer[] = []
-  for (const answer of input.answers) {
-    const revision = answerRevision(answer.body, null)
-    answers.push({ input: answer, ...(await text(revision, contentHash(revision), [{ name: 'body', text: answer.body }])) })
+type Placements = Map<string, Placement>
+
+/** Prepares the entries of one import: thousands of lines name the same few places, so each is looked up once. */
+export function entryPreparer({ reader, renderer }: { reader: Reader; renderer: Renderer }) {
+  const placements: Placements = new Map()
+  /** Refuses a text that cannot be rendered safely, naming the part. */
+  return async (line: number, input: ImportedEntry): Promise<PreparedEntry> => {
+    const place = await placeOnce(placements, reader, input.entry)
+    const kept = new Set(input.ref === null ? [] : await getImportedHashes(reader, input.ref))
+    const text = async <J>(judged: J, hash: string, fields: { name: string; text: string }[]): Promise<PreparedText<J>> =>
+      ({ judged, hash, rendered: kept.has(hash) ? null : await renderText(renderer, fields) })
+    const judged = judgedOf(input, place)
+    const [own, ...answers] = await Promise.all([
+      text(judged, contentHash(judged), textFields(input.entry.kind, judged.parts, judged.body)),
+      ...input.answers.map(async (answer): Promise<PreparedAnswer> => {
+        const revision = answerRevision(answer.body, null)
+        return { input: answer, ...(await text(revision, contentHash(revision), [{ name: 'body', text: answer.body }])) }
+      }),
+    ])
+    return { line, input, place, answers, ...own }
   }
-  return { line, input, place, answers, ...(await text(judged, contentHash(judged), textFields(input.entry.kind, judged.parts, judged.body))) }
+}
+
+async function placeOnce(placements: Placements, reader: Reader, { kit, sections, tasks, operations, orderAdvice }: NewEntry): Promise<Placement> {
+  const names = { kit, sections, tasks, operations, orderAdvice }
+  const key = JSON.stringify(names)
+  const place = placements.get(key) ?? (await placeEntry(reader, names))
+  placements.set(key, place)
+  return place
 }
 
 function judgedOf({ entry }: ImportedEntry, place: Placement) {

@@ -2,7 +2,7 @@
 import 'server-only'
 import { and, eq, isNull } from 'drizzle-orm'
 import type { Transaction } from '@/db/client'
-import { insertPost, insertRevision, saveRendering, setJudgement, type Projections } from '@/db/mutations/posts'
+import { insertPost, insertRevision, saveRendering, type Projections } from '@/db/mutations/posts'
 import { renderingKey } from '@/db/queries/cautioned-post'
 import { stamp, type revision } from '@/db/schema'
 import { judgeStamps } from '@/lib/domain/stamps/stamp-state'
@@ -29,18 +29,18 @@ export interface ImportedText {
 }
 export interface Known { id: number; number: number; contentHash: string }
 
-/** A post that was not there. Its judgement follows from what was just written, without reading it back. */
+/** A post that was not there. Its judgement follows from what is about to be written, without reading it back. */
 export async function insertImported(tx: Transaction, text: ImportedText, now: number): Promise<{ id: number; number: number }> {
-  const id = await insertPost(tx, { kind: text.kind, parentId: text.parentId, ref: text.ref, authorName: text.author ?? unknownAuthor, createdAt: text.createdAt })
-  await addRevision(tx, id, 1, text, text.createdAt)
-  await attachCautions(tx, id, text.required, 'rule', now)
-  if (text.stamped) await addImportedStamp(tx, id, 1, text.questionRevision, now)
   const needsTwo = text.required.some((c) => c.twoStamps)
   const imported = { revision: 1, questionRevision: text.questionRevision, mentorId: null, basis: 'imported' as const, scope: null, createdAt: now, withdrawnAt: null }
-  const { state } = judgeStamps({
+  const { state: stampState } = judgeStamps({
     currentRevision: 1, questionRevision: text.questionRevision, needsTwo, postState: 'visible', authorIds: [], stamps: text.stamped ? [imported] : [], failuresAt: [],
   })
-  if (needsTwo || state !== 'none') await setJudgement(tx, id, { stampState: state, needsTwo })
+  const { kind, parentId, ref, createdAt } = text
+  const id = await insertPost(tx, { kind, parentId, ref, authorName: text.author ?? unknownAuthor, stampState, needsTwo, createdAt })
+  await addRevision(tx, id, 1, text, createdAt)
+  await attachCautions(tx, id, text.required, 'rule', now)
+  if (text.stamped) await addImportedStamp(tx, id, 1, text.questionRevision, now)
   return { id, number: 1 }
 }
 

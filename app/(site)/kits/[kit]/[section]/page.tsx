@@ -2,7 +2,6 @@
 import type { Metadata } from 'next'
 import { HitList, HitPlate } from '@/components/entries/hit-list'
 import { PageTitle } from '@/components/layout/page-title'
-import { PlansWin } from '@/components/layout/plans-win'
 import { EmptyState } from '@/components/ui/empty-state'
 import { LinkButton } from '@/components/ui/link-button'
 import { pageContext } from '@/lib/auth/guards'
@@ -31,7 +30,6 @@ export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[se
           {page.total > page.hits.length ? <p><LinkButton href={paths.search(here)}>All {page.total}</LinkButton></p> : null}
         </>
       )}
-      <PlansWin maker={page.kit.maker} />
     </>
   )
 }
