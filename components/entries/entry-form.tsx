@@ -71,8 +71,14 @@ export function EntryForm({ action, kind, places, initial, editing, submission, 
           </>
         ) : null}
       </div>
-      {writing === null ? <Acknowledge cautions={state.cautions ?? []} acknowledged={many(state.values, 'acknowledged')} />
-        : <WritingAid text={writingText(now, text)} shown={text} wantsSimilar={!editing} acknowledged={many(state.values, 'acknowledged')} standing={state.cautions ?? []} />}
+      <div className="entry-aid">
+        {writing === null ? (
+          <>
+            <p className="aid-hint">While you write: posts that may already answer it, a preview, and the cautions that will stand on it. Drafts stay on this device.</p>
+            <Acknowledge cautions={state.cautions ?? []} acknowledged={many(state.values, 'acknowledged')} />
+          </>
+        ) : <WritingAid text={writingText(now, text)} shown={text} wantsSimilar={!editing} acknowledged={many(state.values, 'acknowledged')} standing={state.cautions ?? []} />}
+      </div>
       <div className="button-row"><Button type="submit" look="primary" disabled={isPending}>{isPending ? 'Posting' : editing ? 'Post the new revision' : kind === 'question' ? 'Post the question' : 'Post the lesson'}</Button></div>
     </form>
   )

@@ -88,7 +88,7 @@ export function StampForm({ action, postId, revision, missing, submission, plans
   const prefix = `stamp-${postId}`
   const errors = state.errors.length > 0 ? state.errors.map((e) => ({ id: `${prefix}-${e.path}`, message: e.message })) : state.message ? [{ message: state.message }] : []
   return (
-    <form ref={form} action={submit} className="grid gap-4">
+    <form ref={form} action={submit} noValidate className="grid gap-4">
       <ErrorSummary errors={errors} />
       <input type="hidden" name="postId" value={postId} />
       <input type="hidden" name="revision" value={revision} />

@@ -40,8 +40,9 @@ export function FieldsForm({ action, id, fields, button, look = 'plain', hidden 
   const { state, submit, isPending, form, errorOf, valueOf } = useForm(action)
   const idOf = (path: string) => (fields.some((f) => f.name === path) ? { id: `${id}-${path}` } : {})
   const errors = state.errors.length > 0 ? state.errors.map((e) => ({ ...idOf(e.path), message: e.message })) : state.message ? [{ message: state.message }] : []
+  // No browser bubbles: the server's words stand beside the field, in one voice and one language.
   return (
-    <form ref={form} action={submit} className="grid max-w-2xl content-start gap-4">
+    <form ref={form} action={submit} noValidate className="grid max-w-2xl content-start gap-4">
       <ErrorSummary errors={errors} />
       {state.done ? <NoticeLine boxed live>{state.done}</NoticeLine> : null}
       {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" name={name} value={value} />)}

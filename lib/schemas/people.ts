@@ -16,7 +16,8 @@ const presentPassword = z.string().min(1, 'Write your password.').max(1000, 'Thi
 export function sitePath(value: string): Route | null {
   if (!/^\/(?![/\\])[^\u0000-\u001f\u007f\\]{0,2000}$/.test(value)) return null
   const address = new URL(value, 'http://this.site')
-  if (address.origin !== 'http://this.site' || /^\/(sign-in|sign-up|api)(\/|$)/.test(address.pathname)) return null
+  // Resolving dots can bring a second slash to the front: '/..//host' is somebody else's host.
+  if (address.origin !== 'http://this.site' || address.pathname.startsWith('//') || /^\/(sign-in|sign-up|api)(\/|$)/.test(address.pathname)) return null
   return `${address.pathname}${address.search}${address.hash}` as Route
 }
 const returnPath = z.string().default('').transform(sitePath)

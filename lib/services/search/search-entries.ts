@@ -9,7 +9,7 @@ import { presentHits } from './present-hits'
 export async function searchEntries(context: AppContext, query: SearchQuery): Promise<SearchResult> {
   const startedAt = performance.now()
   const text = query.q.trim()
-  const filters = { kit: query.kit, section: query.section, operation: query.operation, kind: query.kind, stamped: query.stamped === '1' }
+  const filters = { kit: query.kit, section: query.section, operation: query.operation, kind: query.kind, ...(query.stamped === '1' ? { stamped: true } : {}) }
   const answer = text === ''
     ? { hits: (await listEntryIds(context.reader, filters, { limit: query.limit, offset: query.offset })).map((id) => ({ id, postId: id, score: 0, terms: [] })), total: await countEntries(context.reader, filters), ignored: [], didYouMean: null }
     : await context.search.search({ text, filters, limit: query.limit, offset: query.offset })

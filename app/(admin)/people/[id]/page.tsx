@@ -30,11 +30,13 @@ export async function generateMetadata({ params }: PageProps<'/people/[id]'>): P
 
 export default async function PersonPage({ params }: PageProps<'/people/[id]'>) {
   const { context, person } = await load(params)
+  // That an account is closed explains the name; a suspension is between the member and those who look after the group.
+  const state = person.state === 'closed' || mayCare(context, person) ? stateWords[person.state] : ''
   return (
     <>
       <PageTitle title={person.name} {...(person.bio ? { lead: person.bio } : {})} />
       <TitleBlock alone cells={[
-        { label: 'Role', value: [roleWords[person.role], stateWords[person.state]].filter(Boolean).join(', ') },
+        { label: 'Role', value: [roleWords[person.role], state].filter(Boolean).join(', ') },
         ...(person.mentor ? [{ label: 'Stamps as', value: <b className="code">{person.mentor.mark}</b> }, { label: 'Fields', value: person.mentor.fields, width: 'long' as const }, { label: 'Mentor since', value: formatDate(person.mentor.since) }] : []),
         { label: 'Here since', value: formatDate(person.createdAt) },
       ]} />
@@ -59,9 +61,11 @@ function Written({ line }: { line: WrittenLine }) {
   )
 }
 
+const mayCare = (context: AppContext, person: PersonSheet) => can(context.actor, 'people.set-state', { memberId: person.id, role: person.role })
+
 /** Moderators suspend builders from here; stewards do everything else on their own page. */
 function Care({ context, person }: { context: AppContext; person: PersonSheet }) {
-  if (person.state === 'closed' || !can(context.actor, 'people.set-state', { memberId: person.id, role: person.role })) return null
+  if (person.state === 'closed' || !mayCare(context, person)) return null
   const cared = { id: person.id, name: person.name, role: person.role, state: person.state, mark: person.mentor?.mark ?? null }
   return (
     <Sheet as="section" labelledBy="care">

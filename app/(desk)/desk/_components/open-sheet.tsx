@@ -46,7 +46,7 @@ export function OpenSheet({ sheet, next, closed, isHanging }: OpenSheetProps) {
         </div>
         <SheetPlate sheet={sheet} />
         {row === null ? <Advice post={post} /> : (
-          <div className="grid lg:grid-cols-[minmax(0,22rem)_minmax(0,1fr)]">
+          <div className="grid lg:grid-cols-[minmax(0,3fr)_minmax(0,5fr)]">
             <Found entry={entry} />
             <Advice post={post} />
           </div>

@@ -78,19 +78,19 @@ export function PostActs({ post, rights, allCautions }: { post: Shown; rights: P
   const isOneSerial = 'makerReply' in post && post.makerReply === 'one-serial'
   const older = post.revisions.at(-2)
   return (
-    <div className="sheet-foot no-print">
-      <div className="button-row">
+    <>
+      <div className="sheet-foot post-acts no-print">
         {isOneSerial ? <LinkButton href={paths.ask()} look="primary">Ask for your own</LinkButton> : null}
         {rights.goBy ? <RelianceForm action={relianceAction} postId={post.id} revision={post.revision} goesBy={rights.goesBy} /> : null}
         {rights.edit ? <LinkButton href={post.kind === 'answer' ? paths.editAnswer(post.id) : paths.editEntry(post.id)}>Edit</LinkButton> : null}
         {older ? <LinkButton href={paths.revisions(post.id, older.revision, post.revision)} look="quiet">Read Rev {older.revision}</LinkButton> : null}
+        {rights.tell ? <Disclosure summary={rights.told ? 'Change how it went' : 'Tell how it went'}><OutcomeForm action={outcomeAction} postId={post.id} revision={post.revision} critical={post.needsTwo} told={rights.told} /></Disclosure> : null}
+        {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} submission={randomUUID()} /></Disclosure> : null}
+        {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
+        {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       </div>
-      {rights.tell ? <Disclosure summary={rights.told ? 'Change how it went' : 'Tell how it went'}><OutcomeForm action={outcomeAction} postId={post.id} revision={post.revision} critical={post.needsTwo} told={rights.told} /></Disclosure> : null}
-      {rights.stamp && rights.ownStampId === null ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} submission={randomUUID()} /></Disclosure> : null}
-      {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
-      {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       <Remarks post={post} mayRemark={rights.remark} />
-    </div>
+    </>
   )
 }
 

@@ -12,17 +12,19 @@ export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: 
   const known = new Set(post.cautions.map((c) => c.code))
   if (post.remarks.length === 0 && !mayRemark) return null
   return (
-    <Disclosure summary={post.remarks.length > 0 ? `Remarks (${post.remarks.length})` : 'Remark'} look="quiet" open={post.remarks.length > 0 && post.remarks.length <= 3}>
-      <ul className="remarks">
-        {post.remarks.map((r) => (
-          <li key={r.id}>
-            <p className="label">{r.author.name} · {formatDate(r.createdAt)}</p>
-            <CautionLine cautions={r.cautions.filter((c) => !known.has(c.code))} />
-            <Prose html={r.html} small />
-          </li>
-        ))}
-      </ul>
-      {mayRemark ? <RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} /> : null}
-    </Disclosure>
+    <section className="remarks-part" aria-label="Remarks">
+      {post.remarks.length > 0 ? (
+        <ul className="remarks">
+          {post.remarks.map((r) => (
+            <li key={r.id}>
+              <p className="label">{r.author.name} · {formatDate(r.createdAt)}</p>
+              <CautionLine cautions={r.cautions.filter((c) => !known.has(c.code))} />
+              <Prose html={r.html} small />
+            </li>
+          ))}
+        </ul>
+      ) : null}
+      {mayRemark ? <Disclosure summary="Remark" look="quiet"><RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} /></Disclosure> : null}
+    </section>
   )
 }
