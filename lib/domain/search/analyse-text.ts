@@ -74,7 +74,7 @@ function readAnew(raw: string): Reading {
 
 /** Lower case, compatibility forms and accents removed: ﬂ, é and É become fl, e, e. */
 export function normaliseWord(raw: string): string {
-  const plain = /^[\x20-\x7e]*$/.test(raw) ? raw : raw.normalize('NFKD').replace(/\p{M}+/gu, '').replaceAll('⁄', '/').replaceAll('’', "'")
+  const plain = /^[\x20-\x7e]*$/.test(raw) ? raw : raw.normalize('NFKD').replace(/[\p{M}\s]+/gu, '').replaceAll('⁄', '/').replaceAll('’', "'")
   return plain.toLowerCase()
 }
 

@@ -10,7 +10,7 @@ describe('what is found', () => {
     aDocument({ id: 1, title: 'Hole sizes for grommets', labels: 'W-3 Wing ribs to spar\nfirewall grommet\nW3-2 step 6' }, 'A 3/8 grommet wants a hole of 0.562 in the web.'),
     aDocument({ id: 2, title: 'Nutplate rivets too long', labels: 'AN470AD4-6' }, 'The shop head touched the screw.'),
     aDocument({ id: 3, title: 'Deburr before fluting' }, 'Deburring the flange first keeps the flutes from cracking.'),
-    aDocument({ id: 4, title: 'Ribs hot from the sun' }, 'Wear hearing protection when riveting inside.'),
+    aDocument({ id: 4, title: 'Noise in the tailcone' }, 'Wear hearing protection when riveting inside.'),
     ...filler,
   )
 
@@ -27,7 +27,7 @@ describe('what is found', () => {
   test('a prefix needs three letters, and only the last word may be one', () => {
     expect(idsFor(index, 'gr')).toEqual([])
     expect(idsFor(index, 'gro ')).toEqual([])
-    expect(idsFor(index, 'gromm overspray')).not.toContain(1)
+    expect(idsFor(index, 'grom overspray')).not.toContain(1)
   })
 
   test('says which spelling was looked up', () => {
