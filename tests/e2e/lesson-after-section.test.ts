@@ -52,7 +52,7 @@ describe.each(widths)('at %i px', (width) => {
     await page.getByLabel('What happened').fill('The labels fell off.')
     await expect.poll(() => page.evaluate(() => Object.values(localStorage).some((kept) => String(kept).includes('The labels fell off.')))).toBe(true)
     await page.reload()
-    await page.getByText(/Your draft from .* is back/).waitFor()
+    await page.getByText(/Your draft of .* is back/).waitFor()
     expect(await page.getByLabel('The lesson in one line').inputValue()).toBe('A draft about labels')
     expect(await page.getByLabel('What happened').inputValue()).toBe('The labels fell off.')
     expect(await page.getByLabel('Kit and section').inputValue()).toBe('whimbrel-2/X-1')
