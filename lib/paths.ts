@@ -27,9 +27,9 @@ export const paths = {
   feed: '/feed.atom' as Route,
   desk: (address: { open?: number; operation?: string; section?: string } = {}) => `/desk${query(address)}` as Route,
   signIn: (from?: string) => `/sign-in${query({ from })}` as Route,
-  signUp: '/sign-up' as Route,
+  signUp: (from?: string) => `/sign-up${query({ from })}` as Route,
   account: '/account' as Route,
-  people: '/people' as Route,
+  people: (open?: number) => `/people${query({ open })}` as Route,
   person: (id: number) => `/people/${id}` as Route,
   guide: (slug: string) => `/guide/${slug}` as Route,
 }

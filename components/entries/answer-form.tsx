@@ -12,7 +12,7 @@ import type { Answer } from '@/lib/schemas/post'
 import { Acknowledge } from './acknowledge'
 import { ConflictNotice } from './conflict-notice'
 import { DraftNotice } from './draft-notice'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 const WritingAid = dynamic(() => import('./writing-aid'), { ssr: false })
 

@@ -15,7 +15,7 @@ import { Acknowledge } from './acknowledge'
 import { ConflictNotice } from './conflict-notice'
 import { DraftNotice } from './draft-notice'
 import { HardwareFields, OrderAdviceFields, PlaceFields, PlansFields, TaskFields, type FormPlaces } from './place-fields'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 const WritingAid = dynamic(() => import('./writing-aid'), { ssr: false })
 

@@ -3,7 +3,7 @@
 import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { TextArea } from '@/components/ui/text-area'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 export function RemarkForm({ action, postId, submission }: { action: FormAction; postId: number; submission: string }) {
   const { state, submit, isPending, form, errorOf, valueOf } = useForm(action)

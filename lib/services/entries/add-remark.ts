@@ -11,6 +11,7 @@ import { whyNot } from '@/lib/policy/why-not'
 import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 import { renderText } from '@/lib/services/posts/render-text'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Publishes and returns the remark's id and the entry it stands on. */
 export async function addRemark(context: AppContext, postId: number, input: { body: string }): Promise<{ id: number; entryId: number }> {
@@ -28,6 +29,6 @@ export async function addRemark(context: AppContext, postId: number, input: { bo
     record('remark.publish', `remark:${row.id}`, `post:${postId}`)
     return { id: row.id, entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return made
 }

@@ -16,6 +16,7 @@ import { judgePost } from '@/lib/services/posts/judge-post'
 import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
 import { renderText } from '@/lib/services/posts/render-text'
 import { answerRevision } from './create-answer'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the question's id and the new letter. 409 with the present answer when it was changed meanwhile. */
 export async function editAnswer(context: AppContext, id: number, input: AnswerEdit): Promise<{ questionId: number; revision: string }> {
@@ -49,6 +50,6 @@ export async function editAnswer(context: AppContext, id: number, input: AnswerE
     const question = await loadEntry(context, questionId)
     throw new AppError('conflict', 'This answer was changed meanwhile. Both versions are below; nothing is lost.', { current: question.answers.find((a) => a.id === id) })
   }
-  await context.search.catchUp()
+  await afterWrite(context)
   return { questionId, revision: letter }
 }

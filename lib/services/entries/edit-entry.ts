@@ -19,6 +19,7 @@ import { rejudgeAnswers } from '@/lib/services/posts/rejudge-answers'
 import { renderText } from '@/lib/services/posts/render-text'
 import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { cleanParts } from './create-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /**
  * Publishes the next revision; returns its letter. 409 with the present version when somebody else was faster;
@@ -59,7 +60,7 @@ export async function editEntry(context: AppContext, id: number, input: EntryEdi
     return revisionLetter(number)
   })
   if (letter === null) throw await stale()
-  await context.search.catchUp()
+  await afterWrite(context)
   return letter
 }
 

@@ -14,6 +14,7 @@ import { parseLine } from './parse-line'
 import { entryPreparer, type PreparedEntry } from './prepare-entry'
 import { readLines, type ReadLine } from './read-lines'
 import { writeEntry, type Done } from './write-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 export type ImportContext = Pick<AppContext, 'database' | 'reader' | 'actor' | 'now' | 'renderer'>
 
@@ -24,7 +25,7 @@ const mostFailures = 1000
 /** The import of the API: what was written can be found when it answers. */
 export async function importFile(context: AppContext, bytes: Uint8Array): Promise<ImportResult> {
   const result = await importLines(context, bytes)
-  await context.search.catchUp()
+  await afterWrite(context)
   return result
 }
 

@@ -11,6 +11,7 @@ import { whyNot } from '@/lib/policy/why-not'
 import type { OutcomeInput } from '@/lib/schemas/acts'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Replaces what this member told before. Returns the entry it belongs to. */
 export async function tellHowItWent(context: AppContext, postId: number, input: OutcomeInput): Promise<{ entryId: number }> {
@@ -26,6 +27,6 @@ export async function tellHowItWent(context: AppContext, postId: number, input: 
     record('outcome.tell', `post:${postId}`, `${revisionLetter(told.revision)} ${input.result}`)
     return { entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }

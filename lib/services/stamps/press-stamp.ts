@@ -13,6 +13,7 @@ import { whyNot } from '@/lib/policy/why-not'
 import type { NewStamp } from '@/lib/schemas/acts'
 import { judge, judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /**
  * Returns the stamp's id. 403 own words, no mentor, or a reply for one serial; 409 when `revision` is not the current one,
@@ -44,6 +45,6 @@ export async function pressStamp(context: AppContext, postId: number, input: New
     record('stamp.press', `stamp:${row.id}`, `post:${postId} ${input.revision}`)
     return { id: row.id, entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return made
 }

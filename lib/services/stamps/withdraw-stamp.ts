@@ -10,6 +10,7 @@ import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the post and entry it stood on. 409 when it was withdrawn before. */
 export async function withdrawStamp(context: AppContext, stampId: number, input: { reason: string }): Promise<{ postId: number; entryId: number }> {
@@ -26,6 +27,6 @@ export async function withdrawStamp(context: AppContext, stampId: number, input:
     record('stamp.withdraw', `stamp:${stampId}`, `post:${row.postId}`)
     return { postId: row.postId, entryId: found.parentId ?? row.postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }

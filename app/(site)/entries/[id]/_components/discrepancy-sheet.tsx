@@ -27,7 +27,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
           {own ? <PostStateNotice post={entry} rights={own} /> : null}
           <div className="sheet-cautions"><CautionLine cautions={entry.cautions.filter((c) => !c.waived)} wide /><WaivedCautions post={entry} /></div>
           <SheetParts parts={parts.map((p) => ({ label: p.label || 'Found', content: p.name === 'plansSay' ? <><PlansLines page={page} /><Prose html={p.html} small /></> : <Prose html={p.html} small /> }))} />
-          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} /> : null}
+          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} /> : null}
         </Sheet>
       </div>
       <div className="discrepancy-do">
@@ -35,7 +35,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
         {count === 0 ? <EmptyState title="Nobody has said what to do yet">Until somebody does: stop, measure, read the plans step again, and ask the kit maker.</EmptyState> : null}
         {entry.answers.map((answer, i) => {
           const right = rights.get(answer.id)
-          return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} /> : null
+          return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} plans={entry.plans[0]} /> : null
         })}
         <section id="say" className="no-print" aria-label="Say what to do" tabIndex={-1}>
           {maySay ? <AnswerForm action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />
