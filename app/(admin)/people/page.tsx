@@ -1,4 +1,5 @@
 // Everybody with an account, for stewards: role, state and mentorship at a glance, and one member open to be changed.
+import type { Metadata } from 'next'
 import Link from 'next/link'
 import { Sheet, SheetHead } from '@/components/entries/sheet'
 import { PageTitle } from '@/components/layout/page-title'
