@@ -76,7 +76,7 @@ async function begin<T>(database: Database, work: (tx: Transaction) => Promise<T
   for (let tries = 0; ; tries++) {
     let begun = false
     try {
-      return await database.reader.transaction(async (tx) => {
+      return await database.writer.transaction(async (tx) => {
         begun = true
         return await work(tx)
       }, { behavior: 'immediate' })

@@ -1,5 +1,6 @@
 // The one wrapper in front of every form action: signed-in member, origin, haste, parsing, repeats; and how refusals come back.
 import 'server-only'
+import { refresh } from 'next/cache'
 import { headers } from 'next/headers'
 import { redirect } from 'next/navigation'
 import type { Route } from 'next'
@@ -51,7 +52,11 @@ export async function carryOut<T>({ form, schema, read, run, done, once: route }
     if (!expected) throw error
     return { message: expected.message, code: expected.code, errors: expected.errors.map((e) => ({ ...e, path: e.path.replace(/^input\./, '') })), values: typedValues(form), ...(expected.current !== undefined ? { current: expected.current } : {}), ...(expected.cautions !== undefined ? { cautions: expected.cautions as Caution[] } : {}) }
   }
-  if (next !== null) redirect(next)
+  if (next !== null) {
+    // Going to a row of the page one is on changes the address only: without this the page would stay as it was.
+    refresh()
+    redirect(next)
+  }
   return { message: '', errors: [], values: {}, done: done ?? 'Done.' }
 }
 

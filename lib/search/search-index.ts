@@ -21,6 +21,8 @@ const leastCoverageOfSimilar = 0.25
 const leastShareOfBest = 0.25
 /** Of more entries than this only those that hold most of the question are scored; the rest follow by what they hold. */
 const mostScored = 1_500
+/** A whole title holds so many terms that few entries share the same part of it: fewer are enough to find the nearest. */
+const mostScoredOfSimilar = 300
 /** Postings read for one question; the commonest words are left out beyond it, so that no text takes long. */
 const mostPostings = 120_000
 
@@ -75,7 +77,7 @@ export class SearchIndex {
     const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
     const { affordable, tooCommon } = this.afford(concepts)
     const question = new Question(affordable)
-    const found = this.rank(question, filters, leastCoverage(affordable.length))
+    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored })
     return {
       hits: found.slice(offset, offset + limit).map((scored) => this.hit(scored, question)),
       total: found.length,
@@ -88,7 +90,7 @@ export class SearchIndex {
   similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
     const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
     const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
-    return this.rank(question, filters, leastCoverageOfSimilar).slice(0, limit).map((scored) => this.hit(scored, question))
+    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar }).slice(0, limit).map((scored) => this.hit(scored, question))
   }
 
   suggest(text: string, limit: number): { id: number; title: string }[] {
@@ -122,7 +124,7 @@ export class SearchIndex {
   }
 
   /** Best first, newest of equals first; empty when even the best holds less than `least` of the question. */
-  private rank(question: Question, filters: SearchFilters, least: number): Scored[] {
+  private rank(question: Question, filters: SearchFilters, { least, mostScored: most }: { least: number; mostScored: number }): Scored[] {
     if (question.terms.length === 0) return []
     const held = this.postings.findHeld(question, this.slots.length)
     const found: Scored[] = []
@@ -135,12 +137,12 @@ export class SearchIndex {
       if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
     }
     if (best < least) return []
-    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held)
+    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, most)
   }
 
   /** Score = BM25 × weight of the entry's evidence. */
-  private order(found: Scored[], question: Question, held: HeldTerms): Scored[] {
-    const cut = found.length <= mostScored ? 0 : nthLargest(found.map(({ coverage }) => coverage), mostScored)
+  private order(found: Scored[], question: Question, held: HeldTerms, most: number): Scored[] {
+    const cut = found.length <= most ? 0 : nthLargest(found.map(({ coverage }) => coverage), most)
     const chosen = new Uint8Array(this.slots.length)
     for (const { kept, coverage } of found) if (coverage >= cut) chosen[kept.slot] = 1
     const scores = this.postings.score(question, held, chosen)

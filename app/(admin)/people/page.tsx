@@ -32,7 +32,7 @@ export default async function PeoplePage({ searchParams }: PageProps<'/people'>)
 
 function PeopleTable({ people, openId }: { people: readonly ListedMember[]; openId: number | undefined }) {
   return (
-    <div className="sheet overflow-x-auto" role="group" aria-label="Table of people" tabIndex={0}>
+    <div className="sheet relative overflow-x-auto" role="group" aria-label="Table of people" tabIndex={0}>
       <table className="w-full text-left">
         <caption className="sr-only">Everybody with an account, by name</caption>
         <thead className="bg-inset">

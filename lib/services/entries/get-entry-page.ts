@@ -1,6 +1,6 @@
 // Everything the page of an entry shows: the entry, HTML by part, what this reader may do, their own marks, and other cases.
 import 'server-only'
-import { getCautionedPost, listCautionedPosts } from '@/db/queries/cautioned-post'
+import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { getKit, listTasksBySlug } from '@/db/queries/kits'
 import { listOwnMarks } from '@/db/queries/marks'
 import type { AppContext } from '@/lib/context'
@@ -14,7 +14,7 @@ import { listOpenRequests } from '@/db/queries/desk'
 import type { AskFor } from '@/lib/schemas/acts'
 import type { Answer, Entry } from '@/lib/schemas/post'
 import type { Hit } from '@/lib/schemas/search'
-import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
+import { loadEntryWithPosts, subjectOf } from '@/lib/services/posts/load-entry'
 import { findOtherCases } from '@/lib/services/search/find-similar'
 
 /** What this reader may do with one post, and what they have marked on it. */
@@ -44,14 +44,14 @@ export interface EntryPage {
 
 /** 404 as for the entry itself. Other cases are left out while search loads. */
 export async function getEntryPage(context: AppContext, id: number): Promise<EntryPage> {
-  const entry = await loadEntry(context, id)
+  const { entry, posts } = await loadEntryWithPosts(context, id)
   const ids = [entry.id, ...entry.answers.map((a) => a.id)]
-  const [posts, kit, tasks, otherCases] = await Promise.all([
-    listCautionedPosts(context.reader, ids), getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), otherCasesOf(context, entry),
+  const [kit, tasks, otherCases] = await Promise.all([
+    getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), otherCasesOf(context, entry),
   ])
   const requests = await listOpenRequests(context.reader, ids)
   const own = context.actor ? await listOwnMarks(context.reader, context.actor.id, ids) : { outcomes: [], reliances: [] }
-  const found = posts.find((p) => p.id === id)
+  const [found] = posts
   const rights = new Map(posts.map((p) => [p.id, rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what))]))
   const sections = entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? [])
   return {

@@ -21,7 +21,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
   const count = entry.answers.length
   return (
     <div className="discrepancy">
-      <div className="discrepancy-found">
+      <div className="discrepancy-found" role="group" aria-label="Found, kept in view" tabIndex={0}>
         <Sheet as="section" labelledBy="found" id={`post-${entry.id}`}>
           <SheetHead id="found" title="Found" note={`${entry.author.name} · ${formatDate(entry.updatedAt)} · Rev ${entry.revision}`} />
           {own ? <PostStateNotice post={entry} rights={own} /> : null}

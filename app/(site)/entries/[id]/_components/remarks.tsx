@@ -12,7 +12,7 @@ export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: 
   const known = new Set(post.cautions.map((c) => c.code))
   if (post.remarks.length === 0 && !mayRemark) return null
   return (
-    <section className="remarks-part" aria-label="Remarks">
+    <div className="remarks-part">
       {post.remarks.length > 0 ? (
         <ul className="remarks">
           {post.remarks.map((r) => (
@@ -25,6 +25,6 @@ export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: 
         </ul>
       ) : null}
       {mayRemark ? <Disclosure summary="Remark" look="quiet"><RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} /></Disclosure> : null}
-    </section>
+    </div>
   )
 }

@@ -31,6 +31,7 @@ export default async function PrintPage({ params }: PageProps<'/entries/[id]/pri
       <PageTitle kicker={`${entry.kind === 'question' ? 'Discrepancy sheet' : 'Lesson'} ${entry.id} · ${kit.name} · ${sections.map((s) => `${s.code} ${s.title}`).join(', ')}`} title={entry.title} />
       <CautionPlate cautions={cautions} />
       {entry.plans.map((p) => <p key={p.page}><PlansReference {...p} /></p>)}
+      <h2>{entry.kind === 'question' ? 'Found' : 'Lesson'}</h2>
       <Prose html={entry.html} />
       <Stamps post={entry} />
       {entry.answers.map((a, i) => (
