@@ -14,6 +14,7 @@ export const paths = {
   home: '/' as Route,
   search: (address: SearchAddress = {}) => `/search${query({ ...address })}` as Route,
   entry: (id: number, anchor?: number) => `/entries/${id}${anchor && anchor !== id ? `#post-${anchor}` : ''}` as Route,
+  remark: (entryId: number, remarkId: number) => `/entries/${entryId}#remark-${remarkId}` as Route,
   entryPrint: (id: number) => `/entries/${id}/print` as Route,
   editEntry: (id: number) => `/entries/${id}/edit` as Route,
   revisions: (postId: number, from?: string, to?: string) => `/posts/${postId}/revisions${query({ from, to })}` as Route,

@@ -38,7 +38,7 @@ const help: Record<string, string> = {
 export function EntryForm({ action, kind, places, initial, editing, submission, memberId }: EntryFormProps) {
   const { state, submit, isPending, form, errorOf } = useForm(action)
   const isRefused = state.message !== ''
-  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${editing ? `entry-${editing.id}` : kind}`, isRefused)
+  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${editing ? `entry-${editing.id}` : kind}`, state)
   const values: FormValues = isRefused ? { ...initial, ...state.values } : restored ? { ...initial, ...restored.values } : initial
   const [writing, setWriting] = useState<FormValues | null>(null)
   const now = writing ?? values

@@ -44,7 +44,7 @@ export async function carryOut<T>({ form, schema, read, run, done, once: route }
     const key = form.get('submission')
     const perform = async () => ({ status: 200, body: JSON.stringify(await run(context, parsed.data)) })
     const answered = route && actor && typeof key === 'string' && /^[\w-]{8,64}$/.test(key)
-      ? await once(context, { memberId: actor.id, route: `form ${route}`, key, bodyText: JSON.stringify(parsed.data) }, perform)
+      ? await once(context, { memberId: actor.id, route: `form ${route}`, key, bodyText: JSON.stringify(parsed.data), otherBody: 'This form was posted before. Open the page anew to post another text; copy yours first.' }, perform)
       : await perform()
     next = JSON.parse(answered.body) as Route | null
   } catch (error) {

@@ -103,7 +103,8 @@ describe('in the page', () => {
     ['more than fits', 'x'.repeat(6_000), /At most 5,000 characters/],
     ['1 MB', 'A line of text.\n'.repeat(65_536), /At most 5,000 characters/],
   ])('%s is refused in words, and the text stays', async (_what, text, message) => {
-    const page = await openPage({ as: 'dela' })
+    // What is asked of the API while writing is refused too, for the same reason.
+    const page = await openPage({ as: 'dela', expects: [413, 422] })
     await visit(page, '/ask')
     await page.getByLabel('What is the question?').fill('Labels on a tray')
     await page.getByLabel('Kit and section').selectOption('whimbrel-2/X-1')
@@ -150,7 +151,11 @@ describe('in the page', () => {
     expect(result.text).not.toContain('<script>alert(1)')
   })
 
-  test.each([['/search?kit=nope'], ['/search?section=W-3'], ['/search?offset=-5'], ['/search?offset=abc'], ['/search?kind=poem'], ['/search?q=a&q=b'], [`/search?q=${'x'.repeat(600)}`], ['/search?q=%00'], [`/search?q=${'('.repeat(200)}`], ['/desk?open=abc'], ['/ask?title=%3Cscript%3E']])('%s shows a page', async (address) => {
+  test.each([
+    ['an unknown kit', '/search?kit=nope'], ['a section without its kit', '/search?section=W-3'], ['an offset below zero', '/search?offset=-5'], ['an offset that is none', '/search?offset=abc'],
+    ['an unknown kind', '/search?kind=poem'], ['words given twice', '/search?q=a&q=b'], ['too many words', `/search?q=${'x'.repeat(600)}`], ['a null character', '/search?q=%00'],
+    ['open brackets', `/search?q=${'('.repeat(200)}`], ['broken UTF-8', '/search?q=%E0%A4%A'], ['a sheet that is none', '/desk?open=abc'], ['markup to carry over', '/ask?title=%3Cscript%3E'],
+  ])('%s in a query shows a page', async (_what, address) => {
     const { result, ms } = await timed(() => call('jory', 'GET', address))
     expect(result.status).toBe(200)
     expect(ms).toBeLessThan(mostMs)

@@ -1,6 +1,5 @@
 // Everything the page of an entry shows: the entry, HTML by part, what this reader may do, their own marks, and other cases.
 import 'server-only'
-import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { getKit, listTasksBySlug } from '@/db/queries/kits'
 import { listOwnMarks } from '@/db/queries/marks'
 import type { AppContext } from '@/lib/context'
@@ -24,6 +23,8 @@ export interface PostRights {
   told: { result: 'as-written' | 'with-change' | 'did-not-work'; note: string; revision: string } | null
   goesBy: string | null
   stateReason: string | null
+  /** Who reads, 0 for a visitor: drafts are kept by member. */
+  memberId: number
   /** What mentors wait for before they stamp it. */
   askedFor: AskFor['what'][]
 }
@@ -71,7 +72,7 @@ function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answe
     tell: can(actor, 'post.tell-how-it-went', subject), goBy: can(actor, 'post.go-by', subject), cautions: can(actor, 'post.set-cautions', subject), hide: can(actor, 'post.hide', subject),
     ownStampId: post?.stamps.find((s) => s.live && !s.withdrawn && s.mentor.id === actor?.id)?.id ?? null,
     told: told ? { result: told.result, note: told.note, revision: revisionLetter(told.revision) } : null,
-    goesBy: goesBy ? revisionLetter(goesBy.revision) : null, stateReason, askedFor: requests,
+    goesBy: goesBy ? revisionLetter(goesBy.revision) : null, stateReason, memberId: actor?.id ?? 0, askedFor: requests,
   }
 }
 
@@ -82,9 +83,4 @@ async function otherCasesOf(context: AppContext, entry: Entry): Promise<Hit[]> {
     if (error instanceof SearchLoadingError) return []
     throw error
   }
-}
-
-/** The question's id of an answer, or null. */
-export async function questionOf(context: AppContext, answerId: number): Promise<number | null> {
-  return (await getCautionedPost(context.reader, answerId))?.parentId ?? null
 }

@@ -38,7 +38,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
           return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} plans={entry.plans[0]} /> : null
         })}
         <section id="say" className="no-print" aria-label="Say what to do" tabIndex={-1}>
-          {maySay ? <AnswerForm action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />
+          {maySay ? <AnswerForm key={`say-${count}`} action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />
             : entry.state === 'visible' ? <LinkButton href={paths.signIn(paths.entry(entry.id))}>Sign in to say what to do</LinkButton> : null}
         </section>
       </div>

@@ -91,7 +91,7 @@ export function PostActs({ post, rights, allCautions, plans }: { post: Shown; ri
         {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
         {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       </div>
-      <Remarks post={post} mayRemark={rights.remark} />
+      <Remarks post={post} mayRemark={rights.remark} memberId={rights.memberId} />
     </>
   )
 }
