@@ -8,7 +8,13 @@ export interface Acknowledged {
   answers: { id: number; entryId: number; body: string; word: string }[]
   remarks: { id: number; body: string }[]
 }
-export interface Burst { acknowledged: Acknowledged; refused: string[]; done: Promise<void> }
+export interface Burst {
+  acknowledged: Acknowledged
+  refused: string[]
+  /** Resolves with the first acknowledgement: from then on the burst is under way. Or with `done`, when nothing was acknowledged. */
+  begun: Promise<void>
+  done: Promise<void>
+}
 
 const acknowledgedCautions = cautionTable.cautions.map((caution) => caution.code)
 
@@ -17,6 +23,8 @@ export function startBurst(address: string, token: string, writers: number, chan
   const acknowledged: Acknowledged = { entries: [], answers: [], remarks: [] }
   const refused: string[] = []
   const post = (path: string, body: object) => send(`${address}${path}`, token, body, refused)
+  let tellBegun = () => {}
+  const first = new Promise<void>((resolve) => { tellBegun = resolve })
   const write = async () => {
     for (;;) {
       const word = unusualWord(chance)
@@ -24,6 +32,7 @@ export function startBurst(address: string, token: string, writers: number, chan
       const id = await post('/api/entries', { kind: 'question', kit: 'whimbrel-2', sections: ['X-1'], tasks: [], hardware: [], title, parts: { doing: 'Putting placards on.' }, acknowledgedCautions })
       if (id === null) return
       acknowledged.entries.push({ id, title, word })
+      tellBegun()
       const answer = { word: unusualWord(chance), id: 0, entryId: id, body: '' }
       answer.body = `On the panel, left of the ${answer.word}.`
       const answerId = await post(`/api/entries/${id}/answers`, { body: answer.body, acknowledgedCautions })
@@ -35,7 +44,8 @@ export function startBurst(address: string, token: string, writers: number, chan
       acknowledged.remarks.push({ id: remarkId, body: remark })
     }
   }
-  return { acknowledged, refused, done: Promise.all(Array.from({ length: writers }, write)).then(() => undefined) }
+  const done = Promise.all(Array.from({ length: writers }, write)).then(() => undefined)
+  return { acknowledged, refused, begun: Promise.race([first, done]), done }
 }
 
 /** The id that was acknowledged with 201, or null when the server is gone. A refusal by a living server is noted. */

@@ -31,7 +31,8 @@ export async function measureKill({ rounds, writers, seed = Date.now() % 1_000_0
     try {
       for (let i = 0; i < rounds; i++) {
         const burst = startBurst(server.address, token, writers, chance)
-        await new Promise((resolve) => setTimeout(resolve, 100 + chance.below(longestBurstMs)))
+        await burst.begun
+        await new Promise((resolve) => setTimeout(resolve, chance.below(longestBurstMs)))
         await server.end('SIGKILL')
         await burst.done
         server = await startProduction(installation.directory)
@@ -52,6 +53,7 @@ function measuredOf(found: readonly Found[]): Measured[] {
   const none = (what: string, value: number): Measured => ({ what, value, unit: '', promised: 0 })
   return [
     { what: `writes acknowledged before ${found.length} kills`, value: sum((f) => f.acknowledged), unit: '', promised: null },
+    none('kills before anything was acknowledged', found.filter((f) => f.acknowledged === 0).length),
     none('acknowledged and not there after the restart', sum((f) => f.lost)),
     none('acknowledged and not found by search', sum((f) => f.notFound)),
     none('faults of integrity_check and foreign_key_check', sum((f) => f.unsound.length)),
