@@ -20,6 +20,8 @@ export interface Database {
   readonly reader: Reader
   /** For db/transaction.ts alone: a connection of its own that begins at once or is refused. */
   readonly writer: Reader
+  /** The end of the line of writes. Here, not in a module of db/transaction.ts: the framework loads modules once a bundle, and two lines would not wait for each other. */
+  readonly queue: { last: Promise<unknown> }
   close(): void
 }
 
@@ -37,7 +39,7 @@ export async function openDatabase(file: string): Promise<Database> {
   beginOrRefuse(writer)
   const drizzled = (c: Client): Reader => drizzle(c, { schema, casing: 'snake_case' })
   return {
-    file, client, reader: drizzled(client), writer: drizzled(writer),
+    file, client, reader: drizzled(client), writer: drizzled(writer), queue: { last: Promise.resolve() },
     close: () => {
       writer.close()
       client.close()

@@ -65,6 +65,7 @@ describe.each(widths)('at %i px', (width) => {
     await page.getByLabel('What happened').fill('The labels stayed on.')
     await page.getByRole('button', { name: 'Post the lesson' }).click()
     await page.waitForURL(/\/entries\/\d+/)
+    await expect.poll(() => page.evaluate(() => Object.values(localStorage).some((kept) => String(kept).includes('The labels stayed on.')))).toBe(false)
     await visit(page, '/lesson')
     expect(await page.getByLabel('What happened').inputValue()).toBe('')
   })

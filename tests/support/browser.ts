@@ -86,9 +86,11 @@ function watch(page: Page, { baseUrl, expects, javaScript }: Required<Pick<OpenO
   })
 }
 
-/** Waits until the page's scripts have taken over, so that what follows tests the page with them. */
+/** Waits until the page's scripts have taken over and what they listen for is heard, so that what follows tests the page with them. */
 export async function awake(page: Page): Promise<void> {
   await page.waitForFunction(() => Object.keys(document.querySelector('input[name=q]') ?? {}).some((key) => key.startsWith('__reactProps')))
+  // Listeners are put up by effects, which run after the fields are taken over and before the browser is idle.
+  await page.evaluate(() => new Promise<void>((resolve) => { requestIdleCallback(() => resolve()) }))
 }
 
 /** Goes there and waits for the scripts. */
