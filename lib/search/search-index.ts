@@ -19,8 +19,8 @@ const mostConceptsOfSimilar = 12
 const leastCoverageOfSimilar = 0.25
 /** Entries far below the best one only share a common word with the question. */
 const leastShareOfBest = 0.25
-/** Of more entries than this only those that hold most of the question are scored; the rest follow by what they hold. */
-const mostScored = 1_500
+/** Of more entries than this only those that hold most of the question are scored, of equals those with the best evidence; the rest follow by what they hold. */
+const mostScored = 1_000
 /** A whole title holds so many terms that few entries share the same part of it: fewer are enough to find the nearest. */
 const mostScoredOfSimilar = 300
 /** Postings read for one question; the commonest words are left out beyond it, so that no text takes long. */
@@ -142,10 +142,7 @@ export class SearchIndex {
 
   /** Score = BM25 × weight of the entry's evidence. */
   private order(found: Scored[], question: Question, held: HeldTerms, most: number): Scored[] {
-    const cut = found.length <= most ? 0 : nthLargest(found.map(({ coverage }) => coverage), most)
-    const chosen = new Uint8Array(this.slots.length)
-    for (const { kept, coverage } of found) if (coverage >= cut) chosen[kept.slot] = 1
-    const scores = this.postings.score(question, held, chosen)
+    const scores = this.postings.score(question, held, this.choose(found, most))
     let lowest = Infinity
     for (const entry of found) {
       entry.score = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
@@ -153,6 +150,18 @@ export class SearchIndex {
     }
     for (const entry of found) if (entry.score === 0) entry.score = lowest * entry.coverage
     return found.sort(byScore)
+  }
+
+  /** Marks the slots of at most `most` entries. */
+  private choose(found: readonly Scored[], most: number): Uint8Array {
+    const chosen = new Uint8Array(this.slots.length)
+    // Evidence decides only between equals: weights are small numbers, coverages differ by far more than a millionth.
+    const promise = ({ coverage, kept }: Scored) => coverage + kept.weight * 1e-6
+    const cut = found.length <= most ? -1 : nthLargest(found.map(promise), most)
+    let room = most
+    for (const entry of found) if (promise(entry) > cut) { chosen[entry.kept.slot] = 1; room-- }
+    for (const entry of found) if (room > 0 && promise(entry) === cut) { chosen[entry.kept.slot] = 1; room-- }
+    return chosen
   }
 
   private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
