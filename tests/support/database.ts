@@ -44,7 +44,7 @@ export async function openTestRuntime({ searchStarts = true } = {}): Promise<Tes
   const { file, remove } = await copyDatabase()
   const database: Database = await openDatabase(file)
   const search = openSearch({ database, workerFile: searchStarts ? workerFile('search') : `${file}.no-worker.mjs` })
-  const renderer = createRenderer({ workerFile: workerFile('render') })
+  const renderer = createRenderer({ workerFile: workerFile('render'), timeoutMs: 5_000 })
   if (searchStarts) await search.catchUp()
   const before = holder.pilotholeRuntime
   holder.pilotholeRuntime = Promise.resolve({ database, search, renderer })

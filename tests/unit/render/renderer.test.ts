@@ -14,7 +14,7 @@ beforeAll(async () => {
   directory = await mkdtemp(path.join(os.tmpdir(), 'pilothole-render-'))
   await buildWorkers(directory)
   workerFile = path.join(directory, 'render.mjs')
-  renderer = createRenderer({ workerFile })
+  renderer = createRenderer({ workerFile, timeoutMs: 2_000 })
   await renderer.render({ body: 'first' })
 })
 afterAll(async () => {
