@@ -122,7 +122,8 @@ class Search implements SearchDoor {
       }
     }
     await pending
-    await this.followWith(thread)
+    // Up to what stands there now, and no further: while somebody goes on writing the log has no end, and search would stay shut.
+    await this.followWith(thread, await currentSequence(database.reader))
   }
 
   /** Reads the log once to its end; calls that come meanwhile share the run. */
@@ -133,9 +134,10 @@ class Search implements SearchDoor {
     return this.following
   }
 
-  private async followWith(thread: SearchThread): Promise<void> {
+  /** Reads the log to its end, or until `enough` is reached. */
+  private async followWith(thread: SearchThread, enough = Infinity): Promise<void> {
     const { database } = this.settings
-    for (;;) {
+    while (this.sequence < enough) {
       const { entryIds, reached } = await listChangesAfter(database.reader, this.sequence, changesARead)
       if (reached === this.sequence) return
       const documents = new DocumentReader(database, await readTitles(database.reader))

@@ -28,5 +28,7 @@ export async function judgePost(tx: Transaction, postId: number): Promise<void> 
   const found = await getCautionedPost(tx, postId)
   if (!found) throw new Error(`No post ${postId} to judge`)
   const parent = found.parentId === null ? null : await getCautionedPost(tx, found.parentId)
-  await setJudgement(tx, postId, { stampState: judge(found, parent?.current.number ?? 0).state, needsTwo: needsTwoStamps(found) })
+  const judgement = { stampState: judge(found, parent?.current.number ?? 0).state, needsTwo: needsTwoStamps(found) }
+  // An update that changes nothing would still send search to read the entry again.
+  if (judgement.stampState !== found.stampState || judgement.needsTwo !== found.needsTwo) await setJudgement(tx, postId, judgement)
 }
