@@ -62,7 +62,7 @@ function leastRadius(given: InputReader): ShopResult[] {
     const note = [aside, angle, yours].filter(Boolean).join('; ')
     const times = `${row.minTimes} to ${row.maxTimes} t`
     return [
-      result('radius-least', lengthRange(row.minTimes * thickness, row.maxTimes * thickness), cite(data.radii.cite, 'worked'), { how: times, note }),
+      result('radius-least', lengthRange(row.minTimes * thickness, row.maxTimes * thickness), cite(data.radii.cite, 'worked'), { how: times, note, against: yours }),
       result('radius-times', { value: { min: row.minTimes, max: row.maxTimes }, unit: 't', display: { inch: times, metric: times } }, source, { how: `${alloy}, ${row.thickness.toFixed(3)}`, note: aside }),
     ]
   })

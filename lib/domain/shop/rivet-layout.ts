@@ -15,11 +15,14 @@ export function edgeAndPitch(given: InputReader): ShopResult[] {
 
 const inWords = (inches: number): string => fractionOfInch(inches) ?? inches.toFixed(3)
 
+/** Whether what was measured falls short. Nothing measured doesn't. */
+export const fallsShort = (have: number | undefined, least: number): boolean => have !== undefined && have - least < -1e-9
+
 /** "short by 1/32 of 2 D", or undefined when nothing was measured. */
 export function marginWords(have: number | undefined, least: number, rule: string): string | undefined {
   if (have === undefined) return undefined
   const off = have - least
-  return off < -1e-9 ? `short by ${inWords(-off)} of ${rule}: stop, measure, ask the kit maker` : `yours is ${inWords(off)} over ${rule}`
+  return fallsShort(have, least) ? `short by ${inWords(-off)} of ${rule}: stop, measure, ask the kit maker` : `yours is ${inWords(off)} over ${rule}`
 }
 
 function edges(given: InputReader, size: string): ShopResult[] {
@@ -30,7 +33,7 @@ function edges(given: InputReader, size: string): ShopResult[] {
   const note = marginWords(given.optionalNumber('edge'), least, `${rule.d} D`)
   const hole = given.word('head') === 'blind' ? (blindHole(size)?.max ?? diameter) : (finalHoles(size)[0]?.drill.inches ?? diameter)
   return [
-    result('edge-centre', length(least), cite(rule.cite, 'worked'), { how: `${rule.d} D`, note }),
+    result('edge-centre', length(least), cite(rule.cite, 'worked'), { how: `${rule.d} D`, note, against: fallsShort(given.optionalNumber('edge'), least) && note }),
     result('edge-rim', length(least - hole / 2), cite(rule.cite, 'worked'), { how: `${rule.d} D less half the ${hole.toFixed(4)} hole` }),
   ]
 }
@@ -41,7 +44,7 @@ function pitches(given: InputReader, diameter: number): ShopResult[] {
   const least = pitchLeast.d * diameter
   const yours = pitch === undefined ? '' : `. Yours is ${Number((pitch / diameter).toFixed(2))} D`
   return [
-    result('pitch-least', length(least), cite(pitchLeast.cite, 'worked'), { how: `3 D${yours}`, note: marginWords(pitch, least, '3 D') }),
+    result('pitch-least', length(least), cite(pitchLeast.cite, 'worked'), { how: `3 D${yours}`, note: marginWords(pitch, least, '3 D'), against: fallsShort(pitch, least) && marginWords(pitch, least, '3 D') }),
     ...data.pitchUsual.map(({ cite: key, min, max, note }) =>
       result('pitch-usual', min === max ? length(min * diameter) : lengthRange(min * diameter, max * diameter), cite(key, 'worked'), { how: min === max ? `${min} D` : `${min} to ${max} D`, note })),
     result('row-least', length(rowLeast.d * diameter), cite(rowLeast.cite, 'worked'), { how: '2.5 D' }),

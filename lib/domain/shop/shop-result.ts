@@ -16,12 +16,14 @@ export interface Quantity {
 interface Extra {
   note?: string | false | undefined
   how?: string
+  /** In what the reader's own measure doesn't meet this result; said in the note too. */
+  against?: string | false | undefined
 }
 
 /** One result. Notes of the source come first. */
 export function result(name: string, quantity: Quantity, { source, basis, notes }: Citation, extra: Extra = {}): ShopResult {
   const note = [...notes, ...(extra.note ? [extra.note] : [])].join('; ')
-  return { name, ...quantity, source, basis, ...(note ? { note } : {}), ...(extra.how ? { how: extra.how } : {}) }
+  return { name, ...quantity, source, basis, ...(note ? { note } : {}), ...(extra.how ? { how: extra.how } : {}), ...(extra.against ? { against: extra.against } : {}) }
 }
 
 /** Half a unit of the last place rounds away from zero: 3.175 is 3.18, whatever the binary digits behind it. */

@@ -34,6 +34,8 @@ export interface ShopResult {
   note?: string
   /** The arithmetic in words: "0.065 + 1.5 D". */
   how?: string
+  /** In what the reader's own measure doesn't meet this: "short by 1/32 of 2 D". It stands in the note too. */
+  against?: string
 }
 
 export interface ResultDeclaration {

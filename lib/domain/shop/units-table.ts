@@ -40,6 +40,12 @@ export const unitsTable = defineTable({
   },
 })
 
+/** A length in inches, or null where the unit measures something else, and for lengths that no drawing shows. */
+export function unitLength(value: string, from: string): number | null {
+  const inches = convertExact(exactOf(value), from, 'in')?.valueOf()
+  return inches !== undefined && inches >= 1 / 128 && inches <= 1200 ? inches : null
+}
+
 /** What was read as an exact number already; anything else would be a mistake of the program. */
 function exactOf(text: string): Fraction {
   const value = parseExact(text)

@@ -13,8 +13,8 @@ export function routing(given: InputReader): ShopResult[] {
   const close = clearance === undefined ? undefined : clearance < least - 1e-9 ? 'yours is under it: a grommet is needed' : 'yours is enough'
   const far = spacing === undefined ? undefined : spacing > data.support.inches + 1e-9 ? 'yours are too far apart' : spacing > data.ties.over ? 'yours are near enough; put ties between' : 'yours are near enough'
   return [
-    result('clearance', length(least), cite(data.clearance.cite), { how: 'at least, or a grommet', note: close }),
-    result('support', length(data.support.inches), cite(data.support.cite), { note: far }),
+    result('clearance', length(least), cite(data.clearance.cite), { how: 'at least, or a grommet', note: close, against: clearance !== undefined && clearance < least - 1e-9 && close }),
+    result('support', length(data.support.inches), cite(data.support.cite), { note: far, against: spacing !== undefined && spacing > data.support.inches + 1e-9 && far }),
     result('slack', length(inchesOf(data.slack.deflection)), cite(data.slack.cite), { how: 'normally, pressed by hand' }),
     result('reterminations', amount(data.slack.reterminations, 'reterminations'), cite(data.slack.cite)),
     result('fluid', length(data.fluid.inches), cite(data.fluid.cite)),

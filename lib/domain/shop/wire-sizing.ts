@@ -51,8 +51,9 @@ function inHand(given: InputReader, allowed: number, rating: WireRating): ShopRe
   const size = Number(wire.awg)
   const strands = wire.awg.startsWith('0') ? undefined : data.strands.rows.find((row) => size <= row.from && size >= row.to)
   const carries = wire.amps[rating]
+  const less = carries < given.number('current') && 'less than the current you gave'
   return [
-    result('hand-current', amount(carries, 'A'), table, { how: `AWG ${wire.awg}, ${rating} °C`, note: carries < given.number('current') && 'less than the current you gave' }),
+    result('hand-current', amount(carries, 'A'), table, { how: `AWG ${wire.awg}, ${rating} °C`, note: less, against: less }),
     ...runs(wire, given, allowed, 'hand-'),
     result('resistance', amount(wire.ohmsPer1000ft, 'ohm/1000 ft'), table), result('area', amount(wire.circularMils, 'circ mil'), table),
     strands ? result('strands', words(`${strands.nicked} nicked, ${strands.broken} broken of ${strands.strands}`), cite(data.strands.cite)) : result('strands', noValue('strands'), cite(data.strands.cite), { note: 'the table lists AWG 24 to 4' }),

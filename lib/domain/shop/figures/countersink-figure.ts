@@ -1,7 +1,6 @@
 // A flush head in a sheet, countersunk and dimpled side by side, in section.
-import { decimalInches } from '../shop-result'
 import type { Figure, Point } from './figure'
-import { fit, Sketch } from './sketch'
+import { fit, Sketch, type LengthSystem } from './sketch'
 
 export interface CountersinkFigureInput {
   /** Inches. */
@@ -12,12 +11,12 @@ export interface CountersinkFigureInput {
 }
 
 /** `width`: pixels it will be shown at; under 480 the two views stand below one another. */
-export function countersinkFigure(input: CountersinkFigureInput, width = 640): Figure {
+export function countersinkFigure(input: CountersinkFigureInput, width = 640, system: LengthSystem = 'inch'): Figure {
   const narrow = width < 480
   const deep = Math.max(input.sheet, input.headHeight) + input.headHeight + input.sheet
   const scale = Math.min(fit(narrow ? width * 0.4 : width * 0.24, input.headDiameter * 1.8), fit(200, deep))
   const panel = deep * scale + 110
-  const sketch = new Sketch('Countersink or dimple', width, narrow ? panel * 2 : panel, scale)
+  const sketch = new Sketch({ title: 'Countersink or dimple', system, width, height: narrow ? panel * 2 : panel, scale })
   const second: Point = narrow ? [width * 0.34, panel + 62] : [width * 0.7, 62]
   drawCountersunk(sketch, [narrow ? width * 0.34 : width * 0.22, 62], input, scale)
   drawDimpled(sketch, second, input, scale)
@@ -33,10 +32,10 @@ function drawCountersunk(sketch: Sketch, [x, y]: Point, { sheet, hole, headDiame
   sketch.caption('COUNTERSUNK', [x, 14], 'middle')
   for (const side of [-1, 1] as const) sketch.path('cut', [[x + side * far, y], [x + side * head, y], [x + side * inner, y + depth], [x + side * inner, bottom], [x + side * far, bottom]])
   sketch.path('metal', [[x - head, y], [x + head, y], [x + half, y + headHeight * scale], [x - half, y + headHeight * scale]])
-  sketch.across(decimalInches(headDiameter), [x - head, y], [x + head, y], { field: 'head-diameter', lane: y - 18 })
-  sketch.down(decimalInches(sheet), [x + far, y], [x + far, bottom], { field: 'sheet', lane: x + far + 14 })
-  sketch.down(decimalInches(headHeight), [x - far, y], [x - far, y + headHeight * scale], { field: 'head-height', lane: x + far + 14 })
-  sketch.balloon([x, Math.max(bottom, y + headHeight * scale)], 'Sheet under the head', through ? 'none: the countersink goes right through' : `${decimalInches(sheet - headHeight)} is left`)
+  sketch.across(sketch.decimal(headDiameter), [x - head, y], [x + head, y], { field: 'head-diameter', lane: y - 18 })
+  sketch.down(sketch.decimal(sheet), [x + far, y], [x + far, bottom], { field: 'sheet', lane: x + far + 14, isEntry: true })
+  sketch.down(sketch.decimal(headHeight), [x - far, y], [x - far, y + headHeight * scale], { field: 'head-height', lane: x + far + 14 })
+  sketch.balloon([x, Math.max(bottom, y + headHeight * scale)], 'Sheet under the head', through ? 'none: the countersink goes right through' : `${sketch.length(sheet - headHeight)} is left`)
 }
 
 function drawDimpled(sketch: Sketch, [x, y]: Point, { sheet, hole, headDiameter, headHeight }: CountersinkFigureInput, scale: number): void {

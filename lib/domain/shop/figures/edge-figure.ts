@@ -1,8 +1,6 @@
 // Two rivets in a row near the edge of a sheet: edge distance from centre and rim, pitch, and the least of each.
-import { decimalInches } from '../shop-result'
-import { fractionOfInch } from '../exact-fraction'
 import type { Figure } from './figure'
-import { fit, Sketch } from './sketch'
+import { fit, Sketch, type LengthSystem } from './sketch'
 
 export interface EdgeFigureInput {
   /** Inches. */
@@ -14,16 +12,14 @@ export interface EdgeFigureInput {
   leastPitch: number
 }
 
-const words = (inches: number): string => fractionOfInch(inches) ?? decimalInches(inches)
-
 /** `width`: pixels it will be shown at. */
-export function edgeFigure({ hole, headWidth, edge, pitch, leastEdge, leastPitch }: EdgeFigureInput, width = 640): Figure {
+export function edgeFigure({ hole, headWidth, edge, pitch, leastEdge, leastPitch }: EdgeFigureInput, width = 640, system: LengthSystem = 'inch'): Figure {
   const deep = Math.max(edge, leastEdge) + headWidth
   const scale = Math.min(fit(width * 0.5, Math.max(pitch, leastPitch) + headWidth), fit(220, deep))
-  const [top, left] = [56, width * 0.1]
+  const [top, left] = [64, width * 0.1]
   const bottom = top + deep * scale
   const y = bottom - edge * scale
-  const sketch = new Sketch('Edge distance and pitch', width, bottom + Math.max(40, (headWidth / 2 - edge) * scale + 16), scale)
+  const sketch = new Sketch({ title: 'Edge distance and pitch', system, width, height: bottom + Math.max(40, (headWidth / 2 - edge) * scale + 16), scale })
   const [first, second] = [left + (headWidth / 2) * scale + 12, left + (headWidth / 2 + pitch) * scale + 12]
   sketch.rect('sheet', 0, top, width, bottom)
   sketch.line('outline', [0, bottom], [width, bottom])
@@ -35,11 +31,11 @@ export function edgeFigure({ hole, headWidth, edge, pitch, leastEdge, leastPitch
   }
   sketch.line('centre', [0, y], [width, y])
   sketch.caption('sheet edge', [4, bottom + 14])
-  sketch.across(words(pitch), [first, y], [second, y], { field: 'pitch', lane: 22 })
+  sketch.across(sketch.size(pitch), [first, y], [second, y], { field: 'pitch', lane: 26, isEntry: true })
   const lane = second + (headWidth / 2) * scale + 16
-  sketch.down(words(edge), [second, y], [second, bottom], { field: 'edge', lane })
-  sketch.balloon([second, Math.min(y + (hole / 2) * scale, bottom)], 'Rim', `${decimalInches(edge - hole / 2)} from the rim of the hole`)
-  sketch.balloon([first - (headWidth / 2) * scale, bottom - leastEdge * scale], 'Least edge', `${words(leastEdge)} from the centre of the hole`)
-  sketch.balloon([first + leastPitch * scale, y + 18], 'Least pitch', words(leastPitch))
+  sketch.down(sketch.size(edge), [second, y], [second, bottom], { field: 'edge', lane, isEntry: true })
+  sketch.balloon([second, Math.min(y + (hole / 2) * scale, bottom)], 'Rim', `${sketch.length(edge - hole / 2)} from the rim of the hole`)
+  sketch.balloon([first - (headWidth / 2) * scale, bottom - leastEdge * scale], 'Least edge', `${sketch.length(leastEdge)} from the centre of the hole`)
+  sketch.balloon([first + leastPitch * scale, y + 18], 'Least pitch', `${sketch.length(leastPitch)} from centre to centre`)
   return sketch.finish()
 }

@@ -17,6 +17,8 @@ export interface Label {
   text: string
   at: Point
   anchor: Anchor
+  /** The value is typed in here: the label takes the room of a box. */
+  isEntry?: true
 }
 
 export interface Dimension {
@@ -68,11 +70,21 @@ export const CHARACTER = 9.6
 export const LINE = 20
 export const BALLOON_RADIUS = 14
 
+/** The box one types into: wide enough for "4.76 mm", high enough for a gloved finger beside a scale drawing. */
+export const ENTRY_WIDTH = 92
+export const ENTRY_HEIGHT = 40
+
+/** How wide a label stands, as a box to type into or as words. */
+export function labelWidth({ text, isEntry }: Pick<Label, 'text' | 'isEntry'>): number {
+  return isEntry ? Math.max(ENTRY_WIDTH, text.length * CHARACTER + 24) : text.length * CHARACTER
+}
+
 /** The room a label takes. */
-export function labelBox({ text, at: [x, y], anchor }: Label): Box {
-  const width = text.length * CHARACTER
+export function labelBox(label: Label): Box {
+  const { at: [x, y], anchor } = label
+  const [width, half] = [labelWidth(label), (label.isEntry ? ENTRY_HEIGHT : LINE) / 2]
   const left = anchor === 'start' ? x : anchor === 'end' ? x - width : x - width / 2
-  return { left, top: y - LINE / 2, right: left + width, bottom: y + LINE / 2 }
+  return { left, top: y - half, right: left + width, bottom: y + half }
 }
 
 export function balloonBox({ centre: [x, y] }: Pick<Balloon, 'centre'>): Box {

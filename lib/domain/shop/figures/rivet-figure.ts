@@ -1,8 +1,6 @@
 // A solid rivet in section: the hole through the stack, the rivet put in, the rivet driven.
-import { decimalInches } from '../shop-result'
-import { fractionOfInch } from '../exact-fraction'
 import type { Figure, Point } from './figure'
-import { fit, Sketch } from './sketch'
+import { fit, Sketch, type LengthSystem } from './sketch'
 
 export interface RivetFigureInput {
   /** Inches. */
@@ -18,18 +16,17 @@ export interface RivetFigureInput {
   flush?: boolean
 }
 
-const words = (inches: number): string => fractionOfInch(inches) ?? decimalInches(inches)
 const SHEETS_SHOWN = 6
 
 /** `width`: pixels it will be shown at; under 480 the three views stand below one another. */
-export function rivetFigure(input: RivetFigureInput, width = 640): Figure {
+export function rivetFigure(input: RivetFigureInput, width = 640, system: LengthSystem = 'inch'): Figure {
   const narrow = width < 480
   const stack = input.sheets.reduce((sum, sheet) => sum + sheet, 0)
   const across = Math.max(input.diameter * 2.2, input.headWidth * 1.3)
   const deep = Math.max(input.length, stack + input.headHeight) + input.diameter * 0.9
   const scale = Math.min(fit(narrow ? width * 0.5 : width * 0.2, across), fit(300, deep))
   const panel = deep * scale + 96
-  const sketch = new Sketch('Solid rivet', width, narrow ? panel * 3 : panel + 24, scale, input.flush ? '' : 'the manufactured head')
+  const sketch = new Sketch({ title: 'Solid rivet', system, width, height: narrow ? panel * 3 : panel + 24, scale, byEye: input.flush ? '' : 'the manufactured head' })
   const at = (index: number): Point => [narrow ? width * 0.36 : width * (0.14 + 0.31 * index), (narrow ? panel * index : 0) + 34 + input.diameter * 0.5 * scale]
   drawHole(sketch, at(0), input, scale, stack)
   drawRivet(sketch, at(1), input, scale, stack)
@@ -54,7 +51,7 @@ function drawHole(sketch: Sketch, at: Point, input: RivetFigureInput, scale: num
   sketch.caption('HOLE', [x, y - input.diameter * 0.5 * scale - 22], 'middle')
   drawSheets(sketch, at, input, scale)
   sketch.line('centre', [x, y - 12], [x, y + stack * scale + 12])
-  const text = input.holeName ? `${input.holeName} · ${decimalInches(input.hole, 4)}` : decimalInches(input.hole, 4)
+  const text = input.holeName ? `${input.holeName} · ${sketch.decimal(input.hole, 4)}` : sketch.decimal(input.hole, 4)
   sketch.across(text, [x - half, y + stack * scale], [x + half, y + stack * scale], { field: 'hole', lane: y + stack * scale + 26 })
   sketch.balloon([x - half, y + (stack * scale) / 2], 'Hole', 'deburr both sides of every sheet')
 }
@@ -73,8 +70,8 @@ function drawRivet(sketch: Sketch, at: Point, input: RivetFigureInput, scale: nu
   drawSheets(sketch, at, input, scale)
   drawShank(sketch, at, input, scale, input.diameter, bottom)
   const half = (input.diameter / 2) * scale
-  sketch.down(words(input.length), [x + half, y], [x + half, bottom], { field: 'length', lane: x + Math.max(input.diameter * 1.1, input.headWidth * 0.65) * scale + 10 })
-  sketch.across(words(input.diameter), [x - half, bottom], [x + half, bottom], { field: 'diameter', lane: bottom + 20 })
+  sketch.down(sketch.size(input.length), [x + half, y], [x + half, bottom], { field: 'length', lane: x + Math.max(input.diameter * 1.1, input.headWidth * 0.65) * scale + 10 })
+  sketch.across(sketch.size(input.diameter), [x - half, bottom], [x + half, bottom], { field: 'diameter', lane: bottom + 20 })
   sketch.balloon([x - half, y + stack * scale], 'Length', 'stack and 1.5 D')
 }
 
@@ -86,7 +83,7 @@ function drawDriven(sketch: Sketch, at: Point, input: RivetFigureInput, scale: n
   drawSheets(sketch, at, input, scale)
   drawShank(sketch, at, input, scale, input.hole, under)
   sketch.curve('metal', `M${x - half * 0.9} ${under} Q${x - half * 1.1} ${(under + bottom) / 2} ${x - half * 0.9} ${bottom} L${x + half * 0.9} ${bottom} Q${x + half * 1.1} ${(under + bottom) / 2} ${x + half * 0.9} ${under} Z`)
-  sketch.down(decimalInches(input.headHeight), [x + half, under], [x + half, bottom], { field: 'head-height', lane: x + Math.max(input.diameter * 1.1, input.headWidth * 0.65) * scale + 8 })
-  sketch.across(decimalInches(input.headWidth), [x - half, bottom], [x + half, bottom], { field: 'head-width', lane: bottom + 20 })
+  sketch.down(sketch.decimal(input.headHeight), [x + half, under], [x + half, bottom], { field: 'head-height', lane: x + Math.max(input.diameter * 1.1, input.headWidth * 0.65) * scale + 8 })
+  sketch.across(sketch.decimal(input.headWidth), [x - half, bottom], [x + half, bottom], { field: 'head-width', lane: bottom + 20 })
   sketch.balloon([x + half, (under + bottom) / 2], 'Shop head', '1.5 D wide, 0.5 D high; not under 1.3 D and 0.3 D')
 }
