@@ -7,6 +7,7 @@ export async function register(): Promise<void> {
 
 /** The one place where unexpected errors of pages and actions are logged; the error page shows the digest. */
 export async function onRequestError(error: unknown, request: { path: string; method: string }, context: { routePath: string }): Promise<void> {
+  if (process.env.NEXT_RUNTIME !== 'nodejs') return
   // Imported here, not above: the framework also bundles this file for a runtime without process.
   const { logError } = await import('@/lib/log')
   const digest = error instanceof Error && 'digest' in error ? String(error.digest) : ''

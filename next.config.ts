@@ -6,7 +6,8 @@ const config: NextConfig = {
   poweredByHeader: false,
   reactStrictMode: true,
   // forbidden() and unauthorized() are called from lib/auth/guards.ts alone, so that dropping this touches one file.
-  experimental: { authInterrupts: true },
+  // The framework's 1 MB would answer a long text with the error page; up to here our own limits refuse it in words, beside the field.
+  experimental: { authInterrupts: true, serverActions: { bodySizeLimit: '4mb' } },
   serverExternalPackages: ['@node-rs/argon2'],
   logging: { incomingRequests: false },
 }

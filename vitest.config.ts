@@ -12,13 +12,16 @@ const project = (name: string, extra: object) => ({
   test: { name, include: [`tests/${name}/**/*.test.{ts,tsx}`], setupFiles: ['tests/support/setup.ts'], ...extra },
 })
 
+// Limits of time are part of what is tested, and the build machine has two cores: one more try, never more.
+const retry = 1
+
 export default defineConfig({
   resolve: { alias },
   test: {
     projects: [
-      project('unit', { testTimeout: 10_000 }),
-      project('integration', { testTimeout: 30_000, hookTimeout: 60_000, globalSetup: ['tests/support/template-database.ts'], maxWorkers: 2 }),
-      project('e2e', { testTimeout: 120_000, hookTimeout: 180_000, globalSetup: ['tests/support/production-server.ts'], fileParallelism: false }),
+      project('unit', { testTimeout: 10_000, sequence: { groupOrder: 0 } }),
+      project('integration', { retry, testTimeout: 30_000, hookTimeout: 60_000, globalSetup: ['tests/support/template-database.ts'], maxWorkers: 2, sequence: { groupOrder: 1 } }),
+      project('e2e', { retry, testTimeout: 120_000, hookTimeout: 180_000, globalSetup: ['tests/support/production-server.ts'], fileParallelism: false, sequence: { groupOrder: 2 } }),
     ],
   },
 })

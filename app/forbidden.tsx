@@ -4,5 +4,5 @@ import { LinkButton } from '@/components/ui/link-button'
 import { paths } from '@/lib/paths'
 
 export default function Page() {
-  return <EmptyState title="Not allowed" action={<><LinkButton href={paths.search()} look="primary">Search</LinkButton><LinkButton href={paths.home}>First page</LinkButton></>}><p>You are signed in, but this needs a right you do not have. A steward of your group gives rights.</p></EmptyState>
+  return <EmptyState level={1} title="Not allowed" action={<><LinkButton href={paths.search()} look="primary">Search</LinkButton><LinkButton href={paths.home}>First page</LinkButton></>}><p>You are signed in, but this needs a right you do not have. A steward of your group gives rights.</p></EmptyState>
 }

@@ -7,7 +7,7 @@ import { can } from '@/lib/policy/can'
 /** Header, phone bar and footer for this actor. */
 export function navigationFor(actor: Actor): { rooms: NavItem[]; bar: BarItem[]; footer: NavItem[] } {
   const desk: NavItem[] = can(actor, 'desk.open') ? [{ href: paths.desk(), label: 'Desk' }] : []
-  const people: NavItem[] = can(actor, 'people.open') ? [{ href: paths.people, label: 'People' }] : []
+  const people: NavItem[] = can(actor, 'people.open') ? [{ href: paths.people(), label: 'People' }] : []
   const me: NavItem = actor ? { href: paths.account, label: 'Account' } : { href: paths.signIn(), label: 'Sign in' }
   const kits: NavItem = { href: paths.kits, label: 'Kits' }
   const shop: NavItem = { href: paths.shop, label: 'Shop tables' }

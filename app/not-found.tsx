@@ -4,5 +4,5 @@ import { LinkButton } from '@/components/ui/link-button'
 import { paths } from '@/lib/paths'
 
 export default function Page() {
-  return <EmptyState title="Nothing at this address" action={<><LinkButton href={paths.search()} look="primary">Search</LinkButton><LinkButton href={paths.home}>First page</LinkButton></>}><p>It may have been moved or mistyped. Nothing is ever deleted here by a click; a hidden post shows only to its author and moderators.</p></EmptyState>
+  return <EmptyState level={1} title="Nothing at this address" action={<><LinkButton href={paths.search()} look="primary">Search</LinkButton><LinkButton href={paths.home}>First page</LinkButton></>}><p>It may have been moved or mistyped. Nothing is ever deleted here by a click; a hidden post shows only to its author and moderators.</p></EmptyState>
 }

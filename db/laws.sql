@@ -36,7 +36,8 @@ BEGIN SELECT raise(ABORT, 'law: a question is answered, not stamped'); END;
 
 CREATE TRIGGER stamp_only_by_a_mentor BEFORE INSERT ON stamp
 WHEN NEW.mentor_id IS NOT NULL AND NOT EXISTS
-  (SELECT 1 FROM mentorship WHERE member_id = NEW.mentor_id AND number = NEW.mark AND created_at <= NEW.created_at)
+  (SELECT 1 FROM mentorship WHERE member_id = NEW.mentor_id AND number = NEW.mark AND created_at <= NEW.created_at
+   AND (ended_at IS NULL OR ended_at > NEW.created_at))
 BEGIN SELECT raise(ABORT, 'law: only those to whom mentorship was granted stamp'); END;
 
 CREATE TRIGGER stamp_not_for_one_serial BEFORE INSERT ON stamp

@@ -1,10 +1,10 @@
 // Applies drizzle/ and puts the laws back. The only thing that migrates; a server start merely checks.
 import 'server-only'
 import { createHash } from 'node:crypto'
-import { mkdirSync, readFileSync } from 'node:fs'
+import { readFileSync } from 'node:fs'
 import path from 'node:path'
 import { migrate } from 'drizzle-orm/libsql/migrator'
-import { openDatabase, type Database } from './client'
+import type { Database } from './client'
 
 const root = process.cwd()
 const lawsFile = path.join(root, 'db', 'laws.sql')
@@ -43,13 +43,4 @@ export async function migrateDatabase(database: Database): Promise<void> {
     `BEGIN IMMEDIATE;\n${drops}\n${readFileSync(lawsFile, 'utf8')}\n` +
     `INSERT INTO setting (key, value) VALUES ('laws', '${laws}') ON CONFLICT (key) DO UPDATE SET value = excluded.value;\nCOMMIT;`,
   )
-}
-
-if (process.argv[1]?.endsWith(path.join('db', 'migrate.ts'))) {
-  const directory = path.resolve(process.env['DATA_DIR'] ?? 'data')
-  mkdirSync(directory, { recursive: true })
-  const database = await openDatabase(path.join(directory, 'pilothole.db'))
-  await migrateDatabase(database)
-  database.close()
-  console.log(`Schema ${expectedSchema().tag} in ${directory}`)
 }

@@ -18,7 +18,6 @@ export class DatabaseBusyError extends Error {
   }
 }
 
-const queues = new WeakMap<Database, Promise<unknown>>()
 const deadlineMs = 10_000
 
 /**
@@ -62,12 +61,12 @@ async function appendAudit(tx: Transaction, meta: WriteMeta, rows: { verb: strin
 }
 
 function enqueue<T>(database: Database, work: (tx: Transaction) => Promise<T>): Promise<T> {
-  const before = queues.get(database) ?? Promise.resolve()
+  const before = database.queue.last
   // The driver is synchronous, so its promises settle without ever leaving the microtask queue: a hundred queued writes
   // would hold the event loop as one (measured: 130 ms). One turn of the loop between two transactions lets others in.
   const mine = before.then(() => new Promise((resolve) => setImmediate(resolve))).then(() => begin(database, work))
   // The queue goes on after a failure; only the caller sees the error.
-  queues.set(database, mine.catch(() => undefined))
+  database.queue.last = mine.catch(() => undefined)
   return mine
 }
 
@@ -76,7 +75,7 @@ async function begin<T>(database: Database, work: (tx: Transaction) => Promise<T
   for (let tries = 0; ; tries++) {
     let begun = false
     try {
-      return await database.reader.transaction(async (tx) => {
+      return await database.writer.transaction(async (tx) => {
         begun = true
         return await work(tx)
       }, { behavior: 'immediate' })

@@ -1,7 +1,10 @@
 // The only reader of process.env. Parsed once at start; a bad or missing setting stops the start and is named.
 import { readFileSync } from 'node:fs'
 import path from 'node:path'
+import nextEnv from '@next/env'
 import { z } from 'zod'
+
+const { loadEnvConfig } = nextEnv
 
 const flag = (fallback: boolean) => z.enum(['on', 'off'], 'must be on or off').default(fallback ? 'on' : 'off').transform((v) => v === 'on')
 const whole = (fallback: number, min: number, max: number) => z.string().regex(/^[0-9]+$/, 'must be a whole number').default(String(fallback))
@@ -42,6 +45,8 @@ let parsed: Env | undefined
 /** The settings, parsed at first use. Throws SettingsError. */
 export function env(): Env {
   if (!parsed) {
+    // The framework reads .env for the server; scripts read the same file here.
+    loadEnvConfig(process.cwd(), false, { info: () => undefined, error: console.error })
     parsed = readEnv(process.env)
     // next-auth reads its own address from here and warns without it.
     process.env['NEXTAUTH_URL'] ??= parsed.publicUrl

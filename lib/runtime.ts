@@ -3,6 +3,7 @@ import 'server-only'
 import { openDatabase, type Database } from '@/db/client'
 import { env } from './env'
 import { createRenderer, type Renderer } from './render/renderer'
+import { logError } from './log'
 import type { SearchDoor } from './search/messages'
 import { openSearch } from './search/open-search'
 import { workerFile } from './worker-file'
@@ -23,6 +24,6 @@ async function open(): Promise<Runtime> {
   return {
     database,
     renderer: createRenderer({ workerFile: workerFile('render') }),
-    search: openSearch({ database, workerFile: workerFile('search') }),
+    search: openSearch({ database, workerFile: workerFile('search'), onError: (error) => logError('search', error) }),
   }
 }

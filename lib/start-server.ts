@@ -5,7 +5,10 @@ import { openDatabase } from '@/db/client'
 import { schemaMismatch } from '@/db/migrate'
 import { env, SettingsError } from './env'
 import { watchClientAddresses } from './http/client-address'
+import { systemClock } from './clock'
+import { logError, logInfo } from './log'
 import { runtime } from './runtime'
+import { noteRulesVersion, reapplyRules } from './services/cautions/reapply-rules'
 
 /** Checks settings and schema, then opens database, search and renderer. Exits with 1 when something does not fit. */
 export async function startServer(): Promise<void> {
@@ -20,5 +23,8 @@ export async function startServer(): Promise<void> {
     process.exit(1)
   }
   watchClientAddresses()
-  await runtime()
+  const { database } = await runtime()
+  await noteRulesVersion(database)
+  // Beside the first requests, not before them: what was judged by an older table warned already, by that table.
+  reapplyRules(database, systemClock()).then((n) => { if (n > 0) logInfo('cautions.reapply', { entries: n }) }, (error: unknown) => logError('cautions.reapply', error))
 }

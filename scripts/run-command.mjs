@@ -32,6 +32,6 @@ export function run(command, args, { env = {} } = {}) {
 /** Runs a script of this Node. */
 export const runNode = (args, options) => run(process.execPath, args, options)
 
-/** Runs one of our TypeScript entries (`db/migrate.ts`); the condition makes `server-only` a mere mark. */
+/** Runs one of our TypeScript entries (`scripts/migrate.ts`); the condition makes `server-only` a mere mark. */
 export const runTypeScript = (file, args = [], options) =>
   runNode([bin('tsx', 'dist/cli.mjs'), '--conditions=react-server', file, ...args], options)

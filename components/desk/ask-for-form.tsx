@@ -1,6 +1,6 @@
 'use client'
 // "Or ask for": one of four things that are missing before a stamp. Pressed, the tag leaves the rail until its author answers.
-import { useForm, type FormAction } from '@/components/entries/use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { askForButtons } from './ask-for-words'

@@ -12,7 +12,7 @@ import type { Answer } from '@/lib/schemas/post'
 import { Acknowledge } from './acknowledge'
 import { ConflictNotice } from './conflict-notice'
 import { DraftNotice } from './draft-notice'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 const WritingAid = dynamic(() => import('./writing-aid'), { ssr: false })
 
@@ -29,7 +29,7 @@ export function AnswerForm({ action, question, initial, submission, memberId }: 
   const { state, submit, isPending, form, errorOf } = useForm(action)
   const isEdit = one(initial, 'answerId') !== ''
   const isRefused = state.message !== ''
-  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${isEdit ? `answer-${one(initial, 'answerId')}` : `say-${question.id}`}`, isRefused)
+  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${isEdit ? `answer-${one(initial, 'answerId')}` : `say-${question.id}`}`, state)
   const values: FormValues = isRefused ? { ...initial, ...state.values } : restored ? { ...initial, ...restored.values } : initial
   const [body, setBody] = useState<string | null>(null)
   const present = state.current as Answer | undefined
@@ -47,7 +47,7 @@ export function AnswerForm({ action, question, initial, submission, memberId }: 
         <TextArea id="answer-body" name="body" label="What to do, step by step" rows={8} maxLength={20000} required defaultValue={one(values, 'body')} error={errorOf('body')}
           help="Markdown works: lists, tables, emphasis. On a critical part the advice is: stop, measure, ask the kit maker." />
         <Select id="answer-reply" name="makerReply" label="Does it pass on a kit maker’s written reply?" optional defaultValue={one(values, 'makerReply')} key={`reply-${one(values, 'makerReply')}`} error={errorOf('makerReply')}>
-          <option value="">No</option>
+          <option value={isEdit ? 'none' : ''}>No</option>
           <option value="bulletin">Yes, a bulletin</option>
           <option value="all-kits">Yes, good for all kits</option>
           <option value="one-serial">Yes, for one serial only</option>

@@ -15,7 +15,7 @@ import { Acknowledge } from './acknowledge'
 import { ConflictNotice } from './conflict-notice'
 import { DraftNotice } from './draft-notice'
 import { HardwareFields, OrderAdviceFields, PlaceFields, PlansFields, TaskFields, type FormPlaces } from './place-fields'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 const WritingAid = dynamic(() => import('./writing-aid'), { ssr: false })
 
@@ -38,7 +38,7 @@ const help: Record<string, string> = {
 export function EntryForm({ action, kind, places, initial, editing, submission, memberId }: EntryFormProps) {
   const { state, submit, isPending, form, errorOf } = useForm(action)
   const isRefused = state.message !== ''
-  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${editing ? `entry-${editing.id}` : kind}`, isRefused)
+  const { restored, generation, throwAway } = useDraft(form, `draft:${memberId}:${editing ? `entry-${editing.id}` : kind}`, state)
   const values: FormValues = isRefused ? { ...initial, ...state.values } : restored ? { ...initial, ...restored.values } : initial
   const [writing, setWriting] = useState<FormValues | null>(null)
   const now = writing ?? values

@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { ChoiceGroup, RadioRow } from '@/components/ui/radio-row'
 import { TextArea } from '@/components/ui/text-area'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 export interface OutcomeFormProps { action: FormAction; postId: number; revision: string; critical: boolean; told: { result: string; note: string } | null }
 

@@ -36,6 +36,7 @@ export function PlaceFields({ places, values, error }: FieldsProps) {
         <option value="">No other section</option>
         <SectionOptions places={places} />
       </Select>
+      {many(values, 'more').map((code) => <input key={code} type="hidden" name="more" value={code} />)}
     </>
   )
 }

@@ -2,7 +2,7 @@
 // "I'm going by this": one button, pressed before the act; pressed again it is taken off.
 import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
-import { useForm, type FormAction } from './use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 
 export function RelianceForm({ action, postId, revision, goesBy }: { action: FormAction; postId: number; revision: string; goesBy: string | null }) {
   const { state, submit, isPending, form } = useForm(action)

@@ -1,6 +1,6 @@
 'use client'
 // Makes a personal token and shows it, once: it is stored hashed and cannot be read again.
-import { useForm, type FormAction } from '@/components/entries/use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { NoticeLine } from '@/components/ui/notice-line'

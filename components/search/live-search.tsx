@@ -4,7 +4,7 @@ import { QueryClient, QueryClientProvider, keepPreviousData, useQuery } from '@t
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useRouter } from 'next/navigation'
-import { useEffect, useMemo, useState, type RefObject } from 'react'
+import { useEffect, useMemo, useState, useSyncExternalStore, type RefObject } from 'react'
 import { CautionWord, gravestWord } from '@/components/cautions/caution-word'
 import { MarkedSnippet } from '@/components/entries/marked-snippet'
 import { liveResults } from '@/lib/client/queries'
@@ -22,31 +22,33 @@ export default function LiveSearch(props: Props) {
 
 function Results({ input, shown, results }: Props) {
   const router = useRouter()
-  const [typed, setTyped] = useState(() => input.current?.value ?? '')
-  const [isOpen, setOpen] = useState(() => (input.current?.value ?? '') !== shown)
+  const typed = useTyped(input)
+  // Closed for one text; typing on opens it again.
+  const [closedFor, setClosedFor] = useState<string | null>(null)
+  const close = () => setClosedFor(typed)
   const [active, setActive] = useState(-1)
   const words = useRested(typed, 150)
   const { data, error, isFetching } = useQuery({ ...liveResults(words), placeholderData: keepPreviousData })
   const hits = useMemo(() => (words.trim() === '' ? [] : (data?.results ?? [])), [words, data])
-  const isShown = isOpen && typed.trim() !== '' && typed !== shown
+  const isShown = closedFor !== typed && typed.trim() !== '' && typed !== shown
 
   useEffect(() => {
     const field = input.current
     if (!field) return
-    const onInput = () => { setTyped(field.value); setOpen(true); setActive(-1) }
+    const onInput = () => { setClosedFor(null); setActive(-1) }
     const onKey = (event: KeyboardEvent) => {
-      if (event.key === 'Escape' && isShown) { event.preventDefault(); setOpen(false) }
+      if (event.key === 'Escape' && isShown) { event.preventDefault(); setClosedFor(field.value) }
       if ((event.key === 'ArrowDown' || event.key === 'ArrowUp') && hits.length > 0) {
         event.preventDefault()
-        setOpen(true)
+        setClosedFor(null)
         setActive((now) => (now + (event.key === 'ArrowDown' ? 1 : hits.length + (now < 0 ? 1 : 0) - 1)) % hits.length)
       }
       const chosen = hits[active]
-      if (event.key === 'Enter' && isShown && chosen) { event.preventDefault(); setOpen(false); router.push(chosen.url as Route) }
+      if (event.key === 'Enter' && isShown && chosen) { event.preventDefault(); setClosedFor(field.value); router.push(chosen.url as Route) }
     }
     const onBlur = (event: FocusEvent) => {
       const next = event.relatedTarget
-      if (!(next instanceof Element) || !next.closest(`#${listId}`)) setOpen(false)
+      if (!(next instanceof Element) || !next.closest(`#${listId}`)) setClosedFor(field.value)
     }
     field.addEventListener('input', onInput)
     field.addEventListener('keydown', onKey)
@@ -65,18 +67,27 @@ function Results({ input, shown, results }: Props) {
       {error ? <p className="live-note" role="status">{error.message}</p> : null}
       {!error && !isFetching && data && hits.length === 0 ? <p className="live-note" role="status">Nothing yet. Press Enter, then “Ask this”.</p> : null}
       <ul role="listbox" aria-label="Results" id={`${listId}-list`}>
-        {hits.map((hit, index) => <Option key={hit.id} hit={hit} isActive={index === active} onPick={() => setOpen(false)} />)}
+        {hits.map((hit, index) => <Option key={hit.id} hit={hit} isActive={index === active} onPick={close} />)}
       </ul>
-      {hits.length > 0 ? <Link className="live-all" href={`${results}?${new URLSearchParams({ q: typed })}` as Route} onClick={() => setOpen(false)}>All results</Link> : null}
+      {hits.length > 0 ? <Link className="live-all" href={`${results}?${new URLSearchParams({ q: typed })}` as Route} onClick={close}>All results</Link> : null}
     </div>
   )
+}
+
+/** What stands in the field. Letters typed while this was being loaded count too, also those between drawing and listening. */
+function useTyped(input: Props['input']): string {
+  return useSyncExternalStore((changed) => {
+    const field = input.current
+    field?.addEventListener('input', changed)
+    return () => field?.removeEventListener('input', changed)
+  }, () => input.current?.value ?? '', () => '')
 }
 
 function Option({ hit, isActive, onPick }: { hit: Hit; isActive: boolean; onPick: () => void }) {
   const standing = hit.cautions.filter((c) => !c.waived)
   return (
-    <li id={`live-${hit.id}`} role="option" aria-selected={isActive}>
-      <Link href={hit.url as Route} tabIndex={-1} onClick={onPick}>
+    <li role="none">
+      <Link id={`live-${hit.id}`} role="option" aria-selected={isActive} href={hit.url as Route} tabIndex={-1} onClick={onPick}>
         <span className="label">{hitKindLine(hit)}</span>
         <b>{hit.title}</b>
         {standing.length > 0 ? <span className="live-caution"><CautionWord word={gravestWord(standing.map((c) => c.signalWord))} /> {[...new Set(standing.map((c) => c.title))].join(', ')}</span> : null}

@@ -2,7 +2,7 @@
 // Pressing a stamp: what makes the mentor sure, with the fields each basis needs, and the button on the empty place. Plain radios and
 // fields: where the style sheet can tell, only the chosen basis shows its fields; elsewhere all of them do.
 import type { ReactNode } from 'react'
-import { useForm, type FormAction } from '@/components/entries/use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 import { Button } from '@/components/ui/button'
 import { Checkbox } from '@/components/ui/checkbox'
 import { ErrorSummary } from '@/components/ui/error-summary'

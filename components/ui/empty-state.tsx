@@ -6,11 +6,12 @@ export interface EmptyStateProps {
   children?: ReactNode
   /** The next step: one or two buttons. */
   action?: ReactNode
-  level?: 2 | 3
+  /** 1 where it is the whole page. */
+  level?: 1 | 2 | 3
 }
 
 export function EmptyState({ title, children, action, level = 2 }: EmptyStateProps) {
-  const Heading = level === 2 ? 'h2' : 'h3'
+  const Heading = `h${level}` as const
   return (
     <div className="empty-state">
       <Heading>{title}</Heading>

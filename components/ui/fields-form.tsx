@@ -1,7 +1,7 @@
 'use client'
 // A small form of plain fields and one button, described as data by the page: errors in words, what was typed stays, and it works
 // without JavaScript. Forms that need more than fields in a column have files of their own.
-import { useForm, type FormAction } from '@/components/entries/use-form'
+import { useForm, type FormAction } from '@/components/ui/use-form'
 import { Button, type ButtonLook } from './button'
 import { ErrorSummary } from './error-summary'
 import { NoticeLine } from './notice-line'

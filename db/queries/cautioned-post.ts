@@ -1,10 +1,11 @@
 // The only door through which a post's text leaves the database: always with its cautions, always with its evidence.
-// A fixed number of queries, whatever the number of posts.
+// A fixed number of queries, whatever the number of posts (pieces of 200).
 import 'server-only'
-import { and, asc, count, eq, inArray, sql } from 'drizzle-orm'
-import { alias } from 'drizzle-orm/sqlite-core'
+import { asc, eq, sql } from 'drizzle-orm'
 import type { ReaderOrTransaction } from '../client'
-import { kit, member, outcome, post, postCaution, reliance, remark, rendering, revision, section, stamp } from '../schema'
+import { post, remark, revision, type outcome, type postCaution, type rendering, type stamp } from '../schema'
+import { oneOf } from './one-of'
+import { listRenderings } from './renderings'
 
 declare const cautioned: unique symbol
 type Row<T extends { $inferSelect: object }> = T['$inferSelect']
@@ -35,7 +36,6 @@ export interface CautionedPost {
   revisions: { number: number; author: PersonName; createdAt: number }[]
   cautions: Row<typeof postCaution>[]
   stamps: Row<typeof stamp>[]
-  stampMentors: Map<number, string>
   outcomes: { memberId: number; author: string; revision: number; result: Row<typeof outcome>['result']; note: string; createdAt: number }[]
   goingByThis: number
   remarks: { id: number; author: PersonName; body: string; createdAt: number }[]
@@ -52,8 +52,8 @@ export const remarkRenderingKey = (remarkId: number) => `remark:${remarkId}`
 /** Posts by id with everything that hangs on them, in the order of `ids`; unknown ids are left out. */
 export async function listCautionedPosts(reader: ReaderOrTransaction, ids: readonly number[]): Promise<CautionedPost[]> {
   const found = new Map<number, CautionedPost>()
-  // SQLite takes at most 32,766 variables; pieces keep every statement well below.
-  for (let start = 0; start < ids.length; start += 500) await loadInto(found, reader, ids.slice(start, start + 500))
+  // In pieces, because a statement holds the event loop until it is read.
+  for (let start = 0; start < ids.length; start += 200) await loadInto(found, reader, ids.slice(start, start + 200))
   return ids.flatMap((id) => found.get(id) ?? [])
 }
 
@@ -65,58 +65,63 @@ export async function getCautionedPost(reader: ReaderOrTransaction, id: number):
 /** Ids of a question's answers, oldest first, whatever their state. */
 export async function listAnswerIds(reader: ReaderOrTransaction, questionIds: readonly number[]): Promise<{ id: number; parentId: number | null }[]> {
   if (questionIds.length === 0) return []
-  return reader.select({ id: post.id, parentId: post.parentId }).from(post).where(inArray(post.parentId, [...questionIds])).orderBy(asc(post.id))
+  return reader.select({ id: post.id, parentId: post.parentId }).from(post).where(oneOf(post.parentId, questionIds)).orderBy(asc(post.id))
 }
 
-const writer = alias(member, 'writer')
+/** A name, the plain name kept from an import, or neither: then the account is gone. */
+const person = (id: number | null, account: { name: string } | null, plainName: string | null): PersonName => ({ id, name: account?.name ?? plainName ?? 'former member' })
+
+/** One statement for everything but the renderings: all of one moment, and built once a reader, because building it costs as much as running it. */
+function prepareLoad(reader: ReaderOrTransaction) {
+  const name = { columns: { name: true } } as const
+  return reader.query.post.findMany({
+    where: oneOf(post.id, sql.placeholder('ids')),
+    with: {
+      author: name, current: { with: { kit: { columns: { slug: true, name: true, maker: true } } } },
+      placed: { columns: { position: true }, with: { section: { columns: { code: true, title: true, jasc: true } } } },
+      revisions: { columns: { number: true, authorId: true, authorName: true, createdAt: true }, with: { author: name } },
+      cautions: true, stamps: true, outcomes: { with: { member: name } }, reliances: { columns: { memberId: true } },
+      remarks: { columns: { id: true, authorId: true, authorName: true, body: true, createdAt: true }, where: eq(remark.state, 'visible'), with: { author: name } },
+    },
+  }).prepare()
+}
+
+type Loaded = Awaited<ReturnType<ReturnType<typeof prepareLoad>['execute']>>[number]
+const prepared = new WeakMap<ReaderOrTransaction, ReturnType<typeof prepareLoad>>()
+
+function preparedLoad(reader: ReaderOrTransaction): ReturnType<typeof prepareLoad> {
+  const known = prepared.get(reader) ?? prepareLoad(reader)
+  prepared.set(reader, known)
+  return known
+}
 
 async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTransaction, ids: readonly number[]): Promise<void> {
   if (ids.length === 0) return
-  const list = [...ids]
-  const posts = await reader
-    .select({ post, current: revision, kit: { slug: kit.slug, name: kit.name, maker: kit.maker }, authorName: writer.name, rendering })
-    .from(post)
-    .innerJoin(revision, and(eq(revision.postId, post.id), eq(revision.number, post.currentRevision)))
-    .leftJoin(kit, eq(kit.id, revision.kitId))
-    .leftJoin(writer, eq(writer.id, post.authorId))
-    .leftJoin(rendering, eq(rendering.key, sql`'post:' || ${post.id} || ':' || ${post.currentRevision}`))
-    .where(inArray(post.id, list))
-  const [revisions, cautions, stamps, outcomes, reliances, remarks, sections] = await Promise.all([
-    reader.select({ postId: revision.postId, number: revision.number, authorId: revision.authorId, authorName: revision.authorName, name: member.name, createdAt: revision.createdAt })
-      .from(revision).leftJoin(member, eq(member.id, revision.authorId)).where(inArray(revision.postId, list)).orderBy(asc(revision.number)),
-    reader.select().from(postCaution).where(inArray(postCaution.postId, list)),
-    reader.select({ stamp, name: member.name }).from(stamp).leftJoin(member, eq(member.id, stamp.mentorId)).where(inArray(stamp.postId, list)).orderBy(asc(stamp.id)),
-    reader.select({ postId: outcome.postId, memberId: outcome.memberId, author: member.name, revision: outcome.revision, result: outcome.result, note: outcome.note, createdAt: outcome.createdAt })
-      .from(outcome).innerJoin(member, eq(member.id, outcome.memberId)).where(inArray(outcome.postId, list)).orderBy(asc(outcome.createdAt)),
-    reader.select({ postId: reliance.postId, n: count() }).from(reliance).where(inArray(reliance.postId, list)).groupBy(reliance.postId),
-    reader.select({ remark, name: member.name }).from(remark).leftJoin(member, eq(member.id, remark.authorId))
-      .where(and(inArray(remark.postId, list), eq(remark.state, 'visible'))).orderBy(asc(remark.id)),
-    reader.select({ kitId: section.kitId, code: section.code, title: section.title, jasc: section.jasc }).from(section)
-      .where(inArray(section.kitId, posts.flatMap((p) => p.current.kitId ?? []))),
-  ])
-  for (const row of posts) {
-    const of = <T extends { postId: number }>(rows: T[]) => rows.filter((r) => r.postId === row.post.id)
-    const own = of(revisions)
-    found.set(row.post.id, {
-      id: row.post.id, kind: row.post.kind, parentId: row.post.parentId, ref: row.post.ref, state: row.post.state,
-      stateReason: row.post.stateReason, stampState: row.post.stampState, needsTwo: row.post.needsTwo,
-      createdAt: row.post.createdAt, updatedAt: row.post.updatedAt,
-      author: { id: row.post.authorId, name: row.authorName ?? row.post.authorName ?? 'former member' },
-      authorIds: [...new Set(own.flatMap((r) => r.authorId ?? []))],
-      current: row.current, kit: row.kit,
-      sections: row.current.sections.flatMap((code) => sections.find((s) => s.kitId === row.current.kitId && s.code === code) ?? []),
-      revisions: own.map((r) => ({ number: r.number, author: { id: r.authorId, name: r.name ?? r.authorName ?? 'former member' }, createdAt: r.createdAt })),
-      cautions: of(cautions),
-      stamps: stamps.map((s) => s.stamp).filter((s) => s.postId === row.post.id),
-      stampMentors: new Map(stamps.flatMap((s) => (s.stamp.mentorId !== null ? [[s.stamp.mentorId, s.name ?? 'former member'] as const] : []))),
-      outcomes: of(outcomes),
-      goingByThis: of(reliances)[0]?.n ?? 0,
-      remarks: remarks.filter((r) => r.remark.postId === row.post.id)
-        .map((r) => ({ id: r.remark.id, author: { id: r.remark.authorId, name: r.name ?? r.remark.authorName ?? 'former member' }, body: r.remark.body, createdAt: r.remark.createdAt })),
-      rendering: row.rendering,
-    } as unknown as CautionedPost)
-  }
+  const loaded = await preparedLoad(reader).execute({ ids: JSON.stringify(ids) })
+  // A rendering belongs to one revision and never changes, so it may be read a moment later.
+  const renderings = new Map((await listRenderings(reader, loaded.map((row) => renderingKey(row.id, row.currentRevision)))).map((r) => [r.key, r]))
+  for (const row of loaded) found.set(row.id, caution(row, renderings.get(renderingKey(row.id, row.currentRevision)) ?? null))
 }
+
+/** Gives the brand: the one place that may. */
+function caution(row: Loaded, kept: Row<typeof rendering> | null): CautionedPost {
+  const { author, authorName, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, ...own } = row
+  const { id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt } = own
+  const history = [...revisions].sort((a, b) => a.number - b.number)
+  return {
+    id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt, author: person(row.authorId, author, authorName),
+    authorIds: [...new Set(history.flatMap((r) => r.authorId ?? []))],
+    current, kit: ofKit, sections: [...placed].sort((a, b) => a.position - b.position).map((p) => p.section),
+    revisions: history.map((r) => ({ number: r.number, author: person(r.authorId, r.author, r.authorName), createdAt: r.createdAt })),
+    cautions, stamps: [...stamps].sort(byId),
+    outcomes: [...outcomes].sort((a, b) => a.createdAt - b.createdAt).map(({ member: teller, memberId, revision: number, result, note, createdAt: at }) => ({ memberId, author: teller.name, revision: number, result, note, createdAt: at })),
+    goingByThis: reliances.length,
+    remarks: [...remarks].sort(byId).map((r) => ({ id: r.id, author: person(r.authorId, r.author, r.authorName), body: r.body, createdAt: r.createdAt })),
+    rendering: kept,
+  } as unknown as CautionedPost
+}
+
+const byId = (a: { id: number }, b: { id: number }) => a.id - b.id
 
 /** A post with every revision's text: history leaves with its cautions like everything else. */
 export async function getCautionedHistory(reader: ReaderOrTransaction, id: number): Promise<{ found: CautionedPost; history: Row<typeof revision>[] } | null> {

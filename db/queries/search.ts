@@ -23,6 +23,12 @@ export async function listVisibleEntryIds(reader: ReaderOrTransaction, afterId: 
   return rows.map((r) => r.id)
 }
 
+/** Ids of entries in any state after `afterId`, ascending. */
+export async function listEntryIdsFrom(reader: ReaderOrTransaction, afterId: number, limit: number): Promise<number[]> {
+  const rows = await reader.select({ id: post.id }).from(post).where(and(isNull(post.parentId), gt(post.id, afterId))).orderBy(asc(post.id)).limit(limit)
+  return rows.map((r) => r.id)
+}
+
 /** How many visible entries there are. */
 export async function countVisibleEntries(reader: ReaderOrTransaction): Promise<number> {
   const [row] = await reader.select({ n: sql<number>`count(*)` }).from(post).where(and(isNull(post.parentId), eq(post.state, 'visible')))

@@ -11,6 +11,10 @@ export const member = sqliteTable('member', {
   passwordHash: text(),
   role: text({ enum: ['member', 'moderator', 'steward'] }).notNull().default('member'),
   state: text({ enum: ['active', 'suspended', 'closed'] }).notNull().default('active'),
+  /** Why, by whom and when the state was set last. Words about people stay out of the audit trail. */
+  stateReason: text(),
+  stateBy: integer(),
+  stateAt: moment(),
   /** Raised by a password change: sessions made before it end. */
   sessionEpoch: integer().notNull().default(0),
   createdAt: moment().notNull(),

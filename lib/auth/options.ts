@@ -4,6 +4,7 @@ import type { NextAuthOptions } from 'next-auth'
 import Credentials from 'next-auth/providers/credentials'
 import { contextFor } from '@/lib/context'
 import { env } from '@/lib/env'
+import { logInfo } from '@/lib/log'
 import { authenticate } from '@/lib/services/people/authenticate'
 
 export const sessionMaxAgeSeconds = 30 * 24 * 3600
@@ -12,6 +13,8 @@ export const sessionMaxAgeSeconds = 30 * 24 * 3600
 export function authOptions(): NextAuthOptions {
   return {
     secret: env().secret,
+    // Anybody can send a cookie that does not open: one quiet line, not a stack.
+    logger: { error: (code) => logInfo('auth.refused', { code }), warn: (code) => logInfo('auth.warning', { code }), debug: () => undefined },
     session: { strategy: 'jwt', maxAge: sessionMaxAgeSeconds },
     useSecureCookies: env().publicUrl.startsWith('https:'),
     pages: { signIn: '/sign-in', error: '/sign-in' },

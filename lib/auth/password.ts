@@ -5,8 +5,6 @@ import { hash, verify } from '@node-rs/argon2'
 // OWASP Password Storage Cheat Sheet: argon2id, m = 19 MiB, t = 2, p = 1. Argon2id is the library's default algorithm.
 const parameters = { memoryCost: 19_456, timeCost: 2, parallelism: 1 }
 
-export const passwordLimits = { min: 10, max: 200 } as const
-
 export const hashPassword = (password: string): Promise<string> => hash(password, parameters)
 
 // A stored hash nobody knows: an unknown e-mail takes as long as a wrong password.

@@ -14,7 +14,7 @@ async function readJson<T>(url: string, signal: AbortSignal, body?: unknown): Pr
   return (await response.json()) as T
 }
 
-export interface WritingText { title: string; body: string; kit?: string | undefined; tasks: string[]; sections: string[]; hardware: string[]; questionId?: number | undefined }
+export interface WritingText { title: string; body: string; kit?: string | undefined; tasks: string[]; sections: string[]; hardware: string[] }
 
 /** Results while typing: the first six. */
 export const liveResults = (words: string) => queryOptions({

@@ -1,24 +1,25 @@
 // Keeps what is being written on this device, for this member and this form, and brings it back.
 import { useCallback, useEffect, useRef, useSyncExternalStore, type RefObject } from 'react'
+import type { FormState } from '@/lib/form-state'
 import { formValues, type FormValues } from './form-values'
 
 interface Kept { savedAt: number; values: FormValues }
 const saveAfterMs = 400
 
 /** `restored` is what was kept when the form came up; fields are drawn again from it under the key `generation`. */
-export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, isRefused: boolean) {
+export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, state: FormState) {
   const restored = useSyncExternalStore(subscribe, () => keptAtFirst(key), () => null)
-  const isSent = useRef(false)
-  const refused = useRef(isRefused)
+  /** The address the form was sent from; null when it was not sent, or came back refused. */
+  const sentFrom = useRef<string | null>(null)
 
   useEffect(() => {
-    refused.current = isRefused
-    if (isRefused) isSent.current = false
-  }, [isRefused])
+    sentFrom.current = null
+  }, [state])
 
   useEffect(() => () => {
-    // A form that was sent and went away without a refusal was accepted: its draft has done its work.
-    if (isSent.current && !refused.current) localStorage.removeItem(key)
+    // Sent and then led on to another address: it was posted, and the draft has done its work. A form that went away any other
+    // way, such as into the error page when the connection is gone, keeps its draft.
+    if (sentFrom.current !== null && sentFrom.current !== location.href) localStorage.removeItem(key)
     atFirst.delete(key)
   }, [key])
 
@@ -28,7 +29,7 @@ export function useDraft(form: RefObject<HTMLFormElement | null>, key: string, i
     let timer: ReturnType<typeof setTimeout> | undefined
     const save = () => keep(key, { savedAt: Date.now(), values: formValues(element) })
     const onInput = () => { clearTimeout(timer); timer = setTimeout(save, saveAfterMs) }
-    const onSubmit = () => { clearTimeout(timer); save(); isSent.current = true }
+    const onSubmit = () => { clearTimeout(timer); save(); sentFrom.current = location.href }
     element.addEventListener('input', onInput)
     element.addEventListener('submit', onSubmit)
     return () => {

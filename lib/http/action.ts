@@ -1,5 +1,6 @@
 // The one wrapper in front of every form action: signed-in member, origin, haste, parsing, repeats; and how refusals come back.
 import 'server-only'
+import { refresh } from 'next/cache'
 import { headers } from 'next/headers'
 import { redirect } from 'next/navigation'
 import type { Route } from 'next'
@@ -43,7 +44,7 @@ export async function carryOut<T>({ form, schema, read, run, done, once: route }
     const key = form.get('submission')
     const perform = async () => ({ status: 200, body: JSON.stringify(await run(context, parsed.data)) })
     const answered = route && actor && typeof key === 'string' && /^[\w-]{8,64}$/.test(key)
-      ? await once(context, { memberId: actor.id, route: `form ${route}`, key, bodyText: JSON.stringify(parsed.data) }, perform)
+      ? await once(context, { memberId: actor.id, route: `form ${route}`, key, bodyText: JSON.stringify(parsed.data), otherBody: 'This form was posted before. Open the page anew to post another text; copy yours first.' }, perform)
       : await perform()
     next = JSON.parse(answered.body) as Route | null
   } catch (error) {
@@ -51,7 +52,11 @@ export async function carryOut<T>({ form, schema, read, run, done, once: route }
     if (!expected) throw error
     return { message: expected.message, code: expected.code, errors: expected.errors.map((e) => ({ ...e, path: e.path.replace(/^input\./, '') })), values: typedValues(form), ...(expected.current !== undefined ? { current: expected.current } : {}), ...(expected.cautions !== undefined ? { cautions: expected.cautions as Caution[] } : {}) }
   }
-  if (next !== null) redirect(next)
+  if (next !== null) {
+    // Going to a row of the page one is on changes the address only: without this the page would stay as it was.
+    refresh()
+    redirect(next)
+  }
   return { message: '', errors: [], values: {}, done: done ?? 'Done.' }
 }
 

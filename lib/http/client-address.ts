@@ -13,9 +13,22 @@ const header = 'x-client-address'
 export function watchClientAddresses(): void {
   subscribe('http.server.request.start', (message) => {
     const { request } = message as { request: IncomingMessage }
+    if (!isDecodable(request.url)) request.url = unreadableAddress
     const forwarded = env().TRUST_PROXY ? String(request.headers['x-forwarded-for'] ?? '').split(',').at(-1)?.trim() : undefined
     request.headers[header] = forwarded || request.socket.remoteAddress || 'unknown'
   })
+}
+
+/** Where a request goes whose address is not percent-encoded UTF-8: the framework would answer it with an error of its own. */
+const unreadableAddress = '/api/unreadable-address'
+
+function isDecodable(url: string | undefined): boolean {
+  try {
+    decodeURIComponent((url ?? '').split('?')[0] ?? '')
+    return true
+  } catch {
+    return false
+  }
 }
 
 export const clientAddress = (headers: Headers): string => headers.get(header) ?? 'unknown'

@@ -13,13 +13,20 @@ const abandonedMs = 30_000
 const underWay = 0
 
 export interface Answered { status: number; body: string }
-interface Key { memberId: number; route: string; key: string; bodyText: string }
+interface Key {
+  memberId: number
+  route: string
+  key: string
+  bodyText: string
+  /** What to say when the key was used with another body. */
+  otherBody?: string
+}
 
 /**
  * The first answer under this key: run now, or replayed. 422 for the same key with another body; 409 while the first is under way.
  * An answer of 5xx or a thrown error is not kept, so that it can be tried again.
  */
-export async function once(context: AppContext, { memberId, route, key, bodyText }: Key, run: () => Promise<Answered>): Promise<Answered> {
+export async function once(context: AppContext, { memberId, route, key, bodyText, otherBody = 'This Idempotency-Key was used with another body.' }: Key, run: () => Promise<Answered>): Promise<Answered> {
   const bodyHash = createHash('sha256').update(bodyText).digest('hex')
   const mine = and(eq(idempotency.memberId, memberId), eq(idempotency.route, route), eq(idempotency.key, key))
   const kept = await writeQuietly(context.database, async (tx) => {
@@ -31,7 +38,7 @@ export async function once(context: AppContext, { memberId, route, key, bodyText
     return null
   })
   if (kept) {
-    if (kept.bodyHash !== bodyHash) throw new AppError('invalid', 'This Idempotency-Key was used with another body.')
+    if (kept.bodyHash !== bodyHash) throw new AppError('invalid', otherBody)
     if (kept.status === underWay) throw new AppError('conflict', 'The same request is under way. Try again in a moment.', { retryAfterSeconds: 1 })
     return { status: kept.status, body: kept.body }
   }

@@ -4,16 +4,21 @@ import { AppError } from '@/lib/errors'
 
 export const jsonMaxBytes = 1_000_000
 
-/** The bytes of the body. 413 past `maxBytes`, without reading on. */
+/** The bytes of the body. 413 past `maxBytes`, without reading on; 400 when it breaks off. */
 export async function readBytes(request: Request, maxBytes: number): Promise<Uint8Array> {
   const tooLarge = () => new AppError('too-large', `At most ${maxBytes.toLocaleString('en')} bytes.`)
   if (Number(request.headers.get('content-length') ?? 0) > maxBytes) throw tooLarge()
   const pieces: Uint8Array[] = []
   let size = 0
-  for await (const piece of request.body ?? []) {
-    size += piece.byteLength
-    if (size > maxBytes) throw tooLarge()
-    pieces.push(piece)
+  try {
+    for await (const piece of request.body ?? []) {
+      size += piece.byteLength
+      if (size > maxBytes) throw tooLarge()
+      pieces.push(piece)
+    }
+  } catch (error) {
+    // Who went away in the middle of sending made no error of ours.
+    throw error instanceof AppError ? error : new AppError('malformed', 'The body did not arrive whole.')
   }
   return Buffer.concat(pieces)
 }

@@ -17,7 +17,7 @@ export function readEntryForm(form: FormData, kind: 'question' | 'lesson') {
   const parts = Object.fromEntries((kind === 'question' ? questionParts : lessonParts).map(([name]) => [name, field(form, name)]))
   const hasParts = Object.values(parts).some((v) => v.trim() !== '')
   return {
-    kind, kit, sections: [section, ...(also && alsoKit === kit && also !== section ? [also] : [])].filter((s) => s !== ''),
+    kind, kit, sections: [section, ...(also && alsoKit === kit && also !== section ? [also] : []), ...fields(form, 'more')].filter((s) => s !== ''),
     tasks: fields(form, 'task'), hardware: fields(form, 'hardware'), title: field(form, 'title'),
     plans: column(form, 'planPage').flatMap((page, i) => page ? [{ page, ...(steps[i] ? { step: steps[i] } : {}), ...(revisions[i] ? { revision: revisions[i] } : {}) }] : []),
     orderAdvice: column(form, 'before').flatMap((before, i) => before && after[i] ? [{ before, after: after[i] }] : []),

@@ -18,6 +18,7 @@ import { once } from './once'
 import { requireSameOrigin } from './origin'
 import { asAppError, invalid, problem } from './problem'
 import { countRequest, rateHeaders } from './rate-limit'
+import { securityHeaders } from './security-headers'
 import { readJson } from './read-body'
 import { readUpload, type Upload } from './read-upload'
 
@@ -80,7 +81,7 @@ export function routes(methods: Partial<Record<Method, Endpoint<unknown, unknown
 }
 
 async function answer(request: Request, route: RouteContext, method: Method, declared: Endpoint<unknown, unknown>): Promise<Response> {
-  let headers: Record<string, string> = { 'cache-control': 'no-store' }
+  let headers: Record<string, string> = { ...securityHeaders, 'cache-control': 'no-store' }
   try {
     const { actor, isBearer } = await whoAsks(request)
     const key = actor ? `member:${actor.id}` : `address:${clientAddress(request.headers)}`

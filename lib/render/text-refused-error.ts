@@ -4,6 +4,11 @@
 export class TextRefusedError extends Error {
   override readonly name = 'TextRefusedError'
 
+  /** By name: the framework bundles this file more than once, and the renderer of one bundle throws into another. */
+  static override [Symbol.hasInstance](value: unknown): value is TextRefusedError {
+    return value instanceof Error && value.name === 'TextRefusedError'
+  }
+
   constructor(readonly field: string, message: string) {
     super(message)
   }

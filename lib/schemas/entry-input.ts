@@ -46,6 +46,8 @@ export const newEntrySchema = z.discriminatedUnion('kind', [
 /** Any subset of a new entry, with the revision one started from. The kind never changes. */
 export const entryEditSchema = z.strictObject({
   revision: letter,
+  /** May be repeated from the entry; it never changes. */
+  kind: z.enum(['question', 'lesson']).optional(),
   kit: common.kit.optional(), sections: common.sections.optional(), tasks: z.array(slug).max(limits.list).optional(),
   operations: z.array(slug).max(limits.list).optional(), hardware: z.array(line(80, 'the hardware')).max(limits.list).optional(),
   plans: z.array(plansReference).max(limits.list).optional(), title: common.title.optional(), body: common.body,
@@ -60,7 +62,8 @@ const answerShape = {
   makerReply: replyScopeSchema.optional(),
 }
 export const newAnswerSchema = z.strictObject(answerShape)
-export const answerEditSchema = z.strictObject({ ...answerShape, revision: letter })
+/** `makerReply: 'none'` takes the scope off; left out it stays. */
+export const answerEditSchema = z.strictObject({ ...answerShape, makerReply: z.union([replyScopeSchema, z.literal('none')]).optional(), revision: letter })
 
 export type NewEntry = z.infer<typeof newEntrySchema>
 export type EntryEdit = z.infer<typeof entryEditSchema>

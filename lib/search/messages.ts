@@ -57,6 +57,11 @@ export interface SearchDoor {
 
 /** Thrown by search, similar and suggest while the index loads. */
 export class SearchLoadingError extends Error {
+  /** By name: the framework bundles this file more than once, and the door of one bundle throws into another. */
+  static override [Symbol.hasInstance](value: unknown): value is SearchLoadingError {
+    return value instanceof Error && value.name === 'SearchLoadingError'
+  }
+
   constructor() {
     super('Search is loading')
     this.name = 'SearchLoadingError'

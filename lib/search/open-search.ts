@@ -37,6 +37,7 @@ class Search implements SearchDoor {
   private sequence = 0
   private following: Promise<void> | null = null
   private readonly whenReady = new Set<() => void>()
+  private readonly whenFurther = new Set<() => void>()
   private readonly timer: NodeJS.Timeout
   private readonly onError: (error: unknown) => void
 
@@ -66,7 +67,8 @@ class Search implements SearchDoor {
     const until = performance.now() + longestWaitMs
     while (!this.ready || this.sequence < wanted) {
       // A thread lost on the way is replaced, and the replacement will hold what this one lost.
-      if (this.ready) await this.follow().catch((error: unknown) => { if (!(error instanceof SearchLoadingError)) throw error })
+      // Each step of the run counts, not only its end: while others go on writing it has none.
+      if (this.ready) await Promise.race([this.further(), this.follow().catch((error: unknown) => { if (!(error instanceof SearchLoadingError)) throw error })])
       else await this.waitUntilReady(until - performance.now())
     }
   }
@@ -141,7 +143,12 @@ class Search implements SearchDoor {
         await this.apply(thread, { put, remove, sequence: last ? reached : this.sequence })
       }
       this.sequence = reached
+      wake(this.whenFurther)
     }
+  }
+
+  private further(): Promise<void> {
+    return new Promise((resolve) => this.whenFurther.add(resolve))
   }
 
   private async apply(thread: SearchThread, changes: Changes): Promise<void> {
@@ -164,6 +171,12 @@ class Search implements SearchDoor {
   }
 
   private wakeWaiting(): void {
-    for (const done of [...this.whenReady]) done()
+    wake(this.whenReady)
   }
+}
+
+function wake(waiting: Set<() => void>): void {
+  const all = [...waiting]
+  waiting.clear()
+  for (const done of all) done()
 }

@@ -1,7 +1,6 @@
-// The index itself: MiniSearch over one joined field, the words of the corpus beside it, and the order of what it finds.
+// The index itself: postings, titles and the words of the corpus side by side, and the order of what they find.
 // Lives in the worker thread; knows entries only as SearchDocuments.
 import 'server-only'
-import MiniSearch from 'minisearch'
 import { leastCoverage } from '@/lib/domain/search/least-coverage'
 import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/understand-query'
 import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
@@ -9,36 +8,31 @@ import { Vocabulary } from '@/lib/domain/search/vocabulary'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
 import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
 import { findPassage } from './find-passage'
-import { HeldTerms } from './held-terms'
+import type { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest } from './messages'
+import { Postings } from './postings'
 import { Question } from './question'
 import { TitleIndex } from './title-index'
 
-/** Measured on 1,400 abstracts and on a trade collection: one joined field, no lower bound on term frequency. */
-const bm25 = { k: 1.8, b: 0.7, d: 0 }
 const mostConcepts = 24
 const mostConceptsOfSimilar = 12
 const leastCoverageOfSimilar = 0.25
 /** Entries far below the best one only share a common word with the question. */
 const leastShareOfBest = 0.25
-/** Of more entries than this only those that hold most of the question are scored; the rest follow by what they hold. */
-const mostScored = 1_500
+/** Of more entries than this only those that hold most of the question are scored, of equals those with the best evidence; the rest follow by what they hold. */
+const mostScored = 1_000
+/** A whole title holds so many terms that few entries share the same part of it: fewer are enough to find the nearest. */
+const mostScoredOfSimilar = 300
 /** Postings read for one question; the commonest words are left out beyond it, so that no text takes long. */
 const mostPostings = 120_000
 
-/** MiniSearch knows an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
+/** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
 interface Kept { slot: number; document: SearchDocument; weight: number }
 interface Scored { kept: Kept; coverage: number; score: number }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
-  private readonly mini = new MiniSearch<{ id: number; terms: string }>({
-    fields: ['terms'],
-    tokenize: (text) => text.split('\n'),
-    processTerm: (term) => term,
-    searchOptions: { combineWith: 'OR', bm25 },
-    autoVacuum: { minDirtCount: 50, minDirtFactor: 0.05, batchSize: 100, batchWait: 5 },
-  })
+  private readonly postings = new Postings()
   private readonly kept = new Map<number, Kept>()
   private readonly slots: (Kept | undefined)[] = []
   private readonly freeSlots: number[] = []
@@ -60,7 +54,7 @@ export class SearchIndex {
     this.remove(document.id)
     const terms = termsOfDocument(document, this.synonyms)
     const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
-    this.mini.add({ id: kept.slot, terms: terms.all.join('\n') })
+    this.postings.add(kept.slot, terms.all)
     this.titles.put(document.id, document.title)
     this.count(terms, 1)
     this.kept.set(document.id, kept)
@@ -72,7 +66,7 @@ export class SearchIndex {
     const old = this.kept.get(id)
     if (!old) return
     this.count(termsOfDocument(old.document, this.synonyms), -1)
-    this.mini.discard(old.slot)
+    this.postings.discard(old.slot)
     this.slots[old.slot] = undefined
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
@@ -83,7 +77,7 @@ export class SearchIndex {
     const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
     const { affordable, tooCommon } = this.afford(concepts)
     const question = new Question(affordable)
-    const found = this.rank(question, filters, leastCoverage(affordable.length))
+    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored })
     return {
       hits: found.slice(offset, offset + limit).map((scored) => this.hit(scored, question)),
       total: found.length,
@@ -96,7 +90,7 @@ export class SearchIndex {
   similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
     const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
     const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
-    return this.rank(question, filters, leastCoverageOfSimilar).slice(0, limit).map((scored) => this.hit(scored, question))
+    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar }).slice(0, limit).map((scored) => this.hit(scored, question))
   }
 
   suggest(text: string, limit: number): { id: number; title: string }[] {
@@ -130,9 +124,9 @@ export class SearchIndex {
   }
 
   /** Best first, newest of equals first; empty when even the best holds less than `least` of the question. */
-  private rank(question: Question, filters: SearchFilters, least: number): Scored[] {
+  private rank(question: Question, filters: SearchFilters, { least, mostScored: most }: { least: number; mostScored: number }): Scored[] {
     if (question.terms.length === 0) return []
-    const held = this.findHeld(question)
+    const held = this.postings.findHeld(question, this.slots.length)
     const found: Scored[] = []
     let best = 0
     for (const slot of held.slots) {
@@ -143,52 +137,31 @@ export class SearchIndex {
       if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
     }
     if (best < least) return []
-    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held)
+    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, most)
   }
 
-  private order(found: Scored[], question: Question, held: HeldTerms): Scored[] {
-    const cut = found.length <= mostScored ? 0 : nthLargest(found.map(({ coverage }) => coverage), mostScored)
-    const chosen = new Uint8Array(this.slots.length)
-    for (const { kept, coverage } of found) if (coverage >= cut) chosen[kept.slot] = 1
-    const scores = this.score(question, held, chosen)
-    const lowest = scores.reduce((least, score) => (score > 0 && score < least ? score : least), Infinity)
-    for (const entry of found) entry.score = scores[entry.kept.slot] || lowest * entry.coverage
+  /** Score = BM25 × weight of the entry's evidence. */
+  private order(found: Scored[], question: Question, held: HeldTerms, most: number): Scored[] {
+    const scores = this.postings.score(question, held, this.choose(found, most))
+    let lowest = Infinity
+    for (const entry of found) {
+      entry.score = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
+      if (entry.score > 0 && entry.score < lowest) lowest = entry.score
+    }
+    for (const entry of found) if (entry.score === 0) entry.score = lowest * entry.coverage
     return found.sort(byScore)
   }
 
-  /** First pass: who holds what. Every posting is refused a score, so MiniSearch makes no result of it. */
-  private findHeld(question: Question): HeldTerms {
-    const held = new HeldTerms(question.terms.length, this.slots.length)
-    this.searchTerms(question, (slot, term) => {
-      held.note(slot, term)
-      return 0
-    })
-    return held
-  }
-
-  /** Second pass: BM25 of the chosen slots, without MiniSearch's coordination factor, × the weight of their evidence. */
-  private score(question: Question, held: HeldTerms, chosen: Uint8Array): Float64Array {
-    const scores = new Float64Array(this.slots.length)
-    for (const { id, score, queryTerms } of this.searchTerms(question, (slot, term) => (chosen[slot] === 1 ? question.weight(term, held.at(slot)) : 0))) {
-      const slot = Number(id)
-      scores[slot] = (score / Math.max(1, queryTerms.length)) * (this.slots[slot]?.weight ?? 0)
-    }
-    return scores
-  }
-
-  private searchTerms(question: Question, weigh: (slot: number, term: number) => number) {
-    let last = ''
-    let number = 0
-    return this.mini.search(question.terms.join('\n'), {
-      boostDocument: (id, term) => {
-        // MiniSearch comes term by term, so the number is looked up once a term and not once a posting.
-        if (term !== last) {
-          last = term
-          number = question.find(term) ?? 0
-        }
-        return weigh(Number(id), number)
-      },
-    })
+  /** Marks the slots of at most `most` entries. */
+  private choose(found: readonly Scored[], most: number): Uint8Array {
+    const chosen = new Uint8Array(this.slots.length)
+    // Evidence decides only between equals: weights are small numbers, coverages differ by far more than a millionth.
+    const promise = ({ coverage, kept }: Scored) => coverage + kept.weight * 1e-6
+    const cut = found.length <= most ? -1 : nthLargest(found.map(promise), most)
+    let room = most
+    for (const entry of found) if (promise(entry) > cut) { chosen[entry.kept.slot] = 1; room-- }
+    for (const entry of found) if (room > 0 && promise(entry) === cut) { chosen[entry.kept.slot] = 1; room-- }
+    return chosen
   }
 
   private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {

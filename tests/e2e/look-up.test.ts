@@ -42,7 +42,7 @@ describe.each(widths)('at %i px', (width) => {
     await page.waitForURL(/kind=lesson/)
     await page.getByRole('link', { name: 'Three grommets, three holes: a gauge plate from scrap' }).waitFor()
     expect(await page.getByRole('link', { name: grommet }).count()).toBe(0)
-    await page.getByLabel('Stamped', { exact: true }).check()
+    await page.getByRole('checkbox', { name: 'Stamped' }).check()
     await page.waitForURL(/stamped=1/)
     await expect.poll(() => page.getByRole('heading', { level: 2, name: 'Not stamped' }).count()).toBe(0)
     await page.getByLabel('Kit and section').selectOption('whimbrel-2/W-6')

@@ -4,6 +4,7 @@ import { eq } from 'drizzle-orm'
 import { mentorship } from '@/db/schema'
 import { writeQuietly } from '@/db/transaction'
 import type { Answer, Entry, Stamp } from '@/lib/schemas/post'
+import type { SearchResult } from '@/lib/schemas/search'
 import type { Problem } from '@/lib/schemas/problem'
 import { api } from '../support/api'
 import { openTestRuntime, type TestRuntime } from '../support/database'
@@ -19,6 +20,13 @@ const onPlans = { revision: 'A', basis: 'plans', reference: 'W3-2 step 6', plans
 const onOwnBuild = { revision: 'A', basis: 'own-build', reference: 'My own wing, 2023' }
 const press = (by: Somebody, postId: number, body: object = onPlans) => api<Stamp & Problem>('POST', `/api/posts/${postId}/stamps`, { token: by.token, body })
 const answerOf = async (questionId: number): Promise<Answer> => (await api<Entry>('GET', `/api/entries/${questionId}`)).body.answers[0]!
+/** What lists and search show under the filter "stamped": read from the cache beside the post, so it is checked apart. */
+async function foundStamped(): Promise<number[]> {
+  const listed = (await api<{ items: Entry[] }>('GET', '/api/entries?stamped=1&limit=100')).body.items.map((e) => e.id)
+  const found = (await api<SearchResult>('GET', '/api/search?q=labels&stamped=1&limit=100')).body.results.map((h) => h.id)
+  expect([...found].sort()).toEqual([...listed].sort())
+  return found
+}
 const criticalAnswer = async () => anAnswer({ question: await anEntry(critical), body: 'Turn the rib over.' })
 const didNotWork = (by: Somebody, postId: number) => api('PUT', `/api/posts/${postId}/outcome`, { token: by.token, body: { result: 'did-not-work', note: 'It would not go.' } })
 
@@ -99,7 +107,9 @@ describe('what a stamp stands on changes', () => {
     await api('PATCH', `/api/answers/${answer.id}`, { token: answer.by.token, body: { revision: 'A', body: 'On the lid only.' } })
     const after = await answerOf(answer.questionId)
     expect(after).toMatchObject({ stamp: 'lapsed', revision: 'B', stamps: [{ revision: 'A', live: false }] })
+    expect(await foundStamped()).not.toContain(answer.questionId)
     expect((await press(mentor, answer.id, { ...onPlans, revision: 'B' })).status).toBe(201)
+    expect(await foundStamped()).toContain(answer.questionId)
     expect((await answerOf(answer.questionId)).stamp).toBe('stamped')
   })
 
@@ -107,8 +117,10 @@ describe('what a stamp stands on changes', () => {
     const [question, mentor] = [await anEntry(), await aMentor()]
     const answer = await anAnswer({ question })
     await press(mentor, answer.id)
+    expect(await foundStamped()).toContain(question.id)
     await api('PATCH', `/api/entries/${question.id}`, { token: question.by.token, body: { revision: 'A', parts: { doing: 'Something else.' } } })
     expect(await answerOf(question.id)).toMatchObject({ stamp: 'lapsed', revision: 'A', stamps: [{ live: false }] })
+    expect(await foundStamped()).not.toContain(question.id)
   })
 
   it('one “did not work” on a critical system puts it in question until a mentor looks again', async () => {
@@ -118,6 +130,7 @@ describe('what a stamp stands on changes', () => {
     await press(second, answer.id)
     expect((await didNotWork(await aMember(), answer.id)).status).toBe(200)
     expect((await answerOf(answer.questionId)).stamp).toBe('in-question')
+    expect(await foundStamped()).not.toContain(answer.questionId)
     expect((await press(first, answer.id)).status).toBe(201)
     expect(await answerOf(answer.questionId)).toMatchObject({ stamp: 'stamped', stamps: [{ withdrawn: {} }, { live: true }, { live: true }] })
   })
@@ -141,5 +154,6 @@ describe('what a stamp stands on changes', () => {
     expect((await api('POST', '/api/stamps/999999/withdraw', { token: mentor.token, body: { reason: 'x' } })).status).toBe(404)
     expect((await api('POST', `/api/stamps/${id}/withdraw`, { body: { reason: 'x' } })).status).toBe(401)
     expect((await answerOf(answer.questionId)).stamp).toBe('withdrawn')
+    expect(await foundStamped()).not.toContain(answer.questionId)
   })
 })

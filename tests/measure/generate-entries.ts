@@ -1,8 +1,10 @@
-// Ten thousand entries that read like the trade: its words (content/synonyms.json), its operations, its sections.
+// Ten thousand entries that read like the trade. Three sentences in four are taken from the demo, so that words are as common
+// as in what people write; the fourth is made of trade words (content/synonyms.json), operations and sections.
 // They measure; nobody is meant to build by them.
 import kits from '@/content/demo/kits.json'
 import operations from '@/content/operations.json'
 import synonyms from '@/content/synonyms.json'
+import { demoContent } from '@/lib/content/demo-content'
 import { seededRandom, type Chance } from './seeded-random'
 
 /** A line of an import, as lib/services/import reads it. */
@@ -16,7 +18,7 @@ const tasks = operations.flatMap((operation) => operation.tasks)
 const sizes = ['#30', '#40', '#19', '3/32 in', '1/8 in', '3/16 in', '1/4 in', '5/16 in', '0.032 in', '0.040 in', 'AN3-5A', 'AN470AD4-4', 'AN426AD3-3.5']
 const hardware = ['AN3-5A', 'AN4-7A', 'MS21042-3', 'AN470AD4-4', 'AN426AD3-3.5', 'MK1000-06', 'AN960-10', 'MS35489-6']
 const people = ['A. Thornby', 'Merle', 'J. Okafor', 'Petra', 'R. Lindqvist', 'Sami', 'H. Brandt', 'Wyn', 'C. Duarte', 'Ines']
-const sentences = [
+const madeSentences = [
   'I {task} the {word} on the {section} before the {word} went on.',
   'The plans step shows {size} but the {word} measured a little under that at the edge.',
   'With the {word} clamped to the {word}, everything lined up on the second try.',
@@ -30,11 +32,16 @@ const sentences = [
   'The {word} in the box was for {size}, which is one size larger than what the page calls out.',
   'Keep the {word} square to the {word} and go slowly near the corner of the {section}.',
 ]
+const writtenSentences = demoContent.entries
+  .flatMap((entry) => [...Object.values(entry.parts), ...(entry.answers ?? []).map((answer) => answer.body)])
+  .flatMap((said) => (typeof said === 'string' ? said.split(/(?<=[.!?])\s+/) : []))
+  .filter((sentence) => sentence.length > 30 && sentence.length < 240)
 const wordsAText = 120
 const dayMs = 24 * 3600 * 1000
 
 function sentence(chance: Chance, section: string): string {
-  return chance.pick(sentences).replace(/\{(\w+)\}/g, (_, slot: string) => {
+  if (chance.next() < 0.75) return chance.pick(writtenSentences)
+  return chance.pick(madeSentences).replace(/\{(\w+)\}/g, (_, slot: string) => {
     if (slot === 'task') return chance.pickCommon(tasks).title
     if (slot === 'size') return chance.pickCommon(sizes)
     return slot === 'section' ? section.toLowerCase() : chance.pickCommon(words)

@@ -2,14 +2,15 @@
 import type { GeneratedLine } from './generate-entries'
 import { seededRandom, type Chance } from './seeded-random'
 
-const fillers = new Set(['the', 'for', 'and', 'what', 'which', 'about', 'before', 'after', 'taught', 'way'])
+const fillers = new Set(['what', 'which', 'about', 'before', 'after', 'taught', 'with', 'that', 'this', 'from', 'they', 'then', 'than', 'when', 'have', 'were', 'there', 'would'])
 
+/** Half of the time from a title, else from anywhere in the text. */
 function twoWords(chance: Chance, entries: readonly GeneratedLine[]): string {
   for (;;) {
     const { title, body } = chance.pick(entries)
-    const words = `${title} ${body}`.toLowerCase().match(/[a-z]{3,}/g)?.filter((word) => !fillers.has(word)) ?? []
-    const one = chance.pick(words)
-    const two = chance.pick(words)
+    const words = (chance.next() < 0.5 ? title : body).toLowerCase().match(/[a-z]{4,}/g)?.filter((word) => !fillers.has(word)) ?? []
+    if (words.length < 2) continue
+    const [one, two] = [chance.pick(words), chance.pick(words)]
     if (one !== two) return `${one} ${two}`
   }
 }

@@ -4,7 +4,7 @@ import { generateEntries, type GeneratedLine } from './generate-entries'
 import { generateQueries } from './generate-queries'
 import { openLoop, type LoopResult } from './open-loop'
 import { round } from './percentiles'
-import { startProduction } from './production-process'
+import { startProduction, type ProductionProcess } from './production-process'
 import type { Measured, Result } from './result'
 import { seededRandom } from './seeded-random'
 import { importInto, openInstallation, withDatabase, type Installation } from './temporary-installation'
@@ -32,13 +32,15 @@ export async function measureLoad({ entries, seconds, rate, kept, nodeOptions = 
     const ids = await visibleIds(installation)
     const server = await startProduction(installation.directory, nodeOptions)
     try {
-      const search = await loop(server.address, searchPaths(warmUp + rate * seconds, lines), rate)
-      const pages = await loop(server.address, pagePaths(warmUp + rate * seconds, ids), rate)
+      const startMs = server.processorMs()
+      const search = await loop(server, searchPaths(warmUp + rate * seconds, lines), rate)
+      const pages = await loop(server, pagePaths(warmUp + rate * seconds, ids), rate)
       const { search: index } = await server.health()
       const memory = server.memory()
       const measured: Measured[] = [
         ...(importSeconds === null ? [] : [{ what: `import of ${entries} entries`, value: round(importSeconds), unit: 's', promised: null }]),
         { what: 'index ready after the process started', value: round(server.readyMs / 1000), unit: 's', promised: 8 },
+        { what: 'processor time until then', value: round(startMs / 1000), unit: 's', promised: null },
         { what: 'entries that the index lacks', value: ids.length - index.documents, unit: '', promised: 0 },
         ...spreadRows('search API', search, 30), ...spreadRows('entry page', pages, 80),
         ...(memory ? [{ what: 'memory of the server, resident at the end', value: memory.now, unit: 'MB', promised: null }, { what: 'memory of the server, highest', value: memory.highest, unit: 'MB', promised: null }] : []),
@@ -52,17 +54,22 @@ export async function measureLoad({ entries, seconds, rate, kept, nodeOptions = 
   }
 }
 
-async function loop(address: string, paths: readonly string[], rate: number): Promise<LoopResult> {
-  await openLoop(address, paths.slice(0, warmUp), rate)
-  return openLoop(address, paths.slice(warmUp), rate)
+interface Measure extends LoopResult { processorMs: number }
+
+async function loop(server: ProductionProcess, paths: readonly string[], rate: number): Promise<Measure> {
+  await openLoop(server.address, paths.slice(0, warmUp), rate)
+  const before = server.processorMs()
+  const result = await openLoop(server.address, paths.slice(warmUp), rate)
+  return { ...result, processorMs: round((server.processorMs() - before) / (paths.length - warmUp)) }
 }
 
-function spreadRows(what: string, loop: LoopResult, promisedMs: number): Measured[] {
+function spreadRows(what: string, loop: Measure, promisedMs: number): Measured[] {
   return [
     { what: `${what} p50`, value: loop.p50, unit: 'ms', promised: null },
     { what: `${what} p95`, value: loop.p95, unit: 'ms', promised: promisedMs },
     { what: `${what} p99`, value: loop.p99, unit: 'ms', promised: null },
     { what: `${what} slowest`, value: loop.max, unit: 'ms', promised: null },
+    { what: `${what}: processor time each`, value: loop.processorMs, unit: 'ms', promised: null },
     { what: `${what} errors`, value: loop.errors.length, unit: '', promised: 0 },
   ]
 }

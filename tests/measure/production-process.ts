@@ -14,6 +14,8 @@ export interface ProductionProcess {
   health(): Promise<Health>
   /** Resident memory now and at its highest, in megabytes; null where the system does not say. */
   memory(): { now: number; highest: number } | null
+  /** Processor time it has used so far, all threads, in milliseconds; 0 where the system does not say. Hardly depends on who else is at work. */
+  processorMs(): number
   /** Sends the signal and waits for the end. */
   end(signal: 'SIGTERM' | 'SIGKILL'): Promise<void>
 }
@@ -36,7 +38,7 @@ export async function startProduction(directory: string, nodeOptions: readonly s
     const state = await health().then((found) => found.search.state, () => null)
     const elapsed = performance.now() - begun
     if (state !== null && answeredMs === 0) answeredMs = elapsed
-    if (state === 'ready') return { address, answeredMs, readyMs: elapsed, health, memory: () => memoryOf(child), end: (signal) => endOf(child, signal) }
+    if (state === 'ready') return { address, answeredMs, readyMs: elapsed, health, memory: () => memoryOf(child), processorMs: () => processorMsOf(child), end: (signal) => endOf(child, signal) }
     if (child.exitCode !== null || elapsed > longestStartMs) {
       child.kill('SIGKILL')
       throw new Error(`The server did not start:\n${said}`)
@@ -60,6 +62,16 @@ function memoryOf(child: ChildProcess): { now: number; highest: number } | null 
     return { now: megabytes('VmRSS'), highest: megabytes('VmHWM') }
   } catch {
     return null
+  }
+}
+
+function processorMsOf(child: ChildProcess): number {
+  try {
+    // proc(5): utime and stime, fields 14 and 15, in ticks of 10 ms; the name in parentheses before them may hold spaces.
+    const fields = readFileSync(`/proc/${child.pid}/stat`, 'utf8').replace(/^.*\) /, '').split(' ')
+    return (Number(fields[11]) + Number(fields[12])) * 10
+  } catch {
+    return 0
   }
 }
 

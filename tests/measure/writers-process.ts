@@ -1,5 +1,6 @@
 // One process of writers, started by writers.ts: opens a runtime of its own, writes through the services when told to,
 // and says what was acknowledged and how long its event loop ever stood still.
+import { readFileSync } from 'node:fs'
 import { monitorEventLoopDelay } from 'node:perf_hooks'
 import { openDatabase } from '@/db/client'
 import { cautionTable } from '@/lib/content/caution-table'
@@ -18,8 +19,8 @@ export interface WritersReport {
   entries: { id: number; title: string }[]
   remarks: { id: number; body: string }[]
   errors: string[]
-  /** Longest time the event loop stood still, by the histogram of Node and by a ticker of one millisecond. */
-  stallMs: { histogram: number; ticker: number }
+  /** Longest time the event loop stood still: by Node's histogram, by a ticker of one millisecond, and by that without the time other processes had the processor. */
+  stallMs: { histogram: number; ticker: number; own: number }
   writeMs: Spread
   secondsTaken: number
 }
@@ -42,7 +43,7 @@ database.close()
 process.disconnect()
 
 async function writeAll(): Promise<WritersReport> {
-  const report: WritersReport = { entries: [], remarks: [], errors: [], stallMs: { histogram: 0, ticker: 0 }, writeMs: spreadOf([]), secondsTaken: 0 }
+  const report: WritersReport = { entries: [], remarks: [], errors: [], stallMs: { histogram: 0, ticker: 0, own: 0 }, writeMs: spreadOf([]), secondsTaken: 0 }
   const times: number[] = []
   const histogram = monitorEventLoopDelay({ resolution: 1 })
   const ticker = watchTicks()
@@ -51,7 +52,8 @@ async function writeAll(): Promise<WritersReport> {
   await Promise.all(Array.from({ length: task.writers }, (_, writer) => writeInTurn(report, times, writer)))
   histogram.disable()
   report.secondsTaken = (performance.now() - begun) / 1000
-  report.stallMs = { histogram: histogram.max / 1e6 - 1, ticker: ticker.longestMs() }
+  const { whole, own } = ticker.longestMs()
+  report.stallMs = { histogram: histogram.max / 1e6 - 1, ticker: whole, own }
   report.writeMs = spreadOf(times)
   return report
 }
@@ -82,14 +84,27 @@ async function timed<T>(times: number[], work: () => Promise<T>): Promise<T> {
   return result
 }
 
-function watchTicks(): { longestMs(): number } {
-  let last = performance.now()
-  let longest = 0
+/** Longest gap between two ticks, and the longest without what the system itself spent on others meanwhile. */
+function watchTicks(): { longestMs(): { whole: number; own: number } } {
+  let [last, waited] = [performance.now(), waitedMs()]
+  const longest = { whole: 0, own: 0 }
   const look = () => {
-    const now = performance.now()
-    longest = Math.max(longest, now - last - 1)
-    last = now
+    const [now, waitedNow] = [performance.now(), waitedMs()]
+    const gap = now - last - 1
+    longest.whole = Math.max(longest.whole, gap)
+    longest.own = Math.max(longest.own, gap - (waitedNow - waited))
+    ;[last, waited] = [now, waitedNow]
   }
   const timer = setInterval(look, 1)
   return { longestMs: () => { look(); clearInterval(timer); return longest } }
+}
+
+/** How long this thread has stood in line for a processor, so far; 0 where the system does not say. */
+function waitedMs(): number {
+  try {
+    // Linux, Documentation/scheduler/sched-stats: the second field is the time spent waiting to run, in nanoseconds.
+    return Number(readFileSync(`/proc/self/task/${process.pid}/schedstat`, 'utf8').split(' ')[1]) / 1e6
+  } catch {
+    return 0
+  }
 }

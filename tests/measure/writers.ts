@@ -32,6 +32,7 @@ export async function measureWriters({ rounds }: { rounds: number }): Promise<Re
         { what: `${name}: breaks of the audit chain`, value: audit.brokenAt === null ? 0 : 1, unit: '', promised: 0 },
         { what: `${name}: longest standstill, histogram`, value: longest((r) => r.stallMs.histogram), unit: 'ms', promised: 50 },
         { what: `${name}: longest standstill, ticker`, value: longest((r) => r.stallMs.ticker), unit: 'ms', promised: 50 },
+        { what: `${name}: longest standstill of our own making`, value: longest((r) => r.stallMs.own), unit: 'ms', promised: 50 },
         { what: `${name}: a write p95`, value: longest((r) => r.writeMs.p95), unit: 'ms', promised: null },
         { what: `${name}: all writes`, value: longest((r) => r.secondsTaken), unit: 's', promised: null },
       )

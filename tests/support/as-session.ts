@@ -1,11 +1,7 @@
 // Runs a handler inside the framework's own request scope, with a session cookie that was really signed, so that the cookie
 // door can be tried without a server. Reaches into the pinned framework; the browser tests are the last word.
-import { AsyncLocalStorage } from 'node:async_hooks'
 import { env } from '@/lib/env'
 import type { Somebody } from './factories'
-
-// The framework picks it up from here when its storages are first loaded, which is why they are imported below, not above.
-Object.assign(globalThis, { AsyncLocalStorage })
 
 /** The Cookie header of somebody who is signed in. */
 export async function sessionCookie(person: Pick<Somebody, 'id'>, sessionEpoch = 0): Promise<string> {

@@ -62,13 +62,13 @@ export async function openPage({ width = 1360, as, javaScript = true, shift, exp
   context.setDefaultTimeout(10_000)
   const cookies = [...(as === undefined ? [] : [{ name: sessionCookie, value: await sessionValue(as), url: baseUrl, httpOnly: true, sameSite: 'Lax' as const }]), ...(shift ? [{ name: 'shift', value: shift, url: baseUrl }] : [])]
   if (cookies.length > 0) await context.addCookies(cookies)
-  context.on('page', (page) => watch(page, baseUrl, expects))
+  context.on('page', (page) => watch(page, { baseUrl, expects, javaScript }))
   const page = await context.newPage()
   open.push({ context, page })
   return page
 }
 
-function watch(page: Page, baseUrl: string, expects: readonly number[]): void {
+function watch(page: Page, { baseUrl, expects, javaScript }: Required<Pick<OpenOptions, 'baseUrl' | 'expects' | 'javaScript'>>): void {
   page.on('pageerror', (error) => faults.push(`page error: ${error.stack ?? error.message}`))
   page.on('console', (message) => {
     // A refused request is judged by its status below; the console only repeats it.
@@ -79,14 +79,18 @@ function watch(page: Page, baseUrl: string, expects: readonly number[]): void {
   })
   page.on('requestfailed', (request) => {
     const why = request.failure()?.errorText ?? ''
-    // Aborted: the page went elsewhere, or a newer search took the place of this one.
-    if (request.url().startsWith(baseUrl) && why !== 'net::ERR_ABORTED') faults.push(`${why} ${request.url()}`)
+    // Aborted: the page went elsewhere, or a newer search took the place of this one. Disconnected:
+    // a test pulled the plug. 'csp' is how the browser calls scripts that are off.
+    const isMeant = why === 'net::ERR_ABORTED' || why === 'net::ERR_INTERNET_DISCONNECTED' || (!javaScript && why === 'csp' && request.resourceType() === 'script')
+    if (request.url().startsWith(baseUrl) && !isMeant) faults.push(`${why} ${request.url()}`)
   })
 }
 
-/** Waits until the page's scripts have taken over, so that what follows tests the page with them. */
+/** Waits until the page's scripts have taken over and what they listen for is heard, so that what follows tests the page with them. */
 export async function awake(page: Page): Promise<void> {
   await page.waitForFunction(() => Object.keys(document.querySelector('input[name=q]') ?? {}).some((key) => key.startsWith('__reactProps')))
+  // Listeners are put up by effects, which run after the fields are taken over and before the browser is idle.
+  await page.evaluate(() => new Promise<void>((resolve) => { requestIdleCallback(() => resolve()) }))
 }
 
 /** Goes there and waits for the scripts. */

@@ -36,18 +36,22 @@ export async function copyDatabase(): Promise<{ file: string; remove(): void }> 
 export interface TestRuntime extends Runtime { close(): Promise<void> }
 const holder = globalThis as unknown as { pilotholeRuntime?: Promise<Runtime> | undefined }
 
-/** Opens a runtime on a fresh database and makes it the one of this process, until it is closed. */
-export async function openTestRuntime(): Promise<TestRuntime> {
+/**
+ * Opens a runtime on a fresh database and makes it the one of this process; closing it puts back the one before.
+ * `searchStarts: false` gives a search whose thread never comes up, as in the first moments of a start.
+ */
+export async function openTestRuntime({ searchStarts = true } = {}): Promise<TestRuntime> {
   const { file, remove } = await copyDatabase()
   const database: Database = await openDatabase(file)
-  const search = openSearch({ database, workerFile: workerFile('search') })
-  const renderer = createRenderer({ workerFile: workerFile('render') })
-  await search.catchUp()
+  const search = openSearch({ database, workerFile: searchStarts ? workerFile('search') : `${file}.no-worker.mjs` })
+  const renderer = createRenderer({ workerFile: workerFile('render'), timeoutMs: 5_000 })
+  if (searchStarts) await search.catchUp()
+  const before = holder.pilotholeRuntime
   holder.pilotholeRuntime = Promise.resolve({ database, search, renderer })
   return {
     database, search, renderer,
     close: async () => {
-      holder.pilotholeRuntime = undefined
+      holder.pilotholeRuntime = before
       await Promise.all([search.close(), renderer.close()])
       database.close()
       remove()

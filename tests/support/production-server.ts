@@ -33,8 +33,8 @@ function settings(dataDir: string, extra: Record<string, string> = {}): NodeJS.P
 }
 
 /** Runs one of our scripts to its end; throws with what it said when it fails. */
-async function runScript(file: string, dataDir: string): Promise<void> {
-  const child = spawn(process.execPath, [path.join(root, 'node_modules/tsx/dist/cli.mjs'), '--conditions=react-server', file], { cwd: root, env: settings(dataDir), stdio: ['ignore', 'pipe', 'pipe'] })
+async function runScript(file: string, dataDir: string, ...args: string[]): Promise<void> {
+  const child = spawn(process.execPath, [path.join(root, 'node_modules/tsx/dist/cli.mjs'), '--conditions=react-server', file, ...args], { cwd: root, env: settings(dataDir), stdio: ['ignore', 'pipe', 'pipe'] })
   let said = ''
   child.stdout.on('data', (data: Buffer) => { said += data.toString() })
   child.stderr.on('data', (data: Buffer) => { said += data.toString() })
@@ -105,8 +105,8 @@ export default async function setup(project: TestProject): Promise<() => Promise
   const dataDir = mkdtempSync(path.join(os.tmpdir(), 'pilothole-e2e-'))
   const remove = () => rmSync(dataDir, { recursive: true, force: true })
   try {
-    await runScript('db/migrate.ts', dataDir)
-    await runScript('scripts/seed.ts', dataDir)
+    await runScript('scripts/migrate.ts', dataDir)
+    await runScript('scripts/seed.ts', dataDir, '--demo')
     const { stop, ...place } = await startServer(dataDir)
     project.provide('server', place)
     return async () => {

@@ -17,7 +17,7 @@ import { setRole } from '@/lib/services/people/set-role'
 const onMember = <T extends z.ZodType>(input: T) => z.object({ memberId: idText, input })
 
 /** The steward goes on in the list; whoever may not open it goes on at the member's sheet. */
-const backTo = (context: AppContext, memberId: number): Route => (can(context.actor, 'people.open') ? (`${paths.people}?open=${memberId}` as Route) : paths.person(memberId))
+const backTo = (context: AppContext, memberId: number): Route => (can(context.actor, 'people.open') ? paths.people(memberId) : paths.person(memberId))
 
 export async function setRoleAction(_before: FormState, form: FormData): Promise<FormState> {
   return carryOut({

@@ -1,5 +1,5 @@
 // Everybody with an account, for stewards: role, state and mentorship at a glance, and one member open to be changed.
-import type { Metadata, Route } from 'next'
+import type { Metadata } from 'next'
 import Link from 'next/link'
 import { Sheet, SheetHead } from '@/components/entries/sheet'
 import { PageTitle } from '@/components/layout/page-title'
@@ -32,7 +32,7 @@ export default async function PeoplePage({ searchParams }: PageProps<'/people'>)
 
 function PeopleTable({ people, openId }: { people: readonly ListedMember[]; openId: number | undefined }) {
   return (
-    <div className="sheet overflow-x-auto" role="group" aria-label="Table of people" tabIndex={0}>
+    <div className="sheet relative overflow-x-auto" role="group" aria-label="Table of people" tabIndex={0}>
       <table className="w-full text-left">
         <caption className="sr-only">Everybody with an account, by name</caption>
         <thead className="bg-inset">
@@ -46,7 +46,7 @@ function PeopleTable({ people, openId }: { people: readonly ListedMember[]; open
               <td className="px-4 py-3">{roleWords[p.role]}{p.state === 'active' ? '' : `, ${stateWords[p.state]}`}</td>
               <td className="px-4 py-3">{p.mark === null ? <span className="text-ink-soft">no</span> : <><b className="code">{p.mark}</b> <span className="text-small text-ink-soft">{p.fields}</span></>}</td>
               <td className="px-4 py-3"><DateText at={p.createdAt} /></td>
-              <td className="px-4 py-2">{p.id === openId ? <span className="text-ink-soft">open above</span> : <LinkButton href={`${paths.people}?open=${p.id}` as Route} small>Change<span className="sr-only"> {p.name}</span></LinkButton>}</td>
+              <td className="px-4 py-2">{p.id === openId ? <span className="text-ink-soft">open above</span> : <LinkButton href={paths.people(p.id)} small>Change<span className="sr-only"> {p.name}</span></LinkButton>}</td>
             </tr>
           ))}
         </tbody>
@@ -74,7 +74,7 @@ function OpenMember({ actor, member }: { actor: Member; member: ListedMember }) 
           {maySetState ? <MemberStateForm action={setMemberStateAction} person={person} /> : <NoticeLine>Nobody suspends themselves.</NoticeLine>}
         </section>
       </div>
-      <div className="sheet-foot"><LinkButton href={paths.people} look="quiet">Close</LinkButton></div>
+      <div className="sheet-foot"><LinkButton href={paths.people()} look="quiet">Close</LinkButton></div>
     </Sheet>
   )
 }

@@ -33,7 +33,7 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
         { name: 'email', label: 'E-mail', kind: 'email', autoComplete: 'username', maxLength: 254 },
         { name: 'password', label: 'Password', kind: 'password', autoComplete: 'current-password', maxLength: 200 },
       ]} />
-      <p>No account yet? <Link href={paths.signUp}>Sign up</Link>.</p>
+      <p>No account yet? <Link href={paths.signUp()}>Sign up</Link>.</p>
     </>
   )
 }

@@ -16,7 +16,10 @@ const withPost = <T extends z.ZodType>(input: T) => z.object({ postId: idText, i
 export async function remarkAction(_before: FormState, form: FormData): Promise<FormState> {
   return carryOut({
     form, once: 'remark', schema: withPost(newRemarkSchema), read: (f) => ({ postId: field(f, 'postId'), input: { body: field(f, 'body') } }),
-    run: async (context, { postId, input }) => paths.entry((await addRemark(context, postId, input)).entryId, postId),
+    run: async (context, { postId, input }) => {
+      const made = await addRemark(context, postId, input)
+      return paths.remark(made.entryId, made.id)
+    },
   })
 }
 

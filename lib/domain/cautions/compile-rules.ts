@@ -5,14 +5,18 @@ import type { TradeText, TradeWord } from './trade-words'
 
 /** The words that met a condition, a hit a group, or null. */
 export type ConditionMatcher = (text: TradeText, memo: HitMemo) => TermHit[] | null
-/** Hits of each word list in one text: several rules ask for the same list. */
-export type HitMemo = Map<TermMatcher, TermHit[]>
+/** Hits of each word list, and of each group of lists, in one text: many rules ask for the same ones. */
+export type HitMemo = Map<TermMatcher | Group, readonly TermHit[]>
 
 export interface CompiledRule {
   rule: CautionRule
   hardware?: TermMatcher
   words?: ConditionMatcher
 }
+
+/** The lists whose hits count as one; the same terms give the same group, so that its hits are joined once a text. */
+type Group = readonly TermMatcher[]
+type GroupOf = (terms: readonly string[]) => Group
 
 const DEFAULT_WITHIN = 12
 const PLACING_REACH = 3
@@ -26,10 +30,11 @@ export function compiledRules(table: CautionRuleTable): CompiledRule[] {
   if (known) return known
   const placing = { loose: compileTerms(table.placing.loose), strict: compileTerms(table.placing.strict) }
   const vocabularies = new Map(Object.entries(table.vocabularies).map(([name, list]) => [name, vocabularyMatcher(list, placing)]))
+  const groupOf = sharedGroups(vocabularies)
   const rules = table.rules.map((rule) => ({
     rule,
     ...(rule.hardware ? { hardware: compileTerms(rule.hardware) } : {}),
-    ...(rule.words ? { words: conditionMatcher(rule.words, vocabularies) } : {}),
+    ...(rule.words ? { words: conditionMatcher(rule.words, groupOf) } : {}),
   }))
   compiled.set(table, rules)
   return rules
@@ -59,8 +64,19 @@ function placedBy(words: readonly TradeWord[], places: ReadonlySet<number>, hit:
   return false
 }
 
-/** A group's hits: its own terms and those of the vocabularies it names, in text order. */
-function groupMatcher(terms: readonly string[], vocabularies: Map<string, TermMatcher>): TermMatcher[] {
+/** One group for each set of terms, however many rules write it down. */
+function sharedGroups(vocabularies: Map<string, TermMatcher>): GroupOf {
+  const groups = new Map<string, Group>()
+  return (terms) => {
+    const key = terms.join('\n')
+    const group = groups.get(key) ?? groupMatchers(terms, vocabularies)
+    groups.set(key, group)
+    return group
+  }
+}
+
+/** A group's matchers: its own terms and the vocabularies it names. */
+function groupMatchers(terms: readonly string[], vocabularies: Map<string, TermMatcher>): Group {
   const own = terms.filter((term) => !term.startsWith('@'))
   const named = terms.filter((term) => term.startsWith('@')).map((term) => {
     const matcher = vocabularies.get(term.slice(1))
@@ -70,9 +86,9 @@ function groupMatcher(terms: readonly string[], vocabularies: Map<string, TermMa
   return own.length > 0 ? [compileTerms(own), ...named] : named
 }
 
-function conditionMatcher(condition: WordCondition, vocabularies: Map<string, TermMatcher>): ConditionMatcher {
-  const groups = condition.all.map((terms) => groupMatcher(terms, vocabularies))
-  const unless = groupMatcher(condition.unless ?? [], vocabularies)
+function conditionMatcher(condition: WordCondition, groupOf: GroupOf): ConditionMatcher {
+  const groups = condition.all.map(groupOf)
+  const unless = groupOf(condition.unless ?? [])
   const within = condition.within ?? DEFAULT_WITHIN
   return (text, memo) => {
     const { words } = text
@@ -95,14 +111,18 @@ function conditionMatcher(condition: WordCondition, vocabularies: Map<string, Te
 }
 
 /** A group's hits in text order. */
-function hitsOf(group: readonly TermMatcher[], text: TradeText, memo: HitMemo): readonly TermHit[] {
+function hitsOf(group: Group, text: TradeText, memo: HitMemo): readonly TermHit[] {
+  const known = memo.get(group)
+  if (known) return known
   const lists = group.map((matcher) => {
     const hits = memo.get(matcher) ?? matcher(text)
     memo.set(matcher, hits)
     return hits
   }).filter((hits) => hits.length > 0)
   const [only = []] = lists
-  return lists.length < 2 ? only : lists.flat().sort((x, y) => x.first - y.first)
+  const joined = lists.length < 2 ? only : lists.flat().sort((x, y) => x.first - y.first)
+  memo.set(group, joined)
+  return joined
 }
 
 /** The first hit at most `within` words from the anchor that shares no word with it. Binary search: texts repeat themselves. */

@@ -10,6 +10,8 @@ export interface ShownCaution {
   title: string
   text: string
   short: string
+  /** Set when a moderator waived it on its post. */
+  waived?: unknown
 }
 
 /** One line of the plate. `where` names the posts it stands on: 'Found', 'row 1'. */
@@ -41,7 +43,11 @@ function bySeverity(a: ShownCaution, b: ShownCaution): number {
 /** Several posts' cautions as one list, each code once (its first occurrence), worst first. */
 export function unionCautions<C extends ShownCaution>(lists: readonly (readonly C[])[]): C[] {
   const byCode = new Map<string, C>()
-  for (const caution of lists.flat()) if (!byCode.has(caution.code)) byCode.set(caution.code, caution)
+  for (const caution of lists.flat()) {
+    const known = byCode.get(caution.code)
+    // Waived on one post, it still stands on another: the standing one speaks.
+    if (!known || (known.waived !== undefined && caution.waived === undefined)) byCode.set(caution.code, caution)
+  }
   return [...byCode.values()].sort(bySeverity)
 }
 

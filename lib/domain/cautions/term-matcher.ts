@@ -14,42 +14,64 @@ export type TermMatcher = (text: TradeText) => TermHit[]
 
 const LONGEST_GAP = 3
 
+/** The terms that share a head, by their second word: few of the many that begin with "the" go on as the text does. */
+interface Head {
+  alone: boolean
+  byStem: Map<string, Step[][]>
+  byForm: Map<string, Step[][]>
+  /** Terms that go on with a gap, a choice, a beginning or any word: tried one by one, from their second step. */
+  others: Step[][]
+}
+
 /** Compiles terms to a matcher. Hits come in text order and never overlap; an empty list of terms finds nothing. */
 export function compileTerms(terms: readonly string[]): TermMatcher {
-  const byStem = new Map<string, Step[][]>()
-  const byForm = new Map<string, Step[][]>()
-  const byPrefix: { prefix: string; steps: Step[] }[] = []
+  const byStem = new Map<string, Head>()
+  const byForm = new Map<string, Head>()
+  const byPrefix = new Map<string, Head>()
   for (const term of terms) {
     const [head = '', ...rest] = term.toLowerCase().split(/\s+/)
-    const steps = rest.map(stepOf)
     for (const word of head.split('/')) {
-      if (word.endsWith('*')) byPrefix.push({ prefix: word.slice(0, -1), steps })
-      else if (word.startsWith('=')) append(byForm, formOf(word.slice(1)), steps)
-      else append(byStem, stemOf(formOf(word)), steps)
+      if (word.endsWith('*')) addTerm(byPrefix, word.slice(0, -1), rest)
+      else if (word.startsWith('=')) addTerm(byForm, formOf(word.slice(1)), rest)
+      else addTerm(byStem, stemOf(formOf(word)), rest)
     }
   }
   return ({ words, byStem: stems, byForm: forms }) => {
     const ends = new Map<number, number>()
-    const look = (starts: readonly number[] | undefined, candidates: readonly Step[][]) => {
+    const look = (starts: readonly number[] | undefined, head: Head) => {
       for (const first of starts ?? []) {
-        const last = longest(words, first, candidates)
+        const last = longest(words, first, head)
         if (last > (ends.get(first) ?? -1)) ends.set(first, last)
       }
     }
-    for (const [stem, candidates] of byStem) look(stems.get(stem), candidates)
-    for (const [form, candidates] of byForm) look(forms.get(form), candidates)
-    for (const { prefix, steps } of byPrefix) {
-      for (const [form, starts] of forms) if (form.startsWith(prefix)) look(starts, [steps])
+    for (const [stem, head] of byStem) look(stems.get(stem), head)
+    for (const [form, head] of byForm) look(forms.get(form), head)
+    for (const [prefix, head] of byPrefix) {
+      for (const [form, starts] of forms) if (form.startsWith(prefix)) look(starts, head)
     }
     return leftmost(ends)
   }
 }
 
+function addTerm(heads: Map<string, Head>, key: string, rest: readonly string[]): void {
+  const head = heads.get(key) ?? { alone: false, byStem: new Map<string, Step[][]>(), byForm: new Map<string, Step[][]>(), others: [] }
+  heads.set(key, head)
+  const [second, ...more] = rest
+  if (second === undefined) head.alone = true
+  else if (second === '..' || second === '_' || second.endsWith('*') || second.includes('/')) head.others.push(rest.map(stepOf))
+  else if (second.startsWith('=')) append(head.byForm, formOf(second.slice(1)), more.map(stepOf))
+  else append(head.byStem, stemOf(formOf(second)), more.map(stepOf))
+}
+
 /** Leftmost and longest: the "gear" inside "landing gear" is no hit of its own. */
 function leftmost(ends: ReadonlyMap<number, number>): TermHit[] {
   const hits: TermHit[] = []
-  for (const [first, last] of [...ends].sort(([a], [b]) => a - b)) {
-    if (first > (hits.at(-1)?.last ?? -1)) hits.push({ first, last })
+  let reached = -1
+  for (const first of [...ends.keys()].sort((a, b) => a - b)) {
+    const last = ends.get(first) ?? first
+    if (first <= reached) continue
+    hits.push({ first, last })
+    reached = last
   }
   return hits
 }
@@ -64,7 +86,9 @@ function stepOf(token: string): Step {
   if (token === '..') return { kind: 'gap' }
   if (token === '_') return { kind: 'word', test: () => true }
   const tests = token.split('/').map(wordTest)
-  return { kind: 'word', test: (word) => tests.some((test) => test(word)) }
+  const [only] = tests
+  // Nearly every step is one word: a call saved for each word of a long text.
+  return { kind: 'word', test: only && tests.length === 1 ? only : (word) => tests.some((test) => test(word)) }
 }
 
 function wordTest(token: string): WordTest {
@@ -81,9 +105,13 @@ function wordTest(token: string): WordTest {
 }
 
 /** Index of the last word of the longest term that starts at `first`, or -1. */
-function longest(words: readonly TradeWord[], first: number, candidates: readonly Step[][]): number {
-  let best = -1
-  for (const steps of candidates) best = Math.max(best, endOf(words, first, steps, 0))
+function longest(words: readonly TradeWord[], first: number, head: Head): number {
+  let best = head.alone ? first : -1
+  for (const steps of head.others) best = Math.max(best, endOf(words, first, steps, 0))
+  const second = words[first + 1]
+  if (!second || second.sentence !== words[first]?.sentence) return best
+  for (const steps of head.byStem.get(second.stem) ?? []) best = Math.max(best, endOf(words, first + 1, steps, 0))
+  for (const steps of head.byForm.get(second.form) ?? []) best = Math.max(best, endOf(words, first + 1, steps, 0))
   return best
 }
 

@@ -30,7 +30,9 @@ export function stemOf(form: string): string {
 
 /** The form a word is compared in: lower case, straight apostrophe, no possessive. */
 export function formOf(word: string): string {
-  return word.toLowerCase().replace('\u2019', "'").replace(/'s?$/, '')
+  const lower = word.toLowerCase()
+  // Most words have no apostrophe, and this runs for every word of a text.
+  return lower.includes("'") || lower.includes('\u2019') ? lower.replace('\u2019', "'").replace(/'s?$/, '') : lower
 }
 
 /** Words of a text in order. Linear in its length; offsets are UTF-16 code units of the text as given. */

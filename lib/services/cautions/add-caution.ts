@@ -14,6 +14,7 @@ import { whyNot } from '@/lib/policy/why-not'
 import { attachCautions } from '@/lib/services/posts/attach-cautions'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the entry it stands in. 409 when it stands already; one that was waived is required again. 422 for an unknown code. */
 export async function addCaution(context: AppContext, postId: number, input: { code: string; because: string }): Promise<{ entryId: number }> {
@@ -34,7 +35,7 @@ export async function addCaution(context: AppContext, postId: number, input: { c
     record('caution.add', `post:${postId}`, input.code)
     return { entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }
 

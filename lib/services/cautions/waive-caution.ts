@@ -10,6 +10,7 @@ import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the entry it stood in. 404 when the post does not carry it; 409 when it was waived before. */
 export async function waiveCaution(context: AppContext, postId: number, input: { code: string; reason: string }): Promise<{ entryId: number }> {
@@ -28,6 +29,6 @@ export async function waiveCaution(context: AppContext, postId: number, input: {
     record('caution.waive', `post:${postId}`, input.code)
     return { entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }

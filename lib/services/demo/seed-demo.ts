@@ -2,12 +2,14 @@
 import 'server-only'
 import { count } from 'drizzle-orm'
 import type { Database, Transaction } from '@/db/client'
-import { kit, member, mentorship, operation, section, task } from '@/db/schema'
+import { member, mentorship } from '@/db/schema'
 import { write } from '@/db/transaction'
 import { hashPassword } from '@/lib/auth/password'
 import { demoContent, demoPassword } from '@/lib/content/demo-content'
 import type { Renderer } from '@/lib/render/renderer'
+import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 import { seedEntry, type SeedPeople } from './seed-entry'
+import { seedPlaces } from './seed-places'
 
 const dayMs = 24 * 3600 * 1000
 /** Everybody joined, and mentorship was granted, before the oldest post. */
@@ -17,6 +19,7 @@ const joinedDaysAgo = 900
 export async function seedDemo(database: Database, renderer: Renderer, now: number): Promise<number> {
   const [members] = await database.reader.select({ n: count() }).from(member)
   if (!members || members.n > 0) return 0
+  await noteRulesVersion(database)
   // The seed day ends at the moment of seeding, so that nothing lies in the future.
   const at = (daysAgo: number) => Math.round(now - daysAgo * dayMs)
   const people = await seedPeople(database, at)
@@ -45,19 +48,4 @@ async function seedPeople(database: Database, at: (daysAgo: number) => number): 
 
 async function grant(tx: Transaction, memberId: number | undefined, mentor: { number: string; fields: string; reason: string }, grantedBy: number, createdAt: number): Promise<void> {
   if (memberId !== undefined) await tx.insert(mentorship).values({ memberId, ...mentor, grantedBy, createdAt })
-}
-
-async function seedPlaces(database: Database, at: number): Promise<void> {
-  await write(database, { actorId: null, at }, async (tx, record) => {
-    for (const k of demoContent.kits) {
-      const [row] = await tx.insert(kit).values({ slug: k.slug, name: k.name, maker: k.maker }).returning({ id: kit.id })
-      if (!row) throw new Error('The kit was not inserted')
-      await tx.insert(section).values(k.sections.map((s, position) => ({ kitId: row.id, code: s.code, title: s.title, jasc: s.jasc, position })))
-      record('kit.seed', `kit:${row.id}`)
-    }
-    for (const [position, o] of demoContent.operations.entries()) {
-      const [row] = await tx.insert(operation).values({ slug: o.slug, title: o.title, position }).returning({ id: operation.id })
-      if (row && o.tasks.length) await tx.insert(task).values(o.tasks.map((t, i) => ({ operationId: row.id, slug: t.slug, title: t.title, position: i })))
-    }
-  })
 }

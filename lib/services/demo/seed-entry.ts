@@ -90,6 +90,8 @@ function markEvents(ref: string, post: DemoEntry | DemoAnswer, people: SeedPeopl
   return [
     ...(post.addedCautions ?? []).map((c): Event => ({ day: c.day, run: async (tx) => {
       await tx.insert(postCaution).values({ postId: id(), code: c.code, origin: 'moderator', because: c.because, createdAt: at(c.day), addedBy: person(people, c.by).id }).onConflictDoNothing()
+      // Answers that stand already take their question's, as when a moderator adds one by hand.
+      await rejudgeAnswers(tx, id(), at(c.day))
     } })),
     ...(post.waivedCautions ?? []).map((c): Event => ({ day: c.day, run: async (tx) => {
       const waived = await tx.update(postCaution).set({ waivedAt: at(c.day), waivedBy: person(people, c.by).id, waivedReason: c.reason }).where(and(eq(postCaution.postId, id()), eq(postCaution.code, c.code))).returning()

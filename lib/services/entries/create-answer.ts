@@ -12,6 +12,7 @@ import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 import { renderText } from '@/lib/services/posts/render-text'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 const nowhere = { title: '', kitId: null, sections: [], tasks: [], operations: [], hardware: [], plans: [], orderAdvice: [], parts: null }
 
@@ -37,6 +38,6 @@ export async function createAnswer(context: AppContext, questionId: number, inpu
     record('answer.publish', `post:${postId}`, `post:${questionId}`)
     return postId
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return id
 }

@@ -14,6 +14,7 @@ import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { placeEntry } from '@/lib/services/posts/place-entry'
 import { renderText } from '@/lib/services/posts/render-text'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Publishes and returns the id. 401 for a visitor; 422 for unknown names, refused text or cautions not acknowledged. */
 export async function createEntry(context: AppContext, input: NewEntry): Promise<number> {
@@ -39,7 +40,7 @@ export async function createEntry(context: AppContext, input: NewEntry): Promise
     record(`${input.kind}.publish`, `post:${postId}`, 'A')
     return postId
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return id
 }
 

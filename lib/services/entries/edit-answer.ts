@@ -14,8 +14,10 @@ import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
+import { requirePost } from '@/lib/services/posts/require-post'
 import { renderText } from '@/lib/services/posts/render-text'
 import { answerRevision } from './create-answer'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the question's id and the new letter. 409 with the present answer when it was changed meanwhile. */
 export async function editAnswer(context: AppContext, id: number, input: AnswerEdit): Promise<{ questionId: number; revision: string }> {
@@ -27,9 +29,9 @@ export async function editAnswer(context: AppContext, id: number, input: AnswerE
   if (!can(actor, 'post.edit', subjectOf(before))) throw refuse.forbidden(whyNot['post.edit'])
   const rendered = await renderText(context.renderer, [{ name: 'body', text: input.body }])
   const letter = await write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
-    const [found, question] = [await getCautionedPost(tx, id), await getCautionedPost(tx, questionId)]
-    if (!found || !question || !can(actor, 'post.edit', subjectOf(found))) throw refuse.forbidden(whyNot['post.edit'])
-    const judged = answerRevision(input.body, input.makerReply ?? found.current.makerReplyScope)
+    const { found, question, subject } = await requirePost(tx, actor, id)
+    if (!question || !can(actor, 'post.edit', subject)) throw refuse.forbidden(whyNot['post.edit'])
+    const judged = answerRevision(input.body, input.makerReply === 'none' ? null : (input.makerReply ?? found.current.makerReplyScope))
     const hash = contentHash(judged)
     const isStale = revisionLetter(found.current.number) !== input.revision
     if (isStale || hash === found.current.contentHash) {
@@ -49,6 +51,6 @@ export async function editAnswer(context: AppContext, id: number, input: AnswerE
     const question = await loadEntry(context, questionId)
     throw new AppError('conflict', 'This answer was changed meanwhile. Both versions are below; nothing is lost.', { current: question.answers.find((a) => a.id === id) })
   }
-  await context.search.catchUp()
+  await afterWrite(context)
   return { questionId, revision: letter }
 }

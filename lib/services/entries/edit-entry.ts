@@ -2,6 +2,7 @@
 import 'server-only'
 import { insertRevision, saveRendering } from '@/db/mutations/posts'
 import { getCautionedPost, renderingKey, type CautionedPost } from '@/db/queries/cautioned-post'
+import { listTasksBySlug } from '@/db/queries/kits'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { textFields } from '@/lib/domain/entries/entry-text'
@@ -19,6 +20,7 @@ import { rejudgeAnswers } from '@/lib/services/posts/rejudge-answers'
 import { renderText } from '@/lib/services/posts/render-text'
 import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { cleanParts } from './create-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /**
  * Publishes the next revision; returns its letter. 409 with the present version when somebody else was faster;
@@ -30,7 +32,9 @@ export async function editEntry(context: AppContext, id: number, input: EntryEdi
   const before = await getCautionedPost(context.reader, id)
   if (!before || before.kind === 'answer' || !can(actor, 'post.read', subjectOf(before))) throw refuse.notFound('This entry')
   if (!can(actor, 'post.edit', subjectOf(before))) throw refuse.forbidden(whyNot['post.edit'])
-  const next = merged(before, input)
+  if (input.kind !== undefined && input.kind !== before.kind) throw refuse.invalid('kind', 'The kind of an entry never changes.')
+  const impliedByTasks = (await listTasksBySlug(context.reader, before.current.tasks)).map((t) => t.operation)
+  const next = merged(before, input, before.current.operations.filter((slug) => !impliedByTasks.includes(slug)))
   const rendered = await renderText(context.renderer, textFields(before.kind, next.parts, next.body))
   const stale = async () => new AppError('conflict', 'This entry was changed meanwhile. Both versions are below; nothing is lost.', { current: await loadEntry(context, id) })
   const letter = await write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
@@ -59,18 +63,18 @@ export async function editEntry(context: AppContext, id: number, input: EntryEdi
     return revisionLetter(number)
   })
   if (letter === null) throw await stale()
-  await context.search.catchUp()
+  await afterWrite(context)
   return letter
 }
 
-function merged(before: CautionedPost, input: EntryEdit) {
+/** `beyondTasks`: operations named beside the tasks, which an edit that does not speak of operations keeps. */
+function merged(before: CautionedPost, input: EntryEdit, beyondTasks: string[]) {
   const { current } = before
   const parts = input.parts !== undefined ? partsOfKind(before.kind, input.parts) : input.body !== undefined ? null : current.parts
   const body = input.body ?? (input.parts !== undefined ? '' : current.body)
   return {
     title: input.title ?? current.title, kit: input.kit ?? before.kit?.slug ?? '', sections: input.sections ?? current.sections, tasks: input.tasks ?? current.tasks,
-    // Operations of the old tasks go with them: only those named beyond tasks are carried over.
-    operations: input.operations ?? (input.tasks ? [] : current.operations), hardware: input.hardware ?? current.hardware, plans: input.plans ?? current.plans,
+    operations: input.operations ?? beyondTasks, hardware: input.hardware ?? current.hardware, plans: input.plans ?? current.plans,
     orderAdvice: input.orderAdvice ?? current.orderAdvice, parts, body,
   }
 }

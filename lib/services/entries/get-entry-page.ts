@@ -1,6 +1,5 @@
 // Everything the page of an entry shows: the entry, HTML by part, what this reader may do, their own marks, and other cases.
 import 'server-only'
-import { getCautionedPost, listCautionedPosts } from '@/db/queries/cautioned-post'
 import { getKit, listTasksBySlug } from '@/db/queries/kits'
 import { listOwnMarks } from '@/db/queries/marks'
 import type { AppContext } from '@/lib/context'
@@ -10,9 +9,11 @@ import { topicsOfSystem } from '@/lib/domain/cautions/critical-systems'
 import { jascTitle } from '@/lib/content/jasc'
 import { can, type PostSubject } from '@/lib/policy/can'
 import { SearchLoadingError } from '@/lib/search/messages'
+import { listOpenRequests } from '@/db/queries/desk'
+import type { AskFor } from '@/lib/schemas/acts'
 import type { Answer, Entry } from '@/lib/schemas/post'
 import type { Hit } from '@/lib/schemas/search'
-import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
+import { loadEntryWithPosts, subjectOf } from '@/lib/services/posts/load-entry'
 import { findOtherCases } from '@/lib/services/search/find-similar'
 
 /** What this reader may do with one post, and what they have marked on it. */
@@ -22,6 +23,10 @@ export interface PostRights {
   told: { result: 'as-written' | 'with-change' | 'did-not-work'; note: string; revision: string } | null
   goesBy: string | null
   stateReason: string | null
+  /** Who reads, 0 for a visitor: drafts are kept by member. */
+  memberId: number
+  /** What mentors wait for before they stamp it. */
+  askedFor: AskFor['what'][]
 }
 export interface EntryPage {
   entry: Entry
@@ -40,14 +45,15 @@ export interface EntryPage {
 
 /** 404 as for the entry itself. Other cases are left out while search loads. */
 export async function getEntryPage(context: AppContext, id: number): Promise<EntryPage> {
-  const entry = await loadEntry(context, id)
+  const { entry, posts } = await loadEntryWithPosts(context, id)
   const ids = [entry.id, ...entry.answers.map((a) => a.id)]
-  const [posts, kit, tasks, otherCases] = await Promise.all([
-    listCautionedPosts(context.reader, ids), getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), otherCasesOf(context, entry),
+  const [kit, tasks, otherCases] = await Promise.all([
+    getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), otherCasesOf(context, entry),
   ])
+  const requests = await listOpenRequests(context.reader, ids)
   const own = context.actor ? await listOwnMarks(context.reader, context.actor.id, ids) : { outcomes: [], reliances: [] }
-  const found = posts.find((p) => p.id === id)
-  const rights = new Map(posts.map((p) => [p.id, rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own)]))
+  const [found] = posts
+  const rights = new Map(posts.map((p) => [p.id, rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what))]))
   const sections = entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? [])
   return {
     entry, kit: { slug: entry.kit, name: kit?.name ?? '', maker: kit?.maker ?? '' }, sections, tasks: entry.tasks.map((slug) => ({ slug, title: tasks.find((t) => t.slug === slug)?.title ?? slug })),
@@ -57,7 +63,7 @@ export async function getEntryPage(context: AppContext, id: number): Promise<Ent
   }
 }
 
-function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answer | undefined, stateReason: string | null, own: Awaited<ReturnType<typeof listOwnMarks>>): PostRights {
+function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answer | undefined, stateReason: string | null, own: Awaited<ReturnType<typeof listOwnMarks>>, requests: AskFor['what'][]): PostRights {
   const { actor } = context
   const told = own.outcomes.find((o) => o.postId === post?.id)
   const goesBy = own.reliances.find((r) => r.postId === post?.id)
@@ -66,7 +72,7 @@ function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answe
     tell: can(actor, 'post.tell-how-it-went', subject), goBy: can(actor, 'post.go-by', subject), cautions: can(actor, 'post.set-cautions', subject), hide: can(actor, 'post.hide', subject),
     ownStampId: post?.stamps.find((s) => s.live && !s.withdrawn && s.mentor.id === actor?.id)?.id ?? null,
     told: told ? { result: told.result, note: told.note, revision: revisionLetter(told.revision) } : null,
-    goesBy: goesBy ? revisionLetter(goesBy.revision) : null, stateReason,
+    goesBy: goesBy ? revisionLetter(goesBy.revision) : null, stateReason, memberId: actor?.id ?? 0, askedFor: requests,
   }
 }
 
@@ -77,9 +83,4 @@ async function otherCasesOf(context: AppContext, entry: Entry): Promise<Hit[]> {
     if (error instanceof SearchLoadingError) return []
     throw error
   }
-}
-
-/** The question's id of an answer, or null. */
-export async function questionOf(context: AppContext, answerId: number): Promise<number | null> {
-  return (await getCautionedPost(context.reader, answerId))?.parentId ?? null
 }

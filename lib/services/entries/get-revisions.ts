@@ -5,9 +5,11 @@ import type { AppContext } from '@/lib/context'
 import { compareRevisions, type FieldChange } from '@/lib/domain/entries/compare-revisions'
 import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter, revisionNumber } from '@/lib/domain/entries/revision-letter'
+import type { StampState } from '@/lib/domain/stamps/stamp-state'
 import { refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import type { Caution, Stamp } from '@/lib/schemas/post'
+import { judge } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 import { presentCautions, presentStamps } from '@/lib/services/posts/present-post'
 import { renderText } from '@/lib/services/posts/render-text'
@@ -18,6 +20,8 @@ export interface RevisionPage {
   entryId: number
   title: string
   kind: CautionedPost['kind']
+  state: CautionedPost['state']
+  stampState: StampState
   cautions: Caution[]
   revisions: { letter: string; author: string; createdAt: number; stamps: Stamp[] }[]
   from: string
@@ -42,7 +46,7 @@ export async function getRevisions(context: AppContext, postId: number, letters:
   const stamps = presentStamps(found, question?.current.number ?? 0)
   const rendered = await renderText(context.renderer, textFields(found.kind, older.parts, older.body))
   return {
-    postId, entryId: found.parentId ?? postId, title: question?.current.title ?? found.current.title, kind: found.kind, cautions: presentCautions(found),
+    postId, entryId: found.parentId ?? postId, title: question?.current.title ?? found.current.title, kind: found.kind, state: found.state, stampState: judge(found, question?.current.number ?? 0).state, cautions: presentCautions(found),
     revisions: history.map((r) => ({ letter: revisionLetter(r.number), author: found.revisions.find((x) => x.number === r.number)?.author.name ?? '', createdAt: r.createdAt, stamps: stamps.filter((s) => s.revision === revisionLetter(r.number)) })),
     from: revisionLetter(from), to: revisionLetter(to), changes: from === to ? [] : compareRevisions(comparable(found.kind, older), comparable(found.kind, newer)),
     html: textFields(found.kind, older.parts, older.body).map((f) => `${f.label ? `<h3>${f.label}</h3>` : ''}${rendered.html[f.name] ?? ''}`).join('\n'),

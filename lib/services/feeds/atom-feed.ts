@@ -27,7 +27,7 @@ function feedEntry(entry: Entry, baseUrl: string): string {
   const lines = cautions.map((c) => `<p><strong>${c.signalWord}</strong> ${escapeXml(c.title)}. ${escapeXml(c.text)}</p>`).join('')
   const html = `${lines}${entry.html}<p>The plans win: the kit maker’s current plans and bulletins, your authority’s rules and a licensed mechanic come first.</p>`
   return [
-    '<entry>', `<title>${escapeXml(worst ? `${worst.signalWord}: ${entry.title}` : entry.title)}</title>`, `<id>${address}</id>`, `<link href="${address}"/>`,
+    '<entry>', `<title>${escapeXml(worst ? `${worst.signalWord} ${worst.title}: ${entry.title}` : entry.title)}</title>`, `<id>${address}</id>`, `<link href="${address}"/>`,
     `<published>${entry.createdAt}</published>`, `<updated>${entry.updatedAt}</updated>`, `<author><name>${escapeXml(entry.author.name)}</name></author>`,
     `<content type="html">${escapeXml(html)}</content>`, '</entry>',
   ].join('\n')

@@ -14,6 +14,8 @@ import { parseLine } from './parse-line'
 import { entryPreparer, type PreparedEntry } from './prepare-entry'
 import { readLines, type ReadLine } from './read-lines'
 import { writeEntry, type Done } from './write-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
+import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 
 export type ImportContext = Pick<AppContext, 'database' | 'reader' | 'actor' | 'now' | 'renderer'>
 
@@ -24,13 +26,14 @@ const mostFailures = 1000
 /** The import of the API: what was written can be found when it answers. */
 export async function importFile(context: AppContext, bytes: Uint8Array): Promise<ImportResult> {
   const result = await importLines(context, bytes)
-  await context.search.catchUp()
+  await afterWrite(context)
   return result
 }
 
 /** Imports NDJSON as a steward; 403 for others. Throws only when the database stays busy: batches before that are written. */
 export async function importLines(context: ImportContext, bytes: Uint8Array): Promise<ImportResult> {
   if (!can(context.actor, 'import')) throw refuse.forbidden(whyNot.import)
+  await noteRulesVersion(context.database)
   const names = await readNameBook(context.reader)
   const prepare = entryPreparer(context)
   const result: ImportResult = { imported: 0, updated: 0, unchanged: 0, failed: [] }

@@ -10,6 +10,11 @@ export function* readLines(bytes: Uint8Array): Generator<ReadLine> {
   const decoder = new TextDecoder('utf-8', { fatal: true })
   let start = bytes[0] === 0xef && bytes[1] === 0xbb && bytes[2] === 0xbf ? 3 : 0
   for (let line = 1; start < bytes.length; line++) {
+    // Millions of empty lines cost nothing but this comparison.
+    if (bytes[start] === newline) {
+      start++
+      continue
+    }
     const found = bytes.indexOf(newline, start)
     const end = found === -1 ? bytes.length : found
     const read = readLine(decoder, bytes.subarray(start, end))

@@ -71,7 +71,8 @@ function answerText(question: PreparedEntry, { input, judged, hash, rendered }: 
   const nowhere = { postId: parentId, number: questionRevision, authorId: null, authorName: null, makerReplyScope: null, redactedReason: null }
   const current = { ...question.judged, ...nowhere, contentHash: question.hash, createdAt: question.input.createdAt }
   // The rules read the system of a section, never its title.
-  const asked = { current, sections: question.place.sections.map((s) => ({ ...s, title: '' })) }
+  // What a moderator added to a known question reaches its answers through rejudgeAnswers.
+  const asked = { cautions: [], current, sections: question.place.sections.map((s) => ({ ...s, title: '' })) }
   return {
     kind: 'answer', parentId, ref: input.ref ?? null, author: input.author ?? null, createdAt: input.createdAt ?? question.input.createdAt, stamped: input.stamped ?? false, questionRevision,
     judged, hash, rendered, projections: null, required: cautionsOfAnswer(asked, input.body),

@@ -10,6 +10,7 @@ import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the entry it belongs to. 409 for a post that is merged or withdrawn, or in that state already. */
 export async function setPostState(context: AppContext, postId: number, input: { state: 'visible' | 'hidden'; reason: string }): Promise<{ entryId: number }> {
@@ -26,6 +27,6 @@ export async function setPostState(context: AppContext, postId: number, input: {
     record(input.state === 'hidden' ? 'post.hide' : 'post.restore', `post:${postId}`)
     return { entryId: found.parentId ?? postId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }

@@ -1,7 +1,6 @@
 // "I'm going by this": a mark before the act, so that a change of the advice can reach its builders.
 import 'server-only'
 import { and, eq } from 'drizzle-orm'
-import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { reliance } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
@@ -9,16 +8,14 @@ import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
-import { subjectOf } from '@/lib/services/posts/load-entry'
+import { requirePost } from '@/lib/services/posts/require-post'
 
 /** Sets (`on`) or takes off the mark; doing it twice is once. Returns the entry it belongs to. */
 export async function goBy(context: AppContext, postId: number, on: boolean): Promise<{ entryId: number }> {
   const { actor, now } = context
   if (!actor) throw refuse.signIn()
   return write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
-    const found = await getCautionedPost(tx, postId)
-    if (!found || !can(actor, 'post.read', subjectOf(found))) throw refuse.notFound('This post')
-    const entryId = found.parentId ?? postId
+    const { found, entryId, subject } = await requirePost(tx, actor, postId)
     const mine = and(eq(reliance.postId, postId), eq(reliance.memberId, actor.id))
     const [before] = await tx.select().from(reliance).where(mine)
     if (!on) {
@@ -26,7 +23,7 @@ export async function goBy(context: AppContext, postId: number, on: boolean): Pr
       record(before ? 'reliance.end' : 'nothing', `post:${postId}`)
       return { entryId }
     }
-    if (!can(actor, 'post.go-by', subjectOf(found))) throw refuse.forbidden(whyNot['post.go-by'])
+    if (!can(actor, 'post.go-by', subject)) throw refuse.forbidden(whyNot['post.go-by'])
     const mark = { revision: found.current.number, createdAt: now }
     if (before?.revision === mark.revision) {
       record('nothing', `post:${postId}`)

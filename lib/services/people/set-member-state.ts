@@ -19,7 +19,7 @@ export async function setMemberState(context: AppContext, memberId: number, inpu
     const found = await requireMember(tx, memberId)
     if (!can(actor, 'people.set-state', { memberId, role: found.member.role })) throw refuse.forbidden(whyNot['people.set-state'])
     if (found.member.state === input.state) return record('nothing', `member:${memberId}`)
-    await tx.update(member).set({ state: input.state }).where(eq(member.id, memberId))
+    await tx.update(member).set({ state: input.state, stateReason: input.reason, stateBy: actor.id, stateAt: now }).where(eq(member.id, memberId))
     // The audit trail holds no text, so that people can leave: the reason's hash shows later which reason was given.
     record(input.state === 'suspended' ? 'member.suspend' : 'member.restore', `member:${memberId}`, createHash('sha256').update(input.reason).digest('hex'))
   }))

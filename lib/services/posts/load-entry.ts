@@ -14,20 +14,22 @@ import type { Entry } from '@/lib/schemas/post'
 import { presentAnswer, presentEntry, type RemarkRenderings } from './present-post'
 import { renderText } from './render-text'
 
-
 /** The entry as the actor may see it, answers in their order; throws not-found when it is not there or not to be seen. */
-export async function loadEntry(context: AppContext, id: number): Promise<Entry> {
+export const loadEntry = async (context: AppContext, id: number): Promise<Entry> => (await loadEntryWithPosts(context, id)).entry
+
+/** The same with what it was made of: the entry's own post first, then the answers that the actor may see, oldest first. */
+export async function loadEntryWithPosts(context: AppContext, id: number): Promise<{ entry: Entry; posts: CautionedPost[] }> {
   const answerIds = (await listAnswerIds(context.reader, [id])).map((a) => a.id)
   const posts = await withRenderings(context, await listCautionedPosts(context.reader, [id, ...answerIds]))
   const [entry, ...answers] = posts
   if (!entry || entry.id !== id || entry.parentId !== null || !can(context.actor, 'post.read', subjectOf(entry))) throw refuse.notFound('This entry')
   const remarks = await remarkRenderings(context, posts)
-  const seen = answers.filter((a) => can(context.actor, 'post.read', subjectOf(a))).map((a) => presentAnswer(a, entry, remarks))
-  const ordered = orderPosts(seen.map((answer) => ({
+  const seen = answers.filter((a) => can(context.actor, 'post.read', subjectOf(a)))
+  const ordered = orderPosts(seen.map((a) => presentAnswer(a, entry, remarks)).map((answer) => ({
     answer, id: answer.id, stampState: answer.stamp, critical: answer.needsTwo, createdAt: Date.parse(answer.createdAt),
     asWritten: answer.outcomes.asWritten, withChange: answer.outcomes.withChange, didNotWork: answer.outcomes.didNotWork,
   }))).map((o) => o.answer)
-  return presentEntry(entry, ordered, remarks)
+  return { entry: presentEntry(entry, ordered, remarks), posts: [entry, ...seen] }
 }
 
 /** A post as the policy sees it. */

@@ -5,14 +5,16 @@ import { getCautionedPost, listAnswerIds, listCautionedPosts } from '@/db/querie
 import { attachCautions, cautionsOfAnswer } from './attach-cautions'
 import { judgePost } from './judge-post'
 
-/** After its question changed: what the new text requires is added, and stamps on the old text lapse. */
-export async function rejudgeAnswers(tx: Transaction, questionId: number, now: number): Promise<void> {
+/** How many cautions were added. After its question changed: what the new text requires is added, and stamps on the old text lapse. */
+export async function rejudgeAnswers(tx: Transaction, questionId: number, now: number): Promise<number> {
   const question = await getCautionedPost(tx, questionId)
-  if (!question) return
+  if (!question) return 0
+  let added = 0
   const answers = await listCautionedPosts(tx, (await listAnswerIds(tx, [questionId])).map((a) => a.id))
   for (const answer of answers) {
-    await attachCautions(tx, answer.id, cautionsOfAnswer(question, answer.current.body), 'added-later', now)
+    added += await attachCautions(tx, answer.id, cautionsOfAnswer(question, answer.current.body), 'added-later', now)
     await judgePost(tx, answer.id)
   }
+  return added
 }
 

@@ -11,8 +11,8 @@ export async function findSimilar(context: AppContext, input: { title: string; b
   return presentHits(context, await context.search.similar(text, { kit: input.kit }, 6))
 }
 
-/** Other cases for an entry: like it, without itself. */
-export async function findOtherCases(context: AppContext, entry: { id: number; title: string; text: string; kit: string }): Promise<Hit[]> {
-  const hits = await context.search.similar(`${entry.title}\n${entry.title}\n${entry.text}`, {}, 6)
+/** Other cases for an entry: about the same thing, without itself. Its title says what it is about; its whole text would say too much. */
+export async function findOtherCases(context: AppContext, entry: { id: number; title: string; hardware: readonly string[] }): Promise<Hit[]> {
+  const hits = await context.search.similar(`${entry.title}\n${entry.hardware.join(' ')}`, {}, 6)
   return presentHits(context, hits.filter((h) => h.id !== entry.id).slice(0, 4))
 }

@@ -1,7 +1,6 @@
 // A mentor stamps a revision with a basis. A mentor who looks again while it is in question renews their own stamp.
 import 'server-only'
 import { and, eq, isNull } from 'drizzle-orm'
-import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { askedFor, stamp } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
@@ -12,7 +11,8 @@ import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import type { NewStamp } from '@/lib/schemas/acts'
 import { judge, judgePost } from '@/lib/services/posts/judge-post'
-import { subjectOf } from '@/lib/services/posts/load-entry'
+import { requirePost } from '@/lib/services/posts/require-post'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /**
  * Returns the stamp's id. 403 own words, no mentor, or a reply for one serial; 409 when `revision` is not the current one,
@@ -22,10 +22,8 @@ export async function pressStamp(context: AppContext, postId: number, input: New
   const { actor, now } = context
   if (!actor) throw refuse.signIn()
   const made = await write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
-    const found = await getCautionedPost(tx, postId)
-    if (!found || !can(actor, 'post.read', subjectOf(found))) throw refuse.notFound('This post')
-    if (!can(actor, 'post.stamp', subjectOf(found)) || actor.mark === null) throw refuse.forbidden(whyNot['post.stamp'])
-    const question = found.parentId === null ? null : await getCautionedPost(tx, found.parentId)
+    const { found, question, entryId, subject } = await requirePost(tx, actor, postId)
+    if (!can(actor, 'post.stamp', subject) || actor.mark === null) throw refuse.forbidden(whyNot['post.stamp'])
     const questionRevision = question?.current.number ?? 0
     if (revisionNumber(input.revision) !== found.current.number) {
       const current = { id: postId, revision: revisionLetter(found.current.number) }
@@ -42,8 +40,8 @@ export async function pressStamp(context: AppContext, postId: number, input: New
     await tx.update(askedFor).set({ answeredAt: now }).where(and(eq(askedFor.postId, postId), isNull(askedFor.answeredAt)))
     await judgePost(tx, postId)
     record('stamp.press', `stamp:${row.id}`, `post:${postId} ${input.revision}`)
-    return { id: row.id, entryId: found.parentId ?? postId }
+    return { id: row.id, entryId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return made
 }

@@ -1,7 +1,6 @@
 // A mentor takes their own stamp back, with a reason that stays readable.
 import 'server-only'
 import { eq } from 'drizzle-orm'
-import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { stamp } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
@@ -9,7 +8,8 @@ import { AppError, refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import { judgePost } from '@/lib/services/posts/judge-post'
-import { subjectOf } from '@/lib/services/posts/load-entry'
+import { requirePost } from '@/lib/services/posts/require-post'
+import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Returns the post and entry it stood on. 409 when it was withdrawn before. */
 export async function withdrawStamp(context: AppContext, stampId: number, input: { reason: string }): Promise<{ postId: number; entryId: number }> {
@@ -17,15 +17,16 @@ export async function withdrawStamp(context: AppContext, stampId: number, input:
   if (!actor) throw refuse.signIn()
   const done = await write(context.database, { actorId: actor.id, at: now }, async (tx, record) => {
     const [row] = await tx.select().from(stamp).where(eq(stamp.id, stampId))
-    const found = row && (await getCautionedPost(tx, row.postId))
-    if (!row || !found || !can(actor, 'post.read', subjectOf(found))) throw refuse.notFound('This stamp')
+    if (!row) throw refuse.notFound('This stamp')
+    // A mentor may take a stamp back wherever they can still see it, also under a hidden question of their own.
+    const { entryId } = await requirePost(tx, actor, row.postId)
     if (!can(actor, 'stamp.withdraw', { mentorId: row.mentorId })) throw refuse.forbidden(whyNot['stamp.withdraw'])
     if (row.withdrawnAt !== null) throw new AppError('conflict', 'This stamp was withdrawn before.', { current: { id: stampId } })
     await tx.update(stamp).set({ withdrawnAt: now, withdrawnReason: input.reason }).where(eq(stamp.id, stampId))
     await judgePost(tx, row.postId)
     record('stamp.withdraw', `stamp:${stampId}`, `post:${row.postId}`)
-    return { postId: row.postId, entryId: found.parentId ?? row.postId }
+    return { postId: row.postId, entryId }
   })
-  await context.search.catchUp()
+  await afterWrite(context)
   return done
 }

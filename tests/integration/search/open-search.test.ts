@@ -105,11 +105,11 @@ describe('following', () => {
     await door.catchUp()
     expect((await stamped()).total).toBe(0)
     await stampPost(database, answer)
-    await keepRendering(database, lesson, 'nine lockwires')
+    await keepRendering(database, lesson, 'beside a turnbuckle')
     await stampPost(database, lesson)
     await door.catchUp()
     expect((await stamped()).hits.map((hit) => hit.id).sort()).toEqual([lesson, question])
-    expect(await idsFor('lockwires')).toEqual([lesson])
+    expect(await idsFor('turnbuckles')).toEqual([lesson])
   })
 
   test('writers at the same time each find their own entry after their own catchUp', async () => {

@@ -8,7 +8,7 @@ import { promisify } from 'node:util'
 import { eq } from 'drizzle-orm'
 import { openDatabase, type Database, type Transaction } from '@/db/client'
 import { migrateDatabase } from '@/db/migrate'
-import { kit, post, rendering, revision, section } from '@/db/schema'
+import { kit, post, postSection, rendering, revision, section } from '@/db/schema'
 import { writeQuietly } from '@/db/transaction'
 
 export interface Folder { path: string; remove(): Promise<void> }
@@ -33,7 +33,7 @@ export async function openFilled(file: string): Promise<Database> {
   await migrateDatabase(database)
   await writeQuietly(database, async (tx) => {
     await tx.insert(kit).values({ id: 1, slug: 'whimbrel-2', name: 'Whimbrel 2', maker: 'Saltmarsh Aircraft' })
-    await tx.insert(section).values({ kitId: 1, code: 'W-3', title: 'Wing ribs to spar', position: 1, jasc: '5712' })
+    await tx.insert(section).values({ id: 1, kitId: 1, code: 'W-3', title: 'Wing ribs to spar', position: 1, jasc: '5712' })
   })
   return database
 }
@@ -53,6 +53,7 @@ async function insertPost(tx: Transaction, text: { title?: string; body: string 
   const [row] = await tx.insert(post).values({ kind: parentId === undefined ? kind : 'answer', parentId: parentId ?? null, currentRevision: 1, createdAt: now, updatedAt: now }).returning({ id: post.id })
   if (!row) throw new Error('no post was written')
   await tx.insert(revision).values(revisionOf(row.id, 1, text))
+  if (parentId === undefined) await tx.insert(postSection).values({ postId: row.id, sectionId: 1, position: 0 })
   return row.id
 }
 

@@ -72,7 +72,7 @@ function Care({ context, person }: { context: AppContext; person: PersonSheet })
       <SheetHead title={person.state === 'active' ? 'Suspend this builder' : 'Suspended'} id="care" />
       <div className="sheet-body">
         <MemberStateForm action={setMemberStateAction} person={cared} />
-        {can(context.actor, 'people.open') ? <p><Link href={paths.people}>Roles and mentorships</Link></p> : null}
+        {can(context.actor, 'people.open') ? <p><Link href={paths.people()}>Roles and mentorships</Link></p> : null}
       </div>
     </Sheet>
   )

@@ -59,7 +59,7 @@ function Remarks({ post }: { post: Shown }) {
   return (
     <div className="grid gap-3">
       <h3 className="label">Remarks</h3>
-      <ul className="grid gap-3">{post.remarks.map((r) => <li key={r.id}><OneRemark remark={r} known={post.cautions.map((c) => c.code)} /></li>)}</ul>
+      <ul className="grid gap-3">{post.remarks.map((r) => <li key={r.id}><OneRemark remark={r} known={post.cautions.filter((c) => !c.waived).map((c) => c.code)} /></li>)}</ul>
     </div>
   )
 }

@@ -21,7 +21,7 @@ import { OtherCases } from './_components/other-cases'
 export async function generateMetadata({ params }: PageProps<'/entries/[id]'>): Promise<Metadata> {
   const { entry } = await load((await params).id)
   const words = entry.cautions.find((c) => !c.waived)
-  return { title: words ? `${words.signalWord}: ${entry.title}` : entry.title }
+  return { title: words ? `${words.signalWord} ${words.title}: ${entry.title}` : entry.title }
 }
 
 /** Once a request: the title needs the entry as much as the page does. */

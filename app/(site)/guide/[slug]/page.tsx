@@ -1,6 +1,7 @@
 // Pages of the house itself, from content/pages.
 import type { Metadata } from 'next'
 import { notFound } from 'next/navigation'
+import type { ComponentProps } from 'react'
 import { Sheet } from '@/components/entries/sheet'
 import { PageTitle } from '@/components/layout/page-title'
 import { loadPage } from '@/lib/content/load-page'
@@ -11,7 +12,7 @@ export async function generateMetadata({ params }: PageProps<'/guide/[slug]'>): 
 }
 
 export default async function GuidePage({ params }: PageProps<'/guide/[slug]'>) {
-  const page = await loadPage((await params).slug, {})
+  const page = await loadPage((await params).slug, { table: ScrollingTable })
   if (!page) notFound()
   const { Content } = page
   return (
@@ -20,4 +21,9 @@ export default async function GuidePage({ params }: PageProps<'/guide/[slug]'>) 
       <Sheet as="article"><div className="sheet-body prose"><Content /></div></Sheet>
     </>
   )
+}
+
+/** As the tables of posts: wider than its column it scrolls, with the keyboard too. */
+function ScrollingTable(props: ComponentProps<'table'>) {
+  return <div className="table-scroll" role="group" aria-label="Table" tabIndex={0}><table {...props} /></div>
 }

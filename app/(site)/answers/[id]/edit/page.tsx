@@ -25,7 +25,7 @@ export default async function EditAnswerPage({ params }: PageProps<'/answers/[id
       {answer.stamps.some((s) => s.live) ? <NoticeLine boxed>Stamps on it lapse with an edit: mentors have to look again.</NoticeLine> : null}
       <Sheet as="section"><SheetHead title="Found" /><div className="sheet-body"><Prose html={question.html} small /></div></Sheet>
       <AnswerForm action={editAnswerAction} question={{ id: question.id, title: question.title, text: question.text, kit: question.kit, sections: question.sections, tasks: question.tasks, hardware: question.hardware }}
-        initial={{ answerId: String(answer.id), revision: answer.revision, body, makerReply: answer.makerReply ?? '' }} submission={randomUUID()} memberId={context.actor.id} />
+        initial={{ answerId: String(answer.id), revision: answer.revision, body, makerReply: answer.makerReply ?? 'none' }} submission={randomUUID()} memberId={context.actor.id} />
     </div>
   )
 }

@@ -2,11 +2,11 @@
 import { CautionLine } from '@/components/cautions/caution-line'
 import { SheetRow } from '@/components/entries/sheet'
 import { Prose } from '@/components/prose/prose'
-import type { Answer } from '@/lib/schemas/post'
+import type { Answer, Entry } from '@/lib/schemas/post'
 import type { PostRights } from '@/lib/services/entries/get-entry-page'
 import { PostActs, PostOutcomes, PostStateNotice, PostTitleBlock } from './post-foot'
 
-export function AnswerRow({ answer, number, rights, allCautions }: { answer: Answer; number: number; rights: PostRights; allCautions: { code: string; title: string }[] }) {
+export function AnswerRow({ answer, number, rights, allCautions, plans }: { answer: Answer; number: number; rights: PostRights; allCautions: { code: string; title: string }[]; plans: Entry['plans'][number] | undefined }) {
   return (
     <article className="sheet answer" id={`post-${answer.id}`} aria-label={`Row ${number}, by ${answer.author.name}`} tabIndex={-1}>
       <SheetRow number={number}>
@@ -17,7 +17,7 @@ export function AnswerRow({ answer, number, rights, allCautions }: { answer: Ans
         <PostOutcomes post={answer} />
       </SheetRow>
       <PostTitleBlock post={answer} />
-      <PostActs post={answer} rights={rights} allCautions={allCautions} />
+      <PostActs post={answer} rights={rights} allCautions={allCautions} plans={plans} />
     </article>
   )
 }

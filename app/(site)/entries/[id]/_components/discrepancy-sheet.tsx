@@ -21,13 +21,13 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
   const count = entry.answers.length
   return (
     <div className="discrepancy">
-      <div className="discrepancy-found">
+      <div className="discrepancy-found" role="group" aria-label="Found, kept in view" tabIndex={0}>
         <Sheet as="section" labelledBy="found" id={`post-${entry.id}`}>
           <SheetHead id="found" title="Found" note={`${entry.author.name} · ${formatDate(entry.updatedAt)} · Rev ${entry.revision}`} />
           {own ? <PostStateNotice post={entry} rights={own} /> : null}
           <div className="sheet-cautions"><CautionLine cautions={entry.cautions.filter((c) => !c.waived)} wide /><WaivedCautions post={entry} /></div>
           <SheetParts parts={parts.map((p) => ({ label: p.label || 'Found', content: p.name === 'plansSay' ? <><PlansLines page={page} /><Prose html={p.html} small /></> : <Prose html={p.html} small /> }))} />
-          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} /> : null}
+          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} /> : null}
         </Sheet>
       </div>
       <div className="discrepancy-do">
@@ -35,10 +35,10 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
         {count === 0 ? <EmptyState title="Nobody has said what to do yet">Until somebody does: stop, measure, read the plans step again, and ask the kit maker.</EmptyState> : null}
         {entry.answers.map((answer, i) => {
           const right = rights.get(answer.id)
-          return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} /> : null
+          return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} plans={entry.plans[0]} /> : null
         })}
         <section id="say" className="no-print" aria-label="Say what to do" tabIndex={-1}>
-          {maySay ? <AnswerForm action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />
+          {maySay ? <AnswerForm key={`say-${count}`} action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />
             : entry.state === 'visible' ? <LinkButton href={paths.signIn(paths.entry(entry.id))}>Sign in to say what to do</LinkButton> : null}
         </section>
       </div>

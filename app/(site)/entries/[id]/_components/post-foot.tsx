@@ -6,6 +6,7 @@ import { HowItWent } from '@/components/entries/how-it-went'
 import { OutcomeForm } from '@/components/entries/outcome-form'
 import { RelianceForm } from '@/components/entries/reliance-form'
 import { TitleBlock, type TitleBlockCell } from '@/components/entries/title-block'
+import { AskedForLine } from '@/components/desk/asked-for-line'
 import { ModerationPanel } from '@/components/moderation/moderation-panel'
 import { StampForm } from '@/components/stamps/stamp-form'
 import { StampRow, stampCount } from '@/components/stamps/stamp-row'
@@ -74,22 +75,23 @@ export function PostOutcomes({ post }: { post: Shown }) {
 const outcomeWords = { 'as-written': 'As written', 'with-change': 'With a change', 'did-not-work': 'Did not work' } as const
 
 /** The row of acts. Nothing is disabled: what one may not do is not there. */
-export function PostActs({ post, rights, allCautions }: { post: Shown; rights: PostRights; allCautions: { code: string; title: string }[] }) {
+export function PostActs({ post, rights, allCautions, plans }: { post: Shown; rights: PostRights; allCautions: { code: string; title: string }[]; plans: Entry['plans'][number] | undefined }) {
   const isOneSerial = 'makerReply' in post && post.makerReply === 'one-serial'
   const older = post.revisions.at(-2)
   return (
     <>
+      <AskedForLine requests={rights.askedFor} />
       <div className="sheet-foot post-acts no-print">
         {isOneSerial ? <LinkButton href={paths.ask()} look="primary">Ask for your own</LinkButton> : null}
         {rights.goBy ? <RelianceForm action={relianceAction} postId={post.id} revision={post.revision} goesBy={rights.goesBy} /> : null}
         {rights.edit ? <LinkButton href={post.kind === 'answer' ? paths.editAnswer(post.id) : paths.editEntry(post.id)}>Edit</LinkButton> : null}
         {older ? <LinkButton href={paths.revisions(post.id, older.revision, post.revision)} look="quiet">Read Rev {older.revision}</LinkButton> : null}
         {rights.tell ? <Disclosure summary={rights.told ? 'Change how it went' : 'Tell how it went'}><OutcomeForm action={outcomeAction} postId={post.id} revision={post.revision} critical={post.needsTwo} told={rights.told} /></Disclosure> : null}
-        {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} submission={randomUUID()} /></Disclosure> : null}
+        {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} plans={plans} submission={randomUUID()} /></Disclosure> : null}
         {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
         {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       </div>
-      <Remarks post={post} mayRemark={rights.remark} />
+      <Remarks post={post} mayRemark={rights.remark} memberId={rights.memberId} />
     </>
   )
 }

@@ -8,15 +8,15 @@ import { formatDate } from '@/lib/format/date'
 import type { Answer, Entry } from '@/lib/schemas/post'
 import { remarkAction } from '../../actions'
 
-export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: boolean }) {
-  const known = new Set(post.cautions.map((c) => c.code))
+export function Remarks({ post, mayRemark, memberId }: { post: Entry | Answer; mayRemark: boolean; memberId: number }) {
+  const known = new Set(post.cautions.filter((c) => !c.waived).map((c) => c.code))
   if (post.remarks.length === 0 && !mayRemark) return null
   return (
-    <section className="remarks-part" aria-label="Remarks">
+    <div className="remarks-part">
       {post.remarks.length > 0 ? (
         <ul className="remarks">
           {post.remarks.map((r) => (
-            <li key={r.id}>
+            <li key={r.id} id={`remark-${r.id}`} tabIndex={-1}>
               <p className="label">{r.author.name} · {formatDate(r.createdAt)}</p>
               <CautionLine cautions={r.cautions.filter((c) => !known.has(c.code))} />
               <Prose html={r.html} small />
@@ -24,7 +24,7 @@ export function Remarks({ post, mayRemark }: { post: Entry | Answer; mayRemark: 
           ))}
         </ul>
       ) : null}
-      {mayRemark ? <Disclosure summary="Remark" look="quiet"><RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} /></Disclosure> : null}
-    </section>
+      {mayRemark ? <Disclosure summary="Remark" look="quiet"><RemarkForm action={remarkAction} postId={post.id} submission={randomUUID()} memberId={memberId} key={post.remarks.length} /></Disclosure> : null}
+    </div>
   )
 }

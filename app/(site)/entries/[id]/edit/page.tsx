@@ -33,7 +33,7 @@ export default async function EditEntryPage({ params }: PageProps<'/entries/[id]
 function valuesOf(entry: Entry): FormValues {
   const parts = Object.fromEntries(Object.entries(entry.parts ?? {}).map(([name, value]) => [name, String(value)]))
   return {
-    ...parts, body: entry.body, title: entry.title, place: `${entry.kit}/${entry.sections[0] ?? ''}`, also: entry.sections[1] ? `${entry.kit}/${entry.sections[1]}` : '',
+    ...parts, body: entry.body, title: entry.title, place: `${entry.kit}/${entry.sections[0] ?? ''}`, also: entry.sections[1] ? `${entry.kit}/${entry.sections[1]}` : '', more: entry.sections.slice(2),
     task: entry.tasks, hardware: entry.hardware, planPage: entry.plans.map((p) => p.page), planStep: entry.plans.map((p) => p.step ?? ''), planRevision: entry.plans.map((p) => p.revision ?? ''),
     before: entry.orderAdvice.map((o) => o.before), after: entry.orderAdvice.map((o) => o.after),
   }

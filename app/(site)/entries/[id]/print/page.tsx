@@ -31,12 +31,13 @@ export default async function PrintPage({ params }: PageProps<'/entries/[id]/pri
       <PageTitle kicker={`${entry.kind === 'question' ? 'Discrepancy sheet' : 'Lesson'} ${entry.id} · ${kit.name} · ${sections.map((s) => `${s.code} ${s.title}`).join(', ')}`} title={entry.title} />
       <CautionPlate cautions={cautions} />
       {entry.plans.map((p) => <p key={p.page}><PlansReference {...p} /></p>)}
+      <h2>{entry.kind === 'question' ? 'Found' : 'Lesson'}</h2>
       <Prose html={entry.html} />
       <Stamps post={entry} />
       {entry.answers.map((a, i) => (
         <section key={a.id} className="print-row">
           <h2>What to do, row {i + 1}: {a.author.name}, Rev {a.revision}, {formatDate(a.updatedAt)}</h2>
-          {a.state === 'withdrawn' ? <p><b>Withdrawn: do not go by this.</b></p> : null}
+          {a.state === 'visible' ? null : <p><b>{a.state === 'withdrawn' ? 'Withdrawn: do not go by this.' : 'Hidden.'}</b></p>}
           <CautionLine cautions={a.cautions.filter((c) => !c.waived)} />
           <Prose html={a.html} />
           <Stamps post={a} />

@@ -2,22 +2,25 @@
 import type { Metadata } from 'next'
 import { HitList, HitPlate } from '@/components/entries/hit-list'
 import { PageTitle } from '@/components/layout/page-title'
+import { RivetLine } from '@/components/layout/rivet-line'
 import { EmptyState } from '@/components/ui/empty-state'
 import { LinkButton } from '@/components/ui/link-button'
 import { pageContext } from '@/lib/auth/guards'
+import { pathSegment } from '@/lib/http/path-segment'
 import { paths } from '@/lib/paths'
 import { notFound } from 'next/navigation'
 import { getSectionPage } from '@/lib/services/kits/get-section-page'
 
 export async function generateMetadata({ params }: PageProps<'/kits/[kit]/[section]'>): Promise<Metadata> {
   const { section } = await params
-  return { title: decodeURIComponent(section) }
+  return { title: pathSegment(section) ?? 'Section' }
 }
 
 export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[section]'>) {
   const context = await pageContext()
   const { kit, section } = await params
-  const page = await getSectionPage(context, kit, decodeURIComponent(section))
+  const code = pathSegment(section)
+  const page = code === null ? null : await getSectionPage(context, kit, code)
   if (!page) notFound()
   const here = { kit: page.kit.slug, section: page.code }
   return (
@@ -26,6 +29,7 @@ export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[se
       {page.hits.length === 0 ? <EmptyState title="Nothing yet about this section" action={<LinkButton href={paths.ask(here)} look="primary">Ask the first question</LinkButton>}>Whoever finishes it first can spare the others an evening.</EmptyState> : (
         <>
           <HitPlate hits={page.hits} />
+          <RivetLine title="Newest first" />
           <HitList hits={page.hits} />
           {page.total > page.hits.length ? <p><LinkButton href={paths.search(here)}>All {page.total}</LinkButton></p> : null}
         </>

@@ -7,6 +7,7 @@ import { PageTitle } from '@/components/layout/page-title'
 import { Prose } from '@/components/prose/prose'
 import { StampFlat } from '@/components/stamps/stamp-flat'
 import { LinkButton } from '@/components/ui/link-button'
+import { NoticeLine } from '@/components/ui/notice-line'
 import { pageContext } from '@/lib/auth/guards'
 import { formatDate } from '@/lib/format/date'
 import { orNotFound } from '@/lib/http/or-not-found'
@@ -24,13 +25,14 @@ export default async function RevisionsPage({ params, searchParams }: PageProps<
     <>
       <PageTitle title={page.title} kicker={page.kind === 'answer' ? 'Revisions of a row' : 'Revisions'} aside={<LinkButton href={paths.entry(page.entryId, page.postId)}>Back to the sheet</LinkButton>} />
       <CautionPlate cautions={page.cautions.filter((c) => !c.waived)} />
+      {page.state === 'visible' ? null : <NoticeLine boxed><b>{page.state === 'withdrawn' ? 'Withdrawn: do not go by this.' : 'Hidden.'}</b></NoticeLine>}
       <Sheet as="section" labelledBy="all">
         <SheetHead title="All revisions" id="all" />
         <ol className="revision-list">
           {page.revisions.map((r, i) => (
             <li key={r.letter}>
               <span><b>Rev {r.letter}</b> · {r.author} · {formatDate(r.createdAt)}{i > 0 ? <> · <Link href={paths.revisions(page.postId, page.revisions[i - 1]?.letter, r.letter)}>what changed from Rev {page.revisions[i - 1]?.letter}</Link></> : null}</span>
-              {r.stamps.map((s) => <StampFlat key={s.id} stamp={s} state={s.live ? 'stamped' : 'lapsed'} />)}
+              {r.stamps.map((s) => <StampFlat key={s.id} stamp={s} state={s.live ? page.stampState : 'lapsed'} />)}
             </li>
           ))}
         </ol>
