@@ -11,6 +11,7 @@ import * as importing from './import/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
+import * as numbersCheck from './numbers-check/route'
 import * as operations from './operations/route'
 import * as outcome from './posts/[id]/outcome/route'
 import * as reliance from './posts/[id]/reliance/route'
@@ -43,6 +44,7 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/kits/{kit}': kit,
   '/api/operations': operations,
   '/api/measurements': measurements,
+  '/api/numbers-check': numbersCheck,
   '/api/shop': shop,
   '/api/shop/{table}': shopTable,
   '/api/import': importing,

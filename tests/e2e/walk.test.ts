@@ -131,6 +131,7 @@ const table: Record<string, readonly Check[]> = {
   'api/shop/route.ts': [{ without: () => '/api/shop', why: 'tables only' }],
   'api/shop/[table]/route.ts': [{ without: () => '/api/shop/grommet?bore=3/8', why: 'numbers and the cautions of the table, no post' }],
   'api/measurements/route.ts': [{ api: async () => JSON.stringify(await must(null, 'POST', '/api/measurements', { text: '#30 in 0.032' })), shows: [] }],
+  'api/numbers-check/route.ts': [{ api: async () => JSON.stringify(await must(null, 'POST', '/api/numbers-check', { text: 'Use #30 for a 1/8 rivet.' })), shows: [] }],
   'api/health/route.ts': [{ without: () => '/api/health', why: 'says whether it can serve' }],
   'api/openapi.json/route.ts': [{ without: () => '/api/openapi.json', why: 'describes the interface' }],
   // Answers with counts and line numbers, never with what stood in a line.
