@@ -12,7 +12,7 @@ import { askFor } from '@/lib/services/desk/ask-for'
 import { pressStamp } from '@/lib/services/stamps/press-stamp'
 import { withdrawStamp } from '@/lib/services/stamps/withdraw-stamp'
 
-const stampFields = ['postId', 'revision', 'basis', 'page', 'step', 'plansRevision', 'edition', 'paragraph', 'build', 'builtWhen', 'replyDate', 'scope'] as const
+const stampFields = ['postId', 'revision', 'basis', 'page', 'step', 'plansRevision', 'edition', 'paragraph', 'build', 'builtWhen', 'replyDate', 'scope', 'conflictReason'] as const
 
 /** Where the form wants to go on: the desk's next tag; else the post. */
 const backTo = (form: FormData, entryId: number, postId: number) => sitePath(field(form, 'returnTo')) ?? paths.entry(entryId, postId)

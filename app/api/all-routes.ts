@@ -10,6 +10,8 @@ import * as health from './health/route'
 import * as importing from './import/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
+import * as measurements from './measurements/route'
+import * as numbersCheck from './numbers-check/route'
 import * as operations from './operations/route'
 import * as outcome from './posts/[id]/outcome/route'
 import * as reliance from './posts/[id]/reliance/route'
@@ -17,6 +19,8 @@ import * as remarks from './posts/[id]/remarks/route'
 import * as stamps from './posts/[id]/stamps/route'
 import * as preview from './preview/route'
 import * as search from './search/route'
+import * as shopTable from './shop/[table]/route'
+import * as shop from './shop/route'
 import * as similar from './similar/route'
 import * as withdraw from './stamps/[id]/withdraw/route'
 import * as suggest from './suggest/route'
@@ -39,6 +43,10 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/kits': kits,
   '/api/kits/{kit}': kit,
   '/api/operations': operations,
+  '/api/measurements': measurements,
+  '/api/numbers-check': numbersCheck,
+  '/api/shop': shop,
+  '/api/shop/{table}': shopTable,
   '/api/import': importing,
   '/api/health': health,
 }

@@ -3,6 +3,7 @@ import type { ReactNode } from 'react'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { groupCautions } from '@/lib/domain/cautions/group-cautions'
 import { hitKindLine } from '@/lib/format/kind-line'
+import type { Caution } from '@/lib/schemas/post'
 import type { Hit } from '@/lib/schemas/search'
 import type { Route } from 'next'
 import { HitRow } from './hit-row'
@@ -22,16 +23,17 @@ export function HitList({ hits, actionFor }: { hits: readonly Hit[]; actionFor?:
 }
 
 /**
- * One plate for all hits of a page, a short line a topic with on how many of them it stands; the full texts head each entry.
+ * `also`: cautions of a computed answer on the same page. One plate for all hits of a page, a short line a topic with on how many of them it stands; the full texts head each entry.
  * A list has to leave room for what was looked up.
  */
-export function HitPlate({ hits }: { hits: readonly Hit[] }) {
-  const plate = groupCautions(hits.map((hit) => ({ where: String(hit.id), cautions: standing(hit) })))
+export function HitPlate({ hits, also = [] }: { hits: readonly Hit[]; also?: readonly Caution[] }) {
+  const plate = groupCautions([...hits.map((hit) => ({ where: String(hit.id), cautions: standing(hit) })), { where: '', cautions: also }])
   if (!plate) return null
-  const short = new Map(hits.flatMap((hit) => hit.cautions.map((c) => [c.code, c.short] as const)))
+  const short = new Map([...also, ...hits.flatMap((hit) => hit.cautions)].map((c) => [c.code, c.short] as const))
   return (
     <CautionPlate brief cautions={plate.lines.map((line) => {
-      const where = hits.length === 1 ? undefined : `${line.where.length} of ${hits.length}`
+      const on = line.where.filter((w) => w !== '').length
+      const where = hits.length === 1 || on === 0 ? undefined : `${on} of ${hits.length}`
       return { ...line, text: withoutTopic(short.get(line.code) ?? line.text), where }
     })} />
   )

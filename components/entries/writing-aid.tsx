@@ -8,9 +8,10 @@ import { useState } from 'react'
 import { CautionWord, gravestWord } from '@/components/cautions/caution-word'
 import { Prose } from '@/components/prose/prose'
 import { Button } from '@/components/ui/button'
-import { previewOf, requiredOf, similarTo, type WritingText } from '@/lib/client/queries'
+import { checksOf, previewOf, requiredOf, similarTo, type WritingText } from '@/lib/client/queries'
 import { useRested } from '@/lib/client/use-rested'
 import type { Caution } from '@/lib/schemas/post'
+import { NumbersCheckList } from './numbers-check-list'
 import { Acknowledge } from './acknowledge'
 
 interface Props { text: WritingText; shown: string; wantsSimilar: boolean; acknowledged: readonly string[]; standing: readonly Caution[] }
@@ -30,6 +31,7 @@ function Aid({ text, shown, wantsSimilar, acknowledged, standing }: Props) {
     <>
       {wantsSimilar ? <Similar text={settled} /> : null}
       <Preview body={shown} />
+      <Numbers body={shown} hardware={settled.hardware} />
       <Acknowledge cautions={required} acknowledged={acknowledged} />
     </>
   )
@@ -56,6 +58,14 @@ function Similar({ text }: { text: WritingText }) {
       )}
     </section>
   )
+}
+
+/** Never in the way of posting: a table can be wrong for this part, and the author knows which part it is. */
+function Numbers({ body, hardware }: { body: string; hardware: readonly string[] }) {
+  const rested = useRested(body, 600)
+  const { data } = useQuery({ ...checksOf(rested, hardware), placeholderData: keepPreviousData })
+  if (!data || data.checks.length === 0) return null
+  return <section className="aid" aria-live="polite"><h2>Numbers check</h2><NumbersCheckList posts={[{ label: '', checks: data.checks }]} /></section>
 }
 
 function Preview({ body }: { body: string }) {

@@ -8,6 +8,7 @@ import { Checkbox } from '@/components/ui/checkbox'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { FieldError } from '@/components/ui/field'
 import { ChoiceGroup, RadioRow } from '@/components/ui/radio-row'
+import { TextArea } from '@/components/ui/text-area'
 import { TextField } from '@/components/ui/text-field'
 import type { Missing } from '@/lib/domain/stamps/stamp-state'
 import { EmptyStamp } from './empty-stamp'
@@ -25,6 +26,8 @@ export interface StampFormProps {
   returnTo?: string | undefined
   /** The post needs one stamp only. */
   single?: boolean
+  /** Advised numbers that no listed source allows: the stamp then needs a written reason. */
+  conflicts?: readonly { readonly claim: string; readonly expected?: string | undefined }[]
 }
 
 /** What was typed before a refusal, and what was wrong with it. */
@@ -83,7 +86,7 @@ function Bases({ typed, prefix, plans }: { typed: Typed; prefix: string; plans: 
   )
 }
 
-export function StampForm({ action, postId, revision, missing, submission, plans, returnTo, single = false }: StampFormProps) {
+export function StampForm({ action, postId, revision, missing, submission, plans, returnTo, single = false, conflicts = [] }: StampFormProps) {
   const { state, submit, isPending, form, errorOf, valueOf } = useForm(action)
   const prefix = `stamp-${postId}`
   const errors = state.errors.length > 0 ? state.errors.map((e) => ({ id: `${prefix}-${e.path}`, message: e.message })) : state.message ? [{ message: state.message }] : []
@@ -99,6 +102,10 @@ export function StampForm({ action, postId, revision, missing, submission, plans
           <ChoiceGroup id={`${prefix}-basis`} legend="Basis: what makes you sure?" error={errorOf('basis')}>
             <Bases typed={{ errorOf, valueOf }} prefix={prefix} plans={plans} />
           </ChoiceGroup>
+          {conflicts.length > 0 ? (
+            <TextArea id={`${prefix}-conflictReason`} name="conflictReason" label="Why it is right all the same" rows={3} maxLength={1000} defaultValue={valueOf('conflictReason')} error={errorOf('conflictReason')}
+              help={`Differs from the shop table: ${conflicts.map((c) => `“${c.claim}”${c.expected ? ` (${c.expected})` : ''}`).join('; ')}. Your reason is shown with the stamp.`} />
+          ) : null}
         </div>
         <div className="grid justify-items-center gap-3">
           <EmptyStamp which={single && missing === 'first' ? 'only' : (missing ?? 'only')} />

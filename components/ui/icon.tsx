@@ -7,6 +7,7 @@ const paths = {
   account: 'M12 4a3.5 3.5 0 1 1 0 7 3.5 3.5 0 0 1 0-7ZM5 20c.4-3.6 3-6 7-6s6.6 2.4 7 6Z',
   kits: 'M12 3v18M3 12.5l9-3.5 9 3.5M8.5 20.5 12 18.5l3.5 2',
   plans: 'M4 4h16v16H4ZM4 15.5h16M14.5 15.5V20',
+  shop: 'M4 5h16v14H4ZM4 9.5h16M4 14h16M10 5v14',
   attention: 'M4 4h16v16H4ZM12 7.5v5.5M12 16v.6',
 } as const
 

@@ -1,6 +1,7 @@
 // Keys and fetchers of what the browser reads from the API. Every fetch can be cancelled.
 import { queryOptions } from '@tanstack/react-query'
 import type { Caution } from '@/lib/schemas/post'
+import type { NumbersCheckItem } from '@/lib/schemas/numbers-check'
 import type { Hit, SearchResult } from '@/lib/schemas/search'
 
 async function readJson<T>(url: string, signal: AbortSignal, body?: unknown): Promise<T> {
@@ -33,6 +34,12 @@ export const requiredOf = (text: WritingText) => queryOptions({
   queryKey: ['required', text], staleTime: 30_000,
   queryFn: ({ signal }) => readJson<{ cautions: Caution[] }>('/api/cautions/required', signal,
     { title: text.title.slice(0, 160), body: text.body, tasks: text.tasks, sections: text.sections, hardware: text.hardware, ...(text.kit ? { kit: text.kit } : {}) }),
+})
+
+/** The numbers of a text against the shop tables. */
+export const checksOf = (body: string, hardware: readonly string[]) => queryOptions({
+  queryKey: ['numbers-check', body, hardware], enabled: body.trim() !== '', staleTime: 30_000,
+  queryFn: ({ signal }) => readJson<{ checks: NumbersCheckItem[] }>('/api/numbers-check', signal, { text: body, hardware }),
 })
 
 /** Markdown as it will look. */

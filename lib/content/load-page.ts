@@ -1,4 +1,4 @@
-// Our own prose from content/pages, compiled from MDX. MDX is code: what members write never comes here.
+// Our own prose from content/pages and content/shop-notes, compiled from MDX. MDX is code: what members write never comes here.
 import 'server-only'
 import { readdir, readFile, stat } from 'node:fs/promises'
 import path from 'node:path'
@@ -17,41 +17,44 @@ export interface Page { title: string; summary: string; Content: ComponentType }
 
 interface CompiledPage { changedAt: number; title: string; summary: string; body: MDXContent }
 
-const directory = (): string => path.join(process.cwd(), 'content', 'pages')
+/** Folders of content/ that hold pages: the guide, and what stands under each shop table. */
+export type PageFolder = 'pages' | 'shop-notes'
+
+const directory = (folder: PageFolder): string => path.join(process.cwd(), 'content', folder)
 const compiled = new Map<string, Promise<CompiledPage>>()
 
 /**
  * The page named `slug` with `components` in place of HTML elements, or null when there is none. A file is
  * compiled once and again only when it changed. Throws when a page of the repository has bad frontmatter.
  */
-export async function loadPage(slug: string, components: MDXComponents): Promise<Page | null> {
-  const page = await compiledPage(slug)
+export async function loadPage(slug: string, components: MDXComponents, folder: PageFolder = 'pages'): Promise<Page | null> {
+  const page = await compiledPage(slug, folder)
   if (!page) return null
   const { title, summary, body } = page
   return { title, summary, Content: () => createElement(body, { components }) }
 }
 
-/** All pages by title, for lists of links. */
-export async function listPages(): Promise<PageSummary[]> {
-  const pages = await Promise.all((await slugs()).map(async (slug) => ({ slug, page: await compiledPage(slug) })))
+/** All pages of a folder by title, for lists of links. */
+export async function listPages(folder: PageFolder = 'pages'): Promise<PageSummary[]> {
+  const pages = await Promise.all((await slugs(folder)).map(async (slug) => ({ slug, page: await compiledPage(slug, folder) })))
   return pages
     .flatMap(({ slug, page }) => (page ? [{ slug, title: page.title, summary: page.summary }] : []))
     .sort((a, b) => a.title.localeCompare(b.title, 'en'))
 }
 
-async function slugs(): Promise<string[]> {
-  return (await readdir(directory())).filter((name) => name.endsWith('.mdx')).map((name) => name.slice(0, -'.mdx'.length))
+async function slugs(folder: PageFolder): Promise<string[]> {
+  return (await readdir(directory(folder))).filter((name) => name.endsWith('.mdx')).map((name) => name.slice(0, -'.mdx'.length))
 }
 
-async function compiledPage(slug: string): Promise<CompiledPage | null> {
+async function compiledPage(slug: string, folder: PageFolder): Promise<CompiledPage | null> {
   // The listing decides, not the path: an address can't name a file outside the directory.
-  if (!(await slugs()).includes(slug)) return null
-  const file = path.join(directory(), `${slug}.mdx`)
+  if (!(await slugs(folder)).includes(slug)) return null
+  const file = path.join(directory(folder), `${slug}.mdx`)
   const changedAt = (await stat(file)).mtimeMs
-  const kept = await compiled.get(slug)?.catch(() => null)
+  const kept = await compiled.get(file)?.catch(() => null)
   if (kept?.changedAt === changedAt) return kept
   const fresh = compile(file, changedAt)
-  compiled.set(slug, fresh)
+  compiled.set(file, fresh)
   return fresh
 }
 

@@ -2,6 +2,8 @@
 import { z } from 'zod'
 import { CAUTION_TOPICS } from '@/lib/domain/cautions/rule-table'
 import { cautionSchema, outcomesSchema, stampSchema, stampStateSchema } from './post'
+import { measurementSchema } from './measurement'
+import { shopAnswerSchema } from './shop'
 import { limits, sectionCode, slug } from './text'
 
 const count = (max: number) => z.string().regex(/^[0-9]{1,9}$/, 'A whole number.').transform(Number).pipe(z.int().max(max, `At most ${max}.`))
@@ -41,8 +43,9 @@ export const hitSchema = z.object({
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
 })
 export const searchResultSchema = z.object({
-  query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(z.never()), didYouMean: z.string().optional() }),
-  computed: z.array(z.never()), results: z.array(hitSchema), total: z.int(), tookMs: z.number(),
+  query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(measurementSchema), didYouMean: z.string().optional() }),
+  /** A shop table's answer to a query for a number. */
+  computed: z.array(shopAnswerSchema), results: z.array(hitSchema), total: z.int(), tookMs: z.number(),
 })
 export const suggestionSchema = z.object({
   text: z.string(), kind: z.enum(['question', 'lesson', 'section', 'operation']), id: z.int().optional(), url: z.string(),

@@ -7,6 +7,8 @@ import { idText } from './text'
 const fields = z.object({
   postId: idText, revision: z.string(), basis: z.string(), page: z.string(), step: z.string(), plansRevision: z.string(), beforeMe: z.boolean(),
   edition: z.string(), paragraph: z.string(), build: z.string(), builtWhen: z.string(), replyDate: z.string(), scope: z.string(),
+  /** Only where a number conflicts with a shop table. */
+  conflictReason: z.string().default(''),
 })
 type Fields = z.infer<typeof fields>
 type Fault = (path: string, message: string) => void
@@ -58,7 +60,7 @@ export const stampFormSchema = fields.transform((f, context) => {
   }
   const reference = referenceOf(f, fault)
   if (isFaulty || !reference) return z.NEVER
-  const stamp = newStampSchema.safeParse({ revision: f.revision, ...reference })
+  const stamp = newStampSchema.safeParse({ revision: f.revision, ...reference, ...(f.conflictReason.trim() ? { conflictReason: f.conflictReason } : {}) })
   if (stamp.success) return { postId: f.postId, stamp: stamp.data }
   for (const issue of stamp.error.issues) {
     const path = String(issue.path[0] ?? '')

@@ -32,6 +32,10 @@ const nobody = [404, 404, 404, 404, 404, 404]
 const table: Record<string, () => readonly [string, readonly number[]]> = {
   'the first page': () => ['/', everybody],
   'search': () => ['/search?q=rivet', everybody],
+  'shop tables': () => ['/shop', everybody],
+  'a shop table': () => ['/shop/grommet?bore=3/8', everybody],
+  'the drill chart': () => ['/shop/drills/chart', everybody],
+  'an unknown shop table': () => ['/shop/nothing', nobody],
   'kits': () => ['/kits', everybody],
   'a kit': () => ['/kits/whimbrel-2', [307, 307, 307, 307, 307, 307]],
   'a section': () => ['/kits/whimbrel-2/W-3', everybody],

@@ -3,6 +3,8 @@ import type { Metadata, Route } from 'next'
 import Link from 'next/link'
 import { HitList, HitPlate } from '@/components/entries/hit-list'
 import { RivetLine } from '@/components/layout/rivet-line'
+import { CautionPlate } from '@/components/cautions/caution-plate'
+import { ComputedAnswer } from '@/components/shop/computed-answer'
 import { SearchFilters } from '@/components/search/search-filters'
 import { EmptyState } from '@/components/ui/empty-state'
 import { LinkButton } from '@/components/ui/link-button'
@@ -52,9 +54,11 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
       <h1 className="sr-only">{words ? `Results for ${words}` : 'All entries'}</h1>
       {query.didYouMean ? <NoticeLine icon="search">Did you mean <Link href={paths.search({ ...address, q: query.didYouMean, offset: undefined })}>{query.didYouMean}</Link>?</NoticeLine> : null}
       {query.ignored.length > 0 ? <NoticeLine>Too many words: left out {query.ignored.join(', ')}.</NoticeLine> : null}
+      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} />)}
+      {result.computed.length > 0 && results.length === 0 ? <CautionPlate cautions={result.computed.flatMap((a) => a.cautions)} /> : null}
       {results.length === 0 ? <NothingFound words={words} ask={ask} address={address} /> : (
         <>
-          <HitPlate hits={results} />
+          <HitPlate hits={results} also={result.computed.flatMap((a) => a.cautions)} />
           {groups.map((group) => (
             <section key={group.title} aria-labelledby={`group-${group.title}`} className="page-body">
               <RivetLine title={group.title} id={`group-${group.title}`} />

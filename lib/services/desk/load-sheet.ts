@@ -5,6 +5,8 @@ import { getKit } from '@/db/queries/kits'
 import type { AppContext } from '@/lib/context'
 import { AppError } from '@/lib/errors'
 import type { Member } from '@/lib/policy/actor'
+import { checkNumbers } from '@/lib/domain/numbers-check/check-numbers'
+import type { NumbersCheck } from '@/lib/domain/numbers-check/numbers-check'
 import { can } from '@/lib/policy/can'
 import type { AskFor } from '@/lib/schemas/acts'
 import type { Answer, Entry } from '@/lib/schemas/post'
@@ -19,6 +21,8 @@ export interface DeskSheet {
   maker: string | undefined
   /** '5712 Wing ribs to spar': JASC code and title of each section. */
   systems: string[]
+  /** Its numbers against the shop tables. */
+  checks: NumbersCheck[]
   mayStamp: boolean
   mayAsk: boolean
   /** What its author was asked for and has not answered. */
@@ -40,6 +44,7 @@ export async function loadSheet(context: AppContext & { actor: Member }, entryId
   return {
     entry, post, row: row < 0 ? null : row + 1, maker: kit?.maker,
     systems: entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? []).map((s) => (s.jasc ? `${s.jasc} ${s.title}` : s.title)),
+    checks: checkNumbers(post.text, { tasks: entry.tasks, hardware: entry.hardware }),
     mayStamp: can(context.actor, 'post.stamp', subject) && !standsMine,
     mayAsk: can(context.actor, 'post.ask-for', subject),
     requests: requests.map((r) => r.what),

@@ -6,6 +6,7 @@ import type { AppContext } from '@/lib/context'
 import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { topicsOfSystem } from '@/lib/domain/cautions/critical-systems'
+import type { NumbersCheck } from '@/lib/domain/numbers-check/numbers-check'
 import { jascTitle } from '@/lib/content/jasc'
 import { can, type PostSubject } from '@/lib/policy/can'
 import { SearchLoadingError } from '@/lib/search/messages'
@@ -14,6 +15,7 @@ import type { AskFor } from '@/lib/schemas/acts'
 import type { Answer, Entry } from '@/lib/schemas/post'
 import type { Hit } from '@/lib/schemas/search'
 import { loadEntryWithPosts, subjectOf } from '@/lib/services/posts/load-entry'
+import { checkPostNumbers } from '@/lib/services/posts/check-post-numbers'
 import { findOtherCases } from '@/lib/services/search/find-similar'
 
 /** What this reader may do with one post, and what they have marked on it. */
@@ -27,6 +29,8 @@ export interface PostRights {
   memberId: number
   /** What mentors wait for before they stamp it. */
   askedFor: AskFor['what'][]
+  /** Its numbers against the shop tables. */
+  checks: NumbersCheck[]
 }
 export interface EntryPage {
   entry: Entry
@@ -53,7 +57,7 @@ export async function getEntryPage(context: AppContext, id: number): Promise<Ent
   const requests = await listOpenRequests(context.reader, ids)
   const own = context.actor ? await listOwnMarks(context.reader, context.actor.id, ids) : { outcomes: [], reliances: [] }
   const [found] = posts
-  const rights = new Map(posts.map((p) => [p.id, rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what))]))
+  const rights = new Map(posts.map((p) => [p.id, { checks: checkPostNumbers(p, p.parentId === null ? null : (found ?? null)), ...rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what)) }]))
   const sections = entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? [])
   return {
     entry, kit: { slug: entry.kit, name: kit?.name ?? '', maker: kit?.maker ?? '' }, sections, tasks: entry.tasks.map((slug) => ({ slug, title: tasks.find((t) => t.slug === slug)?.title ?? slug })),
@@ -63,7 +67,7 @@ export async function getEntryPage(context: AppContext, id: number): Promise<Ent
   }
 }
 
-function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answer | undefined, stateReason: string | null, own: Awaited<ReturnType<typeof listOwnMarks>>, requests: AskFor['what'][]): PostRights {
+function rightsOn(context: AppContext, subject: PostSubject, post: Entry | Answer | undefined, stateReason: string | null, own: Awaited<ReturnType<typeof listOwnMarks>>, requests: AskFor['what'][]): Omit<PostRights, 'checks'> {
   const { actor } = context
   const told = own.outcomes.find((o) => o.postId === post?.id)
   const goesBy = own.reliances.find((r) => r.postId === post?.id)

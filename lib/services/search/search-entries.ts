@@ -1,6 +1,8 @@
 // Look up: words and filters -> hits. Without words, the newest that fit the filters.
 import 'server-only'
 import { countEntries, listEntryIds } from '@/db/queries/entries'
+import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
+import { computeQuery } from '@/lib/services/shop/compute-query'
 import type { AppContext } from '@/lib/context'
 import type { SearchQuery, SearchResult } from '@/lib/schemas/search'
 import { presentHits } from './present-hits'
@@ -15,7 +17,7 @@ export async function searchEntries(context: AppContext, query: SearchQuery): Pr
     : await context.search.search({ text, filters, limit: query.limit, offset: query.offset })
   const results = await presentHits(context, answer.hits)
   return {
-    query: { text: query.q, ignored: answer.ignored, measurements: [], ...(answer.didYouMean !== null ? { didYouMean: answer.didYouMean } : {}) },
-    computed: [], results, total: answer.total, tookMs: Math.round((performance.now() - startedAt) * 10) / 10,
+    query: { text: query.q, ignored: answer.ignored, measurements: findMeasurements(text), ...(answer.didYouMean !== null ? { didYouMean: answer.didYouMean } : {}) },
+    computed: query.offset === 0 ? computeQuery(text) : [], results, total: answer.total, tookMs: Math.round((performance.now() - startedAt) * 10) / 10,
   }
 }

@@ -10,12 +10,15 @@ import { AppError, refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import type { NewStamp } from '@/lib/schemas/acts'
+import { advisedConflicts } from '@/lib/domain/numbers-check/advised-conflicts'
+import { checkPostNumbers } from '@/lib/services/posts/check-post-numbers'
 import { judge, judgePost } from '@/lib/services/posts/judge-post'
 import { requirePost } from '@/lib/services/posts/require-post'
 import { afterWrite } from '@/lib/services/posts/after-write'
 
 /**
- * Returns the stamp's id. 403 own words, no mentor, or a reply for one serial; 409 when `revision` is not the current one,
+ * Returns the stamp's id. 403 own words, no mentor, or a reply for one serial; 422 for a text that conflicts with a shop table without a
+ * reason; 409 when `revision` is not the current one,
  * or this mentor's stamp stands on it already.
  */
 export async function pressStamp(context: AppContext, postId: number, input: NewStamp): Promise<{ id: number; entryId: number }> {
@@ -28,6 +31,10 @@ export async function pressStamp(context: AppContext, postId: number, input: New
     if (revisionNumber(input.revision) !== found.current.number) {
       const current = { id: postId, revision: revisionLetter(found.current.number) }
       throw new AppError('conflict', `This is Rev ${current.revision} now. Read it again before you stamp it.`, { current })
+    }
+    const [conflict] = advisedConflicts(checkPostNumbers(found, question))
+    if (conflict && input.conflictReason === undefined) {
+      throw refuse.invalid('conflictReason', `“${conflict.claim}” differs from the shop table${conflict.expected ? ` (${conflict.expected})` : ''}. Write why it is right all the same, or ask its author.`)
     }
     const own = found.stamps.find((s) => s.mentorId === actor.id && isLive(s, { currentRevision: found.current.number, questionRevision }))
     if (own && judge(found, questionRevision).state !== 'in-question') throw new AppError('conflict', 'Your stamp stands on this revision already.', { current: { id: postId, revision: input.revision } })

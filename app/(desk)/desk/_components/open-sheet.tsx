@@ -6,6 +6,7 @@ import { randomUUID } from 'node:crypto'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { AskForForm } from '@/components/desk/ask-for-form'
 import { AskedForLine } from '@/components/desk/asked-for-line'
+import { NumbersCheckList } from '@/components/entries/numbers-check-list'
 import { RevisionLetter } from '@/components/entries/revision-letter'
 import { Sheet } from '@/components/entries/sheet'
 import { TitleBlock } from '@/components/entries/title-block'
@@ -16,6 +17,7 @@ import { LinkButton } from '@/components/ui/link-button'
 import { NoticeLine } from '@/components/ui/notice-line'
 import { askForAction, pressStampAction } from '@/app/(site)/stamp-actions'
 import { groupCautions } from '@/lib/domain/cautions/group-cautions'
+import { advisedConflicts } from '@/lib/domain/numbers-check/advised-conflicts'
 import { formatDate } from '@/lib/format/date'
 import { paths } from '@/lib/paths'
 import type { DeskSheet } from '@/lib/services/desk/load-sheet'
@@ -51,6 +53,7 @@ export function OpenSheet({ sheet, next, closed, isHanging }: OpenSheetProps) {
             <Advice post={post} />
           </div>
         )}
+        {sheet.checks.length > 0 ? <div className="border-t border-line px-5 py-4"><NumbersCheckList posts={[{ label: '', checks: sheet.checks }]} /></div> : null}
         <div className="grid border-t border-ink lg:grid-cols-[13rem_auto_minmax(0,1fr)]">
           <Facts sheet={sheet} />
           <Pressed post={post} />
@@ -95,13 +98,13 @@ function Pressed({ post }: { post: Shown }) {
 }
 
 /** The empty place with the form, or the next step where there is nothing to stamp. */
-function StampPlace({ sheet: { entry, post, mayStamp }, next }: { sheet: DeskSheet; next: Route }) {
+function StampPlace({ sheet: { entry, post, mayStamp, checks }, next }: { sheet: DeskSheet; next: Route }) {
   const frame = 'border-line px-5 py-4 max-lg:border-t lg:border-l'
   if (post.kind === 'question') return <div className={frame}><LinkButton href={paths.entry(entry.id)} look="primary">Say what to do</LinkButton></div>
   if (!mayStamp) return <div className={frame}><NoticeLine>{stampedWords(post)} <Link href={next}>Open the next tag</Link></NoticeLine></div>
   return (
     <div className={frame}>
-      <StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} submission={randomUUID()} plans={entry.plans[0]} returnTo={next} />
+      <StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} submission={randomUUID()} plans={entry.plans[0]} conflicts={advisedConflicts(checks)} returnTo={next} />
     </div>
   )
 }

@@ -1,5 +1,6 @@
 // A lesson: its parts one below the other on one sheet, order advice, and the title block with its stamps.
 import { CautionLine } from '@/components/cautions/caution-line'
+import { NumbersCheckSheet } from '@/components/entries/numbers-check-list'
 import { Sheet } from '@/components/entries/sheet'
 import { Prose } from '@/components/prose/prose'
 import type { EntryPage } from '@/lib/services/entries/get-entry-page'
@@ -13,6 +14,7 @@ export function LessonSheet({ page, allCautions }: { page: EntryPage; allCaution
   if (!own) return null
   const hours = entry.parts?.['hours']
   return (
+    <>
     <Sheet as="article" id={`post-${entry.id}`} className="lesson">
       <div className="sheet-body">
         <PostStateNotice post={entry} rights={own} />
@@ -30,5 +32,7 @@ export function LessonSheet({ page, allCautions }: { page: EntryPage; allCaution
       <PostTitleBlock post={entry} extra={typeof hours === 'number' ? [{ label: 'Hours', value: String(hours), width: 'half' }] : []} />
       <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} />
     </Sheet>
+    <NumbersCheckSheet posts={[{ label: 'Lesson', checks: own.checks }]} />
+    </>
   )
 }

@@ -14,6 +14,7 @@ import { WithdrawStampForm } from '@/components/stamps/withdraw-stamp-form'
 import { Disclosure } from '@/components/ui/disclosure'
 import { LinkButton } from '@/components/ui/link-button'
 import { NoticeLine } from '@/components/ui/notice-line'
+import { advisedConflicts } from '@/lib/domain/numbers-check/advised-conflicts'
 import { basisLabel, scopeLabel } from '@/lib/format/basis'
 import { formatDate } from '@/lib/format/date'
 import { paths } from '@/lib/paths'
@@ -87,7 +88,7 @@ export function PostActs({ post, rights, allCautions, plans }: { post: Shown; ri
         {rights.edit ? <LinkButton href={post.kind === 'answer' ? paths.editAnswer(post.id) : paths.editEntry(post.id)}>Edit</LinkButton> : null}
         {older ? <LinkButton href={paths.revisions(post.id, older.revision, post.revision)} look="quiet">Read Rev {older.revision}</LinkButton> : null}
         {rights.tell ? <Disclosure summary={rights.told ? 'Change how it went' : 'Tell how it went'}><OutcomeForm action={outcomeAction} postId={post.id} revision={post.revision} critical={post.needsTwo} told={rights.told} /></Disclosure> : null}
-        {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} plans={plans} submission={randomUUID()} /></Disclosure> : null}
+        {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} plans={plans} conflicts={advisedConflicts(rights.checks)} submission={randomUUID()} /></Disclosure> : null}
         {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
         {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       </div>

@@ -1,0 +1,65 @@
+// One shop table with its inputs in the address: the figure, the number, cautions, every result with its source, what to know.
+import type { Metadata, Route } from 'next'
+import { notFound } from 'next/navigation'
+import { CautionPlate } from '@/components/cautions/caution-plate'
+import { Sheet, SheetHead } from '@/components/entries/sheet'
+import { PageTitle } from '@/components/layout/page-title'
+import { PlansWin } from '@/components/layout/plans-win'
+import { PrintNote } from '@/components/layout/print-note'
+import { ShopAnswerSheet } from '@/components/shop/shop-answer-sheet'
+import { ShopContents } from '@/components/shop/shop-contents'
+import { shopFieldId } from '@/components/shop/shop-form'
+import { ShopResultList } from '@/components/shop/shop-result-list'
+import { UnitsSwitch } from '@/components/shop/units-switch'
+import { ErrorSummary } from '@/components/ui/error-summary'
+import { LinkButton } from '@/components/ui/link-button'
+import { PrintButton } from '@/components/ui/print-button'
+import { pageContext } from '@/lib/auth/guards'
+import { loadPage } from '@/lib/content/load-page'
+import { SHOP_TABLES, shopTable } from '@/lib/domain/shop/shop-tables'
+import { env } from '@/lib/env'
+import { paths } from '@/lib/paths'
+import { answerTable } from '@/lib/services/shop/answer-table'
+import { shopCautions } from '@/lib/services/shop/shop-cautions'
+import { readShopAddress } from './read-shop-address'
+
+export async function generateMetadata({ params }: PageProps<'/shop/[table]'>): Promise<Metadata> {
+  return { title: shopTable((await params).table)?.title ?? 'Shop tables' }
+}
+
+export default async function ShopTablePage({ params, searchParams }: PageProps<'/shop/[table]'>) {
+  const context = await pageContext()
+  const table = shopTable((await params).table)
+  if (!table) notFound()
+  const { raw, values, first, units } = readShopAddress(table, await searchParams)
+  const answered = answerTable(table, raw)
+  const [answer, errors] = answered.ok ? [answered.answer, []] : [null, answered.errors]
+  const note = await loadPage(table.slug, {}, 'shop-notes')
+  const address = answer?.url ?? paths.shopTable(table.slug)
+  const inUnits = (system: 'inch' | 'metric') => paths.shopTable(table.slug, { ...values, units: system })
+  return (
+    <div className="shop-room">
+      <ShopContents tables={SHOP_TABLES} current={table.slug} />
+      <div className="shop-main">
+        <PageTitle title={table.title} lead={note?.summary} aside={<UnitsSwitch first={first} hrefs={{ inch: inUnits('inch'), metric: inUnits('metric') }} />} />
+        <ErrorSummary errors={errors.map(({ path, message }) => (table.inputs.some(({ name }) => name === path) ? { id: shopFieldId(path), message } : { message }))} />
+        <ShopAnswerSheet table={table} answer={answer} values={values} errors={errors} first={first} units={units} />
+        <CautionPlate cautions={shopCautions(table)} />
+        {answer ? (
+          <Sheet as="section" labelledBy="results">
+            <SheetHead title="Every result, and whose it is" id="results" />
+            <ShopResultList results={answer.results} first={first} />
+          </Sheet>
+        ) : null}
+        {note ? <Sheet as="section" labelledBy="note"><SheetHead title={note.title} id="note" /><div className="sheet-body prose prose-small"><note.Content /></div></Sheet> : null}
+        <PlansWin />
+        <div className="button-row no-print">
+          <PrintButton />
+          {table.slug === 'drills' ? <LinkButton href={paths.drillChart}>Wall chart to print</LinkButton> : null}
+          <LinkButton href={address as Route} look="quiet">Link to this answer</LinkButton>
+        </div>
+        <PrintNote address={`${env().publicUrl}${address}`} printedAt={context.now} />
+      </div>
+    </div>
+  )
+}

@@ -1,0 +1,12 @@
+// The numbers check of a post: its text against the shop tables, read with the hardware of its entry.
+import 'server-only'
+import type { CautionedPost } from '@/db/queries/cautioned-post'
+import { wholeText } from '@/lib/domain/entries/entry-text'
+import { checkNumbers } from '@/lib/domain/numbers-check/check-numbers'
+import type { NumbersCheck } from '@/lib/domain/numbers-check/numbers-check'
+
+/** Every check of the post's current text; an answer takes its question's hardware and tasks. */
+export function checkPostNumbers(found: CautionedPost, question: CautionedPost | null): NumbersCheck[] {
+  const { tasks, hardware } = (question ?? found).current
+  return checkNumbers(found.rendering?.plain ?? wholeText(found.kind, found.current.parts, found.current.body), { tasks, hardware })
+}

@@ -1,0 +1,34 @@
+// One answer of a shop table as pages and API show it: results with their labels, what was understood, cautions, permanent link.
+import 'server-only'
+import { linkInputs, readAs } from '@/lib/domain/shop/input-words'
+import { withMakerLimits, type MakerLimit } from '@/lib/domain/shop/maker-limits'
+import type { InputError, RawInputs } from '@/lib/domain/shop/shop-input'
+import type { ShopResult, ShopTable } from '@/lib/domain/shop/shop-table'
+import { paths } from '@/lib/paths'
+import type { ShopAnswer, ShopAnswerResult } from '@/lib/schemas/shop'
+import { shopCautions } from './shop-cautions'
+
+interface Beside {
+  /** What was understood, where the inputs came from words; otherwise the inputs themselves are named. */
+  readAs?: string
+  alternatives?: ShopAnswer['alternatives']
+  /** The kit maker's own limits, which come before the handbook's. */
+  limits?: readonly MakerLimit[]
+}
+export type TableAnswer = { ok: true; answer: ShopAnswer } | { ok: false; errors: InputError[] }
+
+/** Never throws: inputs out of limits come back as errors that name the field. */
+export function answerTable(table: ShopTable, raw: RawInputs, beside: Beside = {}): TableAnswer {
+  const outcome = table.compute(raw)
+  if (!outcome.ok) return outcome
+  const results = withMakerLimits(table.slug, outcome.results, beside.limits ?? [])
+  const answer: ShopAnswer = {
+    table: table.slug, inputs: { ...outcome.inputs }, readAs: beside.readAs ?? readAs(table, outcome.inputs), alternatives: beside.alternatives ?? [],
+    results: results.map((result) => labelled(table, result)), cautions: shopCautions(table), url: paths.shopTable(table.slug, linkInputs(table, raw)),
+  }
+  return { ok: true, answer }
+}
+
+function labelled(table: ShopTable, result: ShopResult): ShopAnswerResult {
+  return { ...result, label: table.results.find(({ name }) => name === result.name)?.label ?? result.name }
+}
