@@ -83,7 +83,7 @@ describe('the audit trail', () => {
 })
 
 describe('the test databases', () => {
-  it.each(['/etc/pilothole.db', '/srv/pilothole/data/pilothole.db', '/pilothole.db'])('refuse %s: it lies outside the temporary folder', (file) => {
+  it.each(['/etc/pilothole.db', '/usr/pilothole.db', '/pilothole.db'])('refuse %s: it lies outside the temporary folder', (file) => {
     expect(() => requireTemporary(file)).toThrow('outside the temporary folder')
   })
 })
