@@ -1,5 +1,5 @@
 // One measured number against what is promised, and how results are shown and kept.
-import { mkdirSync, writeFileSync } from 'node:fs'
+import { mkdirSync, readFileSync, writeFileSync } from 'node:fs'
 import os from 'node:os'
 import path from 'node:path'
 
@@ -12,6 +12,17 @@ export const machine = () => ({
   processor: os.cpus()[0]?.model.trim() ?? 'unknown', cores: os.cpus().length, memoryMB: Math.round(os.totalmem() / 1_048_576),
   node: process.version, system: `${os.type()} ${os.release()}`, loadAverage: os.loadavg().map((load) => Math.round(load * 100) / 100),
 })
+
+/** Processor time the whole machine has spent since it started, in milliseconds; 0 where the system does not say. */
+export function machineBusyMs(): number {
+  try {
+    // proc(5), first line of /proc/stat: user nice system idle iowait irq softirq steal, in ticks of 10 ms.
+    const [user = 0, nice = 0, system = 0, , , irq = 0, softirq = 0, steal = 0] = (/^cpu +(.*)$/m.exec(readFileSync('/proc/stat', 'utf8'))?.[1] ?? '').split(' ').map(Number)
+    return (user + nice + system + irq + softirq + steal) * 10
+  } catch {
+    return 0
+  }
+}
 
 /** Prints the table, writes dist/bench-<name>.json, and says whether every promise was kept. */
 export function report({ name, measured, detail }: Result, before: ReturnType<typeof machine>): boolean {
