@@ -3,6 +3,8 @@ import 'server-only'
 import { mkdirSync } from 'node:fs'
 import { openDatabase } from '@/db/client'
 import { schemaMismatch } from '@/db/migrate'
+import { cautionTable } from './content/caution-table'
+import { requiredCautions } from './domain/cautions/required-cautions'
 import { env, SettingsError } from './env'
 import { watchClientAddresses } from './http/client-address'
 import { systemClock } from './clock'
@@ -23,6 +25,8 @@ export async function startServer(): Promise<void> {
     process.exit(1)
   }
   watchClientAddresses()
+  // Compiles the rule table, once a process and not in the first builder's way.
+  requiredCautions(cautionTable, { text: '', operations: [], tasks: [], hardware: [], jasc: [] })
   const { database } = await runtime()
   await noteRulesVersion(database)
   // Beside the first requests, not before them: what was judged by an older table warned already, by that table.
