@@ -1,4 +1,4 @@
-// npm run bench -- writers|load|start|kill: measures what is promised (README, Numbers) and ends with 1 when a promise is broken.
+// npm run bench -- writers|load|start|kill: measures what is promised (DEVELOPERS.md, Numbers) and ends with 1 when a promise is broken.
 // The measuring itself stands in tests/measure. `load` and `kill` need a production build.
 import { parseArgs } from 'node:util'
 import { measureKill } from '../tests/measure/kill-nine'
