@@ -39,11 +39,12 @@ const port = readPort()
 await requireFreePort(port)
 await ensureInstalled()
 ensureSecret(path.resolve(root, process.env.DATA_DIR || 'data'))
-await must('Migrating the database', runTypeScript('scripts/migrate.ts'))
-await must('Seeding the demo', runTypeScript('scripts/seed.ts', ['--demo']))
+// Before the seed, which renders its texts in a worker that the build makes.
 if (await buildWhenChanged() === 'failed') {
   console.error('The build failed.')
   process.exit(1)
 }
+await must('Migrating the database', runTypeScript('scripts/migrate.ts'))
+await must('Seeding the demo', runTypeScript('scripts/seed.ts', ['--demo']))
 await serve(port)
 printSignIns(port)

@@ -1,9 +1,9 @@
 // Fills an empty database with the demo scenario, through the same laws as everybody: posts, revisions, stamps, reports.
 import 'server-only'
-import { count } from 'drizzle-orm'
+import { count, eq } from 'drizzle-orm'
 import type { Database, Transaction } from '@/db/client'
-import { member, mentorship } from '@/db/schema'
-import { write } from '@/db/transaction'
+import { member, mentorship, setting } from '@/db/schema'
+import { write, writeQuietly } from '@/db/transaction'
 import { hashPassword } from '@/lib/auth/password'
 import { demoContent, demoPassword } from '@/lib/content/demo-content'
 import type { Renderer } from '@/lib/render/renderer'
@@ -18,14 +18,32 @@ const joinedDaysAgo = 900
 /** Seeds when there is no member yet; returns the number of entries, 0 when there was something. */
 export async function seedDemo(database: Database, renderer: Renderer, now: number): Promise<number> {
   const [members] = await database.reader.select({ n: count() }).from(member)
-  if (!members || members.n > 0) return 0
+  if (!members || members.n > 0) {
+    await refuseHalfSeeded(database)
+    return 0
+  }
+  // A renderer that does not start must be known before anything is written.
+  await renderer.render({ probe: 'probe' })
+  await keepState(database, 'begun')
   await noteRulesVersion(database)
   // The seed day ends at the moment of seeding, so that nothing lies in the future.
   const at = (daysAgo: number) => Math.round(now - daysAgo * dayMs)
   const people = await seedPeople(database, at)
   await seedPlaces(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
+  await keepState(database, 'complete')
   return demoContent.entries.length
+}
+
+const stateKey = 'demo'
+
+const keepState = (database: Database, value: 'begun' | 'complete') => writeQuietly(database, (tx) =>
+  tx.insert(setting).values({ key: stateKey, value }).onConflictDoUpdate({ target: setting.key, set: { value } }))
+
+/** A seed that was interrupted leaves members without their posts: nobody should take that for the demo. */
+async function refuseHalfSeeded(database: Database): Promise<void> {
+  const [kept] = await database.reader.select().from(setting).where(eq(setting.key, stateKey))
+  if (kept?.value === 'begun') throw new Error('The demo was seeded only in part. Remove the data folder and start again.')
 }
 
 async function seedPeople(database: Database, at: (daysAgo: number) => number): Promise<SeedPeople> {
