@@ -1,15 +1,9 @@
 // Cautions as a page shows them: one grouped plate at its head, one embedded line a post (ANSI Z535.6: grouped and embedded messages).
 // Which cautions are required is not decided here.
-import { CAUTION_TOPICS, SIGNAL_WORDS, type CautionTopic, type SignalWord } from './rule-table'
+import { CAUTION_TOPICS, SIGNAL_WORDS, type CautionDefinition, type CautionTopic, type SignalWord } from './rule-table'
 
 /** What showing a caution needs; posts' cautions carry more. */
-export interface ShownCaution {
-  code: string
-  signalWord: SignalWord
-  topic: CautionTopic
-  title: string
-  text: string
-  short: string
+export interface ShownCaution extends Omit<CautionDefinition, 'twoStamps'> {
   /** Set when a moderator waived it on its post. */
   waived?: unknown
 }
