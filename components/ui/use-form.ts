@@ -16,6 +16,5 @@ export function useForm(action: FormAction) {
     state, submit, isPending, form,
     errorOf: (path: string) => state.errors.find((e) => e.path === path || e.path.startsWith(`${path}.`))?.message,
     valueOf: (name: string, fallback = ''): string => { const v = state.values[name]; return typeof v === 'string' ? v : (v?.[0] ?? fallback) },
-    valuesOf: (name: string): string[] => { const v = state.values[name]; return v === undefined ? [] : typeof v === 'string' ? [v] : v },
   }
 }
