@@ -19,7 +19,7 @@ export default defineConfig({
   resolve: { alias },
   test: {
     projects: [
-      project('unit', { testTimeout: 10_000, sequence: { groupOrder: 0 } }),
+      project('unit', { retry, testTimeout: 10_000, sequence: { groupOrder: 0 } }),
       project('integration', { retry, testTimeout: 30_000, hookTimeout: 60_000, globalSetup: ['tests/support/template-database.ts'], maxWorkers: 2, sequence: { groupOrder: 1 } }),
       project('e2e', { retry, testTimeout: 120_000, hookTimeout: 180_000, globalSetup: ['tests/support/production-server.ts'], fileParallelism: false, sequence: { groupOrder: 2 } }),
     ],

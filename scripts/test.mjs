@@ -9,7 +9,7 @@ import { bin, root, run, runNode } from './run-command.mjs'
 import { runVitest } from './run-vitest.mjs'
 
 const chromium = '/usr/bin/chromium'
-const total = { passed: 0, failed: 0 }
+const total = { passed: 0, failed: 0, names: [] }
 
 async function ensureChromium() {
   if (existsSync(chromium)) return
@@ -27,9 +27,10 @@ async function step(title, work) {
   console.log(`\n== ${title}`)
   const start = performance.now()
   const result = await work()
-  const counts = typeof result === 'boolean' ? { passed: result ? 1 : 0, failed: result ? 0 : 1 } : result
+  const counts = typeof result === 'boolean' ? { passed: result ? 1 : 0, failed: result ? 0 : 1, names: result ? [] : [title] } : result
   total.passed += counts.passed
   total.failed += counts.failed
+  total.names.push(...counts.names)
   console.log(`== ${title}: ${counts.failed === 0 ? 'passed' : 'FAILED'} in ${((performance.now() - start) / 1000).toFixed(1)} s`)
   return counts.failed === 0
 }
@@ -52,5 +53,6 @@ const built = workers && await step('Build', async () => (await buildWhenChanged
 if (built) await step('Browser tests', () => runVitest(['e2e']))
 else console.log('\nBrowser tests left out: there is no build to look at.')
 
+if (total.names.length > 0) console.log(`\nFailed:\n  ${total.names.join('\n  ')}`)
 console.log(`\n${total.passed} passed, ${total.failed} failed`)
 process.exit(total.failed === 0 ? 0 : 1)

@@ -5,7 +5,7 @@ import { asc, eq, sql } from 'drizzle-orm'
 import type { ReaderOrTransaction } from '../client'
 import { post, remark, revision, type outcome, type postCaution, type rendering, type stamp } from '../schema'
 import { oneOf } from './one-of'
-import { listRenderings } from './renderings'
+import { listPlainTexts, listRenderings } from './renderings'
 
 declare const cautioned: unique symbol
 type Row<T extends { $inferSelect: object }> = T['$inferSelect']
@@ -39,6 +39,9 @@ export interface CautionedPost {
   outcomes: { memberId: number; author: string; revision: number; result: Row<typeof outcome>['result']; note: string; createdAt: number }[]
   goingByThis: number
   remarks: { id: number; author: PersonName; body: string; createdAt: number }[]
+  /** The rendered text without its marks; null while it is missing. */
+  plain: string | null
+  /** The HTML too; null while it is missing, and where it was not asked for. */
   rendering: Row<typeof rendering> | null
 }
 
@@ -49,11 +52,14 @@ export const isVisible = eq(post.state, 'visible')
 export const renderingKey = (postId: number, number: number) => `post:${postId}:${number}`
 export const remarkRenderingKey = (remarkId: number) => `remark:${remarkId}`
 
+/** HTML is several times the text: what only searches or lists posts asks for the plain text alone. */
+type Wanted = 'html' | 'plain'
+
 /** Posts by id with everything that hangs on them, in the order of `ids`; unknown ids are left out. */
-export async function listCautionedPosts(reader: ReaderOrTransaction, ids: readonly number[]): Promise<CautionedPost[]> {
+export async function listCautionedPosts(reader: ReaderOrTransaction, ids: readonly number[], wanted: Wanted = 'html'): Promise<CautionedPost[]> {
   const found = new Map<number, CautionedPost>()
   // In pieces, because a statement holds the event loop until it is read.
-  for (let start = 0; start < ids.length; start += 200) await loadInto(found, reader, ids.slice(start, start + 200))
+  for (let start = 0; start < ids.length; start += 200) await loadInto(found, reader, ids.slice(start, start + 200), wanted)
   return ids.flatMap((id) => found.get(id) ?? [])
 }
 
@@ -95,16 +101,22 @@ function preparedLoad(reader: ReaderOrTransaction): ReturnType<typeof prepareLoa
   return known
 }
 
-async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTransaction, ids: readonly number[]): Promise<void> {
+async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTransaction, ids: readonly number[], wanted: Wanted): Promise<void> {
   if (ids.length === 0) return
   const loaded = await preparedLoad(reader).execute({ ids: JSON.stringify(ids) })
   // A rendering belongs to one revision and never changes, so it may be read a moment later.
-  const renderings = new Map((await listRenderings(reader, loaded.map((row) => renderingKey(row.id, row.currentRevision)))).map((r) => [r.key, r]))
-  for (const row of loaded) found.set(row.id, caution(row, renderings.get(renderingKey(row.id, row.currentRevision)) ?? null))
+  const keys = loaded.map((row) => renderingKey(row.id, row.currentRevision))
+  const renderings = wanted === 'html' ? await listRenderings(reader, keys) : []
+  const whole = new Map(renderings.map((r) => [r.key, r]))
+  const plain = new Map((wanted === 'html' ? renderings : await listPlainTexts(reader, keys)).map((r) => [r.key, r.plain]))
+  for (const row of loaded) {
+    const key = renderingKey(row.id, row.currentRevision)
+    found.set(row.id, caution(row, plain.get(key) ?? null, whole.get(key) ?? null))
+  }
 }
 
 /** Gives the brand: the one place that may. */
-function caution(row: Loaded, kept: Row<typeof rendering> | null): CautionedPost {
+function caution(row: Loaded, plain: string | null, kept: Row<typeof rendering> | null): CautionedPost {
   const { author, authorName, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, ...own } = row
   const { id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt } = own
   const history = [...revisions].sort((a, b) => a.number - b.number)
@@ -117,7 +129,7 @@ function caution(row: Loaded, kept: Row<typeof rendering> | null): CautionedPost
     outcomes: [...outcomes].sort((a, b) => a.createdAt - b.createdAt).map(({ member: teller, memberId, revision: number, result, note, createdAt: at }) => ({ memberId, author: teller.name, revision: number, result, note, createdAt: at })),
     goingByThis: reliances.length,
     remarks: [...remarks].sort(byId).map((r) => ({ id: r.id, author: person(r.authorId, r.author, r.authorName), body: r.body, createdAt: r.createdAt })),
-    rendering: kept,
+    plain, rendering: kept,
   } as unknown as CautionedPost
 }
 

@@ -39,8 +39,8 @@ function weightOf(post: CautionedPost): number {
 }
 
 /** The rendered text when it is at hand, else the Markdown as typed: it finds the same words. */
-function plainText({ rendering, current }: CautionedPost): string {
-  if (rendering) return rendering.plain
+function plainText({ plain, current }: CautionedPost): string {
+  if (plain !== null) return plain
   const parts = Object.values(current.parts ?? {}).filter((part) => typeof part === 'string')
   return [...parts, current.body].filter((text) => text !== '').join('\n')
 }

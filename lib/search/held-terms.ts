@@ -26,6 +26,11 @@ export class HeldTerms {
     return this.holds
   }
 
+  /** Equal for slots that hold the same terms; null when there are too many terms for one number. */
+  pattern(slot: number): number | null {
+    return this.width === 1 ? (this.bits[slot] ?? 0) : null
+  }
+
   private readonly holds = (term: number): boolean => ((this.bits[this.slot * this.width + (term >>> 5)] ?? 0) & (1 << (term & 31))) !== 0
 
   private isEmpty(place: number): boolean {

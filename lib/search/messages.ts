@@ -42,9 +42,12 @@ export interface SearchAnswer {
 
 export interface SearchHealth { state: 'loading' | 'ready'; documents: number; sequence: number }
 
+export type WhenOrdered = (entryIds: number[]) => void
+
 /** The asynchronous door. Nobody outside lib/search knows what stands behind it. */
 export interface SearchDoor {
-  search(request: SearchRequest): Promise<SearchAnswer>
+  /** `whenOrdered` hears the entries of the answer as soon as their order is known, while their passages are still being picked. */
+  search(request: SearchRequest, whenOrdered?: WhenOrdered): Promise<SearchAnswer>
   /** Entries like this text: for asking. */
   similar(text: string, filters: SearchFilters, limit: number): Promise<SearchAnswer['hits']>
   /** Titles that complete what is being typed. */

@@ -3,7 +3,7 @@
 import 'server-only'
 import type { Database } from '@/db/client'
 import { currentSequence, listChangesAfter, listVisibleEntryIds } from '@/db/queries/search'
-import { SearchLoadingError, type SearchAnswer, type SearchDoor, type SearchFilters, type SearchHealth, type SearchRequest } from './messages'
+import { SearchLoadingError, type SearchAnswer, type SearchDoor, type SearchFilters, type SearchHealth, type SearchRequest, type WhenOrdered } from './messages'
 import { DocumentReader, readTitles } from './read-documents'
 import { SearchThread } from './search-thread'
 import type { Changes } from './worker-messages'
@@ -50,7 +50,8 @@ class Search implements SearchDoor {
     void this.keepRunning()
   }
 
-  search = async (request: SearchRequest): Promise<SearchAnswer> => this.readyThread().call('search', request, callTimeoutMs)
+  search = async (request: SearchRequest, whenOrdered?: WhenOrdered): Promise<SearchAnswer> =>
+    this.readyThread().call('search', request, callTimeoutMs, whenOrdered)
 
   similar = async (text: string, filters: SearchFilters, limit: number): Promise<SearchAnswer['hits']> =>
     this.readyThread().call('similar', { text, filters, limit }, callTimeoutMs)

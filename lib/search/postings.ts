@@ -1,7 +1,7 @@
 // Which entry holds which term, how often: MiniSearch over one joined field. Entries are slots here, small numbers.
 // MiniSearch multiplies a score by the number of matched terms and makes objects of every match; both are kept away here.
 import 'server-only'
-import MiniSearch from 'minisearch'
+import MiniSearch, { type SearchResult } from 'minisearch'
 import { HeldTerms } from './held-terms'
 import type { Question } from './question'
 
@@ -14,16 +14,15 @@ export class Postings {
     tokenize: (text) => text.split('\n'),
     processTerm: (term) => term,
     searchOptions: { combineWith: 'OR', bm25 },
-    autoVacuum: { minDirtCount: 50, minDirtFactor: 0.05, batchSize: 100, batchWait: 5 },
   })
 
   add(slot: number, terms: readonly string[]): void {
     this.mini.add({ id: slot, terms: terms.join('\n') })
   }
 
-  /** Takes a slot out at once; its postings go little by little (vacuum). */
-  discard(slot: number): void {
-    this.mini.discard(slot)
+  /** Takes a slot out with the terms it was added with. Postings left to MiniSearch's vacuum would count as entries meanwhile and turn rarities negative. */
+  remove(slot: number, terms: readonly string[]): void {
+    this.mini.remove({ id: slot, terms: terms.join('\n') })
   }
 
   /** First pass: who holds what, among slots below `slots`. Every posting is refused a score, so no result is made of it. */
@@ -39,15 +38,22 @@ export class Postings {
   /** Second pass: BM25 by slot of those with `chosen[slot] === 1`, each term by the routes that hold; 0 for all others. */
   score(question: Question, held: HeldTerms, chosen: Uint8Array): Float64Array {
     const scores = new Float64Array(chosen.length)
-    const results = this.search(question, (slot, term) => (chosen[slot] === 1 ? question.weight(term, held.at(slot)) : 0))
-    for (const { id, score, queryTerms } of results) scores[Number(id)] = score / Math.max(1, queryTerms.length)
+    const weigh = (slot: number, term: number) => (chosen[slot] === 1 ? question.weight(term, held.at(slot)) : 0)
+    // Taken as MiniSearch comes by, and refused as results: it would only sort them.
+    this.search(question, weigh, ({ id, score, queryTerms }) => {
+      scores[Number(id)] = score / Math.max(1, queryTerms.length)
+    })
     return scores
   }
 
-  private search(question: Question, weigh: (slot: number, term: number) => number) {
+  private search(question: Question, weigh: (slot: number, term: number) => number, take?: (result: SearchResult) => void): void {
     let last = ''
     let number = 0
-    return this.mini.search(question.terms.join('\n'), {
+    this.mini.search(question.terms.join('\n'), {
+      filter: (result) => {
+        take?.(result)
+        return false
+      },
       boostDocument: (id, term) => {
         // MiniSearch comes term by term, so the number is looked up once a term and not once a posting.
         if (term !== last) {

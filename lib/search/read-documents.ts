@@ -44,7 +44,7 @@ export class DocumentReader {
   private async readPiece(ids: readonly number[]): Promise<Omit<ReadPiece, 'last'>> {
     const { reader } = this.database
     const answerIds = await listAnswerIds(reader, ids)
-    const posts = new Map((await listCautionedPosts(reader, [...ids, ...answerIds.map(({ id }) => id)])).map((post) => [post.id, post] as const))
+    const posts = new Map((await listCautionedPosts(reader, [...ids, ...answerIds.map(({ id }) => id)], 'plain')).map((post) => [post.id, post] as const))
     const answers = new Map<number, CautionedPost[]>(ids.map((id) => [id, []]))
     for (const { id, parentId } of answerIds) {
       const answer = posts.get(id)

@@ -9,9 +9,10 @@ import { entryWeight } from '@/lib/domain/search/entry-weight'
 import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
 import { findPassage } from './find-passage'
 import type { HeldTerms } from './held-terms'
-import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest } from './messages'
+import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
 import { Postings } from './postings'
 import { Question } from './question'
+import { PlacedTermsOfTexts } from './placed-terms'
 import { TitleIndex } from './title-index'
 
 const mostConcepts = 24
@@ -29,6 +30,7 @@ const mostPostings = 120_000
 /** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
 interface Kept { slot: number; document: SearchDocument; weight: number }
 interface Scored { kept: Kept; coverage: number; score: number }
+interface Wanted { least: number; mostScored: number; wanted: number }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
@@ -40,9 +42,11 @@ export class SearchIndex {
   private readonly vocabulary = new Vocabulary()
   private readonly titles = new TitleIndex()
   private readonly synonyms: Synonyms
+  private readonly placed: PlacedTermsOfTexts
 
   constructor(synonyms: SynonymList) {
     this.synonyms = new Synonyms(synonyms)
+    this.placed = new PlacedTermsOfTexts(this.synonyms)
   }
 
   get documents(): number {
@@ -65,21 +69,24 @@ export class SearchIndex {
   remove(id: number): void {
     const old = this.kept.get(id)
     if (!old) return
-    this.count(termsOfDocument(old.document, this.synonyms), -1)
-    this.postings.discard(old.slot)
+    const terms = termsOfDocument(old.document, this.synonyms)
+    this.count(terms, -1)
+    this.postings.remove(old.slot, terms.all)
     this.slots[old.slot] = undefined
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
     this.kept.delete(id)
   }
 
-  search({ text, filters, limit, offset }: SearchRequest): Found {
+  search({ text, filters, limit, offset }: SearchRequest, whenOrdered?: WhenOrdered): Found {
     const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
     const { affordable, tooCommon } = this.afford(concepts)
     const question = new Question(affordable)
-    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored })
+    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored, wanted: offset + limit })
+    const page = found.slice(offset, offset + limit)
+    whenOrdered?.(page.map(({ kept }) => kept.document.id))
     return {
-      hits: found.slice(offset, offset + limit).map((scored) => this.hit(scored, question)),
+      hits: page.map((scored) => this.hit(scored, question)),
       total: found.length,
       ignored: [...ignored, ...tooCommon],
       // A spelling under which nothing is found either helps nobody.
@@ -90,7 +97,7 @@ export class SearchIndex {
   similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
     const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
     const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
-    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar }).slice(0, limit).map((scored) => this.hit(scored, question))
+    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar, wanted: limit }).slice(0, limit).map((scored) => this.hit(scored, question))
   }
 
   suggest(text: string, limit: number): { id: number; title: string }[] {
@@ -123,33 +130,52 @@ export class SearchIndex {
     return { affordable: concepts.filter((c) => affordable.has(c)), tooCommon: concepts.filter((c) => !affordable.has(c)).map((c) => c.word) }
   }
 
-  /** Best first, newest of equals first; empty when even the best holds less than `least` of the question. */
-  private rank(question: Question, filters: SearchFilters, { least, mostScored: most }: { least: number; mostScored: number }): Scored[] {
+  /** All that is found, the first `wanted` in order: best first, newest of equals first. Empty when even the best holds less than `least` of the question. */
+  private rank(question: Question, filters: SearchFilters, { least, mostScored: most, wanted }: Wanted): Scored[] {
     if (question.terms.length === 0) return []
     const held = this.postings.findHeld(question, this.slots.length)
+    const coverageAt = this.coverages(question, held)
     const found: Scored[] = []
     let best = 0
     for (const slot of held.slots) {
       const kept = this.slots[slot]
       if (!kept || kept.weight === 0 || !passes(kept.document, filters)) continue
-      const coverage = question.coverage(held.at(slot))
+      const coverage = coverageAt(slot)
       if (coverage > best) best = coverage
       if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
     }
     if (best < least) return []
-    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, most)
+    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, { most, wanted })
+  }
+
+  /** Thousands of entries hold the same few terms of a question: each set of terms is weighed once. */
+  private coverages(question: Question, held: HeldTerms): (slot: number) => number {
+    const known = new Map<number, number>()
+    return (slot) => {
+      const pattern = held.pattern(slot)
+      if (pattern === null) return question.coverage(held.at(slot))
+      const seen = known.get(pattern)
+      if (seen !== undefined) return seen
+      const coverage = question.coverage(held.at(slot))
+      known.set(pattern, coverage)
+      return coverage
+    }
   }
 
   /** Score = BM25 × weight of the entry's evidence. */
-  private order(found: Scored[], question: Question, held: HeldTerms, most: number): Scored[] {
+  private order(found: readonly Scored[], question: Question, held: HeldTerms, { most, wanted }: { most: number; wanted: number }): Scored[] {
     const scores = this.postings.score(question, held, this.choose(found, most))
+    const [scored, others]: [Scored[], Scored[]] = [[], []]
     let lowest = Infinity
     for (const entry of found) {
       entry.score = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
       if (entry.score > 0 && entry.score < lowest) lowest = entry.score
+      ;(entry.score > 0 ? scored : others).push(entry)
     }
-    for (const entry of found) if (entry.score === 0) entry.score = lowest * entry.coverage
-    return found.sort(byScore)
+    for (const entry of others) entry.score = lowest * entry.coverage
+    scored.sort(byScore)
+    // Those that were not scored stand behind all that were; sorting thousands of them is only worth it for who turns that far.
+    return scored.concat(wanted > scored.length ? others.sort(byScore) : others)
   }
 
   /** Marks the slots of at most `most` entries. */
@@ -165,7 +191,7 @@ export class SearchIndex {
   }
 
   private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
-    return { id: document.id, score, ...findPassage(document, question, this.synonyms) }
+    return { id: document.id, score, ...findPassage(document, question, this.placed) }
   }
 }
 

@@ -1,10 +1,11 @@
 // One run of the search thread: calls with a time limit, and word of its end. Starting another one is open-search.ts.
 import 'server-only'
 import { Worker } from 'node:worker_threads'
-import { SearchLoadingError } from './messages'
+import { SearchLoadingError, type WhenOrdered } from './messages'
 import type { CallName, WorkerCalls, WorkerReply, WorkerRequest } from './worker-messages'
 
-interface Waiting { resolve(given: WorkerReply): void; reject(error: Error): void; timer: NodeJS.Timeout }
+type Answered = Exclude<WorkerReply, { ordered: number[] }>
+interface Waiting { resolve(given: Answered): void; reject(error: Error): void; timer: NodeJS.Timeout; whenOrdered: WhenOrdered | undefined }
 
 export class SearchThread {
   /** Resolves with the reason when the thread has ended, for whatever reason. */
@@ -30,12 +31,12 @@ export class SearchThread {
    * Asks the thread. Rejects with SearchLoadingError when the thread ends first or does not answer within `timeoutMs`
    * (a thread that hangs is ended), with another error when the call itself failed.
    */
-  call<Name extends CallName>(name: Name, asked: WorkerCalls[Name]['asked'], timeoutMs: number): Promise<WorkerCalls[Name]['given']> {
+  call<Name extends CallName>(name: Name, asked: WorkerCalls[Name]['asked'], timeoutMs: number, whenOrdered?: WhenOrdered): Promise<WorkerCalls[Name]['given']> {
     if (this.ended) return Promise.reject(new SearchLoadingError())
     const number = ++this.lastNumber
-    const reply = new Promise<WorkerReply>((resolve, reject) => {
+    const reply = new Promise<Answered>((resolve, reject) => {
       const timer = setTimeout(() => void this.end(new Error(`the search thread did not answer "${name}" within ${timeoutMs} ms`)), timeoutMs)
-      this.waiting.set(number, { resolve, reject, timer })
+      this.waiting.set(number, { resolve, reject, timer, whenOrdered })
     })
     this.worker.ref()
     this.worker.postMessage({ call: name, number, asked } as WorkerRequest)
@@ -52,6 +53,10 @@ export class SearchThread {
   private receive(reply: WorkerReply): void {
     const waiting = this.waiting.get(reply.number)
     if (!waiting) return
+    if ('ordered' in reply) {
+      waiting.whenOrdered?.(reply.ordered)
+      return
+    }
     this.waiting.delete(reply.number)
     clearTimeout(waiting.timer)
     if (this.waiting.size === 0) this.worker.unref()
@@ -70,7 +75,7 @@ export class SearchThread {
   }
 }
 
-function unwrap(reply: WorkerReply): WorkerCalls[CallName]['given'] {
+function unwrap(reply: Answered): WorkerCalls[CallName]['given'] {
   if ('failed' in reply) throw new Error(`search failed: ${reply.failed}`)
   return reply.given
 }

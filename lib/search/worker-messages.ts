@@ -14,4 +14,5 @@ export interface WorkerCalls {
 
 export type CallName = keyof WorkerCalls
 export type WorkerRequest = { [Name in CallName]: { call: Name; number: number; asked: WorkerCalls[Name]['asked'] } }[CallName]
-export type WorkerReply = { number: number; given: WorkerCalls[CallName]['given'] } | { number: number; failed: string }
+/** `ordered` comes before the reply to a search, and is none. */
+export type WorkerReply = { number: number; given: WorkerCalls[CallName]['given'] } | { number: number; failed: string } | { number: number; ordered: number[] }

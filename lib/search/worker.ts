@@ -34,7 +34,7 @@ async function answer(request: WorkerRequest): Promise<WorkerCalls[WorkerRequest
       sequence = request.asked.sequence
       return { documents: index.documents }
     }
-    case 'search': return { ...index.search(request.asked), sequence }
+    case 'search': return { ...index.search(request.asked, (ordered) => port?.postMessage({ number: request.number, ordered } satisfies WorkerReply)), sequence }
     case 'similar': return index.similar(request.asked.text, request.asked.filters, request.asked.limit)
     case 'suggest': return index.suggest(request.asked.text, request.asked.limit)
     default: return request satisfies never

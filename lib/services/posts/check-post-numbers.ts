@@ -8,5 +8,5 @@ import type { NumbersCheck } from '@/lib/domain/numbers-check/numbers-check'
 /** Every check of the post's current text; an answer takes its question's hardware and tasks. */
 export function checkPostNumbers(found: CautionedPost, question: CautionedPost | null): NumbersCheck[] {
   const { tasks, hardware } = (question ?? found).current
-  return checkNumbers(found.rendering?.plain ?? wholeText(found.kind, found.current.parts, found.current.body), { tasks, hardware })
+  return checkNumbers(found.plain ?? wholeText(found.kind, found.current.parts, found.current.body), { tasks, hardware })
 }

@@ -42,7 +42,7 @@ export async function withRenderings(context: AppContext, posts: readonly Cautio
     const fields = textFields(found.kind, found.current.parts, found.current.body)
     const made = { key: renderingKey(found.id, found.current.number), ...(await renderText(context.renderer, fields)) }
     await writeQuietly(context.database, (tx) => saveRendering(tx, made))
-    return { ...found, rendering: made }
+    return { ...found, plain: made.plain, rendering: made }
   }))
 }
 

@@ -79,7 +79,7 @@ export function presentPost(found: CautionedPost, questionRevision: number, rema
   return {
     id: found.id, kind: found.kind, ...(found.parentId !== null ? { parentId: found.parentId } : {}), ...(found.ref !== null ? { ref: found.ref } : {}),
     revision: revisionLetter(found.current.number), author: person(found.author), createdAt: iso(found.createdAt), updatedAt: iso(found.updatedAt),
-    html: wholeHtml(found), text: found.rendering?.plain ?? '', measurements: [],
+    html: wholeHtml(found), text: found.plain ?? '', measurements: [],
     cautions: presentCautions(found), stamp: state, missing, stamps: presentStamps(found, questionRevision), needsTwo: found.needsTwo,
     outcomes: presentOutcomes(found), goingByThis: found.goingByThis, remarks: presentRemarks(found, remarks),
     revisions: found.revisions.map((r) => ({ revision: revisionLetter(r.number), author: person(r.author), createdAt: iso(r.createdAt) })),

@@ -13,12 +13,24 @@ import { presentCautions, presentOutcomes, presentStamps } from '@/lib/services/
 
 interface Found { id: number; postId: number; score: number; terms: readonly string[] }
 
+/** What hits are made of: the entries, every answer under them, and the names of their tasks. */
+export interface HitMaterial {
+  answers: readonly { id: number; parentId: number | null }[]
+  posts: ReadonlyMap<number, CautionedPost>
+  tasks: ReadonlyMap<string, string>
+}
+
+/** Reads what the hits of these entries need. Search does it while its thread still picks the passages. */
+export async function loadHits({ reader }: AppContext, entryIds: readonly number[]): Promise<HitMaterial> {
+  const answers = await listAnswerIds(reader, entryIds)
+  const posts = new Map((await listCautionedPosts(reader, [...new Set([...entryIds, ...answers.map((a) => a.id)])], 'plain')).map((p) => [p.id, p]))
+  const tasks = await listTasksBySlug(reader, [...new Set([...posts.values()].flatMap((p) => p.current.tasks))])
+  return { answers, posts, tasks: new Map(tasks.map((t) => [t.slug, t.title])) }
+}
+
 /** Hits in the order given. Anything not visible any more is left out, whatever the index says. */
-export async function presentHits(context: AppContext, found: readonly Found[]): Promise<Hit[]> {
-  const answers = await listAnswerIds(context.reader, found.map((f) => f.id))
-  const wanted = [...new Set(found.flatMap((f) => [f.id, f.postId]))]
-  const posts = new Map((await listCautionedPosts(context.reader, [...wanted, ...answers.map((a) => a.id).filter((id) => !wanted.includes(id))])).map((p) => [p.id, p]))
-  const tasks = new Map((await listTasksBySlug(context.reader, [...new Set([...posts.values()].flatMap((p) => p.current.tasks))])).map((t) => [t.slug, t.title]))
+export async function presentHits(context: AppContext, found: readonly Found[], loading?: Promise<HitMaterial>): Promise<Hit[]> {
+  const { answers, posts, tasks } = await (loading ?? loadHits(context, found.map((f) => f.id)))
   return found.flatMap((f) => {
     const entry = posts.get(f.id)
     const passage = posts.get(f.postId) ?? entry
@@ -45,5 +57,5 @@ function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, 
 
 /** The text a snippet is cut from: what was rendered, or the Markdown while that is missing. */
 function plainText(post: CautionedPost): string {
-  return post.rendering?.plain ?? textFields(post.kind, post.current.parts, post.current.body).map((f) => f.text).join('\n\n')
+  return post.plain ?? textFields(post.kind, post.current.parts, post.current.body).map((f) => f.text).join('\n\n')
 }

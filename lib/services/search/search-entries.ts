@@ -4,20 +4,40 @@ import { countEntries, listEntryIds } from '@/db/queries/entries'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { computeQuery } from '@/lib/services/shop/compute-query'
 import type { AppContext } from '@/lib/context'
-import type { SearchQuery, SearchResult } from '@/lib/schemas/search'
-import { presentHits } from './present-hits'
+import type { Hit, SearchQuery, SearchResult } from '@/lib/schemas/search'
+import { loadHits, presentHits, type HitMaterial } from './present-hits'
 
 /** Throws SearchLoadingError while the index loads. */
 export async function searchEntries(context: AppContext, query: SearchQuery): Promise<SearchResult> {
   const startedAt = performance.now()
   const text = query.q.trim()
-  const filters = { kit: query.kit, section: query.section, operation: query.operation, kind: query.kind, ...(query.stamped === '1' ? { stamped: true } : {}) }
-  const answer = text === ''
-    ? { hits: (await listEntryIds(context.reader, filters, { limit: query.limit, offset: query.offset })).map((id) => ({ id, postId: id, score: 0, terms: [] })), total: await countEntries(context.reader, filters), ignored: [], didYouMean: null }
-    : await context.search.search({ text, filters, limit: query.limit, offset: query.offset })
-  const results = await presentHits(context, answer.hits)
+  const finding = text === '' ? findNewest(context, query) : findByWords(context, text, query)
+  // The tables are asked while the search thread looks the words up; a search that fails meanwhile is heard below.
+  finding.catch(() => undefined)
+  const [measurements, computed] = [findMeasurements(text), query.offset === 0 ? computeQuery(text) : []]
+  const { results, total, ignored, didYouMean } = await finding
   return {
-    query: { text: query.q, ignored: answer.ignored, measurements: findMeasurements(text), ...(answer.didYouMean !== null ? { didYouMean: answer.didYouMean } : {}) },
-    computed: query.offset === 0 ? computeQuery(text) : [], results, total: answer.total, tookMs: Math.round((performance.now() - startedAt) * 10) / 10,
+    query: { text: query.q, ignored, measurements, ...(didYouMean !== null ? { didYouMean } : {}) },
+    computed, results, total, tookMs: Math.round((performance.now() - startedAt) * 10) / 10,
   }
 }
+
+interface Found { results: Hit[]; total: number; ignored: string[]; didYouMean: string | null }
+
+async function findByWords(context: AppContext, text: string, query: SearchQuery): Promise<Found> {
+  let loading: Promise<HitMaterial> | undefined
+  const { hits, ...found } = await context.search.search({ text, filters: filtersOf(query), limit: query.limit, offset: query.offset }, (entryIds) => {
+    loading = loadHits(context, entryIds)
+    // Heard by presentHits, unless the search itself fails first.
+    loading.catch(() => undefined)
+  })
+  return { ...found, results: await presentHits(context, hits, loading) }
+}
+
+async function findNewest(context: AppContext, query: SearchQuery): Promise<Found> {
+  const ids = await listEntryIds(context.reader, filtersOf(query), { limit: query.limit, offset: query.offset })
+  const results = await presentHits(context, ids.map((id) => ({ id, postId: id, score: 0, terms: [] })))
+  return { results, total: await countEntries(context.reader, filtersOf(query)), ignored: [], didYouMean: null }
+}
+
+const filtersOf = ({ kit, section, operation, kind, stamped }: SearchQuery) => ({ kit, section, operation, kind, ...(stamped === '1' ? { stamped: true } : {}) })

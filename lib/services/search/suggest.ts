@@ -14,7 +14,7 @@ export async function suggest(context: AppContext, text: string): Promise<Sugges
   const words = text.trim().toLowerCase()
   if (words === '') return []
   const [found, sections, operations] = await Promise.all([context.search.suggest(text, 6), listSections(context.reader), listOperations(context.reader)])
-  const posts = await listCautionedPosts(context.reader, found.map((f) => f.id))
+  const posts = await listCautionedPosts(context.reader, found.map((f) => f.id), 'plain')
   const entries = posts.filter((p) => p.state === 'visible' && p.kind !== 'answer').map((p): Suggestion => ({
     text: p.current.title, kind: p.kind === 'lesson' ? 'lesson' : 'question', id: p.id, url: paths.entry(p.id),
     cautions: presentCautions(p).filter((c) => !c.waived).map((c) => ({ signalWord: c.signalWord, topic: c.topic })),

@@ -139,6 +139,18 @@ describe('changes', () => {
   })
 })
 
+describe('scores', () => {
+  test('are those of an index made anew, however often an entry was edited before', () => {
+    const entries = [aDocument({ id: 1, title: 'Labels before wiring' }, 'Labels first.'), aDocument({ id: 2, title: 'Labels on the lid' }, 'Labels last.')]
+    const edited = indexOf(...entries)
+    for (let edit = 0; edit < 30; edit++) edited.put(aDocument({ id: 2, title: 'Labels on the lid' }, `Labels last. ${'Labels. '.repeat(edit)}`))
+    for (const entry of entries) edited.put(entry)
+    const scores = (index: SearchIndex) => ask(index, 'labels').hits.map(({ id, score }) => ({ id, score: score.toFixed(9) }))
+    expect(scores(edited)).toEqual(scores(indexOf(...entries)))
+    expect(ask(edited, 'labels').hits.every(({ score }) => score > 0)).toBe(true)
+  })
+})
+
 describe('similar and suggest', () => {
   const index = indexOf(
     aDocument({ id: 1, title: 'Which drill for a #30 hole in the rib flange' }, 'The flange is .025 and the dimple comes later.'),
