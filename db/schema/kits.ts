@@ -1,6 +1,8 @@
 // Kits with their sections in plan order; operations with their tasks (an operation on something).
-import { integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core'
-import { id } from './columns'
+import { index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core'
+import type { ShopValue, Source } from '@/lib/domain/shop/shop-table'
+import { id, moment } from './columns'
+import { member } from './people'
 
 export const kit = sqliteTable('kit', {
   id: id(),
@@ -33,3 +35,24 @@ export const task = sqliteTable('task', {
   title: text().notNull(),
   position: integer().notNull(),
 })
+
+/** The kit maker's own value for a shop table's result, entered by a steward; it comes before the handbook's. Never deleted: an ended one shows what once held. */
+export const kitLimit = sqliteTable('kit_limit', {
+  id: id(),
+  kitId: integer().notNull().references(() => kit.id),
+  /** Shop table and result that it stands for, by name. */
+  table: text('shop_table').notNull(),
+  result: text().notNull(),
+  /** Inputs for which it holds, as the table takes them; {} = for all. */
+  inputs: text({ mode: 'json' }).$type<Record<string, string>>().notNull(),
+  value: text({ mode: 'json' }).$type<ShopValue>().notNull(),
+  unit: text().notNull(),
+  display: text({ mode: 'json' }).$type<{ inch: string; metric: string }>().notNull(),
+  /** Bulletin or page with its date. */
+  reference: text({ mode: 'json' }).$type<Source>().notNull(),
+  note: text().notNull().default(''),
+  enteredBy: integer().references(() => member.id),
+  createdAt: moment().notNull(),
+  endedAt: moment(),
+  endReason: text(),
+}, (t) => [index('kit_limit_kit').on(t.kitId, t.table)])

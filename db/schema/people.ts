@@ -17,6 +17,8 @@ export const member = sqliteTable('member', {
   stateAt: moment(),
   /** Raised by a password change: sessions made before it end. */
   sessionEpoch: integer().notNull().default(0),
+  /** Which system stands first where a measurement is shown; null = as the page says. */
+  units: text({ enum: ['inch', 'metric'] }),
   createdAt: moment().notNull(),
 }, (t) => [
   check('member_role', sql`${t.role} in ('member','moderator','steward')`),

@@ -1,9 +1,10 @@
 // A post is anything that can be stamped, cautioned, gone by and hidden; a revision carries all that is judged.
 // post_section, post_task and post_hardware are projections of the current revision and can be rebuilt from it.
 import { sql } from 'drizzle-orm'
-import { check, foreignKey, index, integer, primaryKey, sqliteTable, text, uniqueIndex, type AnySQLiteColumn } from 'drizzle-orm/sqlite-core'
+import { check, foreignKey, index, integer, primaryKey, real, sqliteTable, text, uniqueIndex, type AnySQLiteColumn } from 'drizzle-orm/sqlite-core'
 import { id, moment } from './columns'
 import { kit, operation, section, task } from './kits'
+import type { Measurement } from '@/lib/domain/measurements/measurement'
 import { member } from './people'
 
 export interface PlansReferenceJson { page: string; step?: string | undefined; revision?: string | undefined }
@@ -27,6 +28,8 @@ export const post = sqliteTable('post', {
   needsTwo: integer({ mode: 'boolean' }).notNull().default(false),
   createdAt: moment().notNull(),
   updatedAt: moment().notNull(),
+  /** Version of the parser that last read this post's measurements; 0 = none yet. */
+  measuredBy: integer().notNull().default(0),
 }, (t) => [
   check('post_kind', sql`(${t.kind} = 'answer') = (${t.parentId} is not null)`),
   index('post_parent').on(t.parentId),
@@ -89,6 +92,16 @@ export const postHardware = sqliteTable('post_hardware', {
   postId: integer().notNull().references(() => post.id),
   name: text().notNull(),
 }, (t) => [primaryKey({ columns: [t.postId, t.name] }), index('post_hardware_name').on(t.name)])
+
+/** What the parser found in the plain text of the current revision; `parser` is its version. Kind and SI value stand apart for looking up. */
+export const measurement = sqliteTable('measurement', {
+  postId: integer().notNull().references(() => post.id),
+  position: integer().notNull(),
+  parser: integer().notNull(),
+  kind: text({ enum: ['length', 'drill', 'torque', 'pressure', 'angle', 'temperature', 'rivet', 'bolt', 'thread', 'gauge'] }).notNull(),
+  siValue: real().notNull(),
+  found: text({ mode: 'json' }).$type<Measurement>().notNull(),
+}, (t) => [primaryKey({ columns: [t.postId, t.position] }), index('measurement_value').on(t.kind, t.siValue)])
 
 export const remark = sqliteTable('remark', {
   id: id(),
