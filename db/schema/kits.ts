@@ -1,8 +1,11 @@
 // Kits with their sections in plan order; operations with their tasks (an operation on something).
 import { index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core'
-import type { ShopValue, Source } from '@/lib/domain/shop/shop-table'
 import { id, moment } from './columns'
 import { member } from './people'
+
+/** One value, a range, or words; and where it stands. As lib/domain/shop has them. */
+export interface LimitValueJson { number?: number; min?: number; max?: number; label?: string }
+export interface SourceJson { title: string; section: string; year: string }
 
 export const kit = sqliteTable('kit', {
   id: id(),
@@ -45,11 +48,11 @@ export const kitLimit = sqliteTable('kit_limit', {
   result: text().notNull(),
   /** Inputs for which it holds, as the table takes them; {} = for all. */
   inputs: text({ mode: 'json' }).$type<Record<string, string>>().notNull(),
-  value: text({ mode: 'json' }).$type<ShopValue>().notNull(),
+  value: text({ mode: 'json' }).$type<LimitValueJson>().notNull(),
   unit: text().notNull(),
   display: text({ mode: 'json' }).$type<{ inch: string; metric: string }>().notNull(),
   /** Bulletin or page with its date. */
-  reference: text({ mode: 'json' }).$type<Source>().notNull(),
+  reference: text({ mode: 'json' }).$type<SourceJson>().notNull(),
   note: text().notNull().default(''),
   enteredBy: integer().references(() => member.id),
   createdAt: moment().notNull(),

@@ -4,11 +4,19 @@ import { sql } from 'drizzle-orm'
 import { check, foreignKey, index, integer, primaryKey, real, sqliteTable, text, uniqueIndex, type AnySQLiteColumn } from 'drizzle-orm/sqlite-core'
 import { id, moment } from './columns'
 import { kit, operation, section, task } from './kits'
-import type { Measurement } from '@/lib/domain/measurements/measurement'
 import { member } from './people'
 
 export interface PlansReferenceJson { page: string; step?: string | undefined; revision?: string | undefined }
 export interface OrderAdviceJson { before: string; after: string }
+
+/** A measurement as lib/domain/measurements found it; places are UTF-16 units of the plain text, end exclusive. */
+export interface MeasurementJson {
+  raw: string; start: number; end: number
+  kind: 'length' | 'drill' | 'torque' | 'pressure' | 'angle' | 'temperature' | 'rivet' | 'bolt' | 'thread' | 'gauge'
+  value: number; max?: number; exact?: string; unit: string
+  si: { value: number; unit: 'm' | 'N·m' | 'Pa' | 'rad' | 'K'; max?: number }
+  inches?: number; diameter?: number; length?: number; grip?: number
+}
 
 export const post = sqliteTable('post', {
   id: id(),
@@ -100,7 +108,7 @@ export const measurement = sqliteTable('measurement', {
   parser: integer().notNull(),
   kind: text({ enum: ['length', 'drill', 'torque', 'pressure', 'angle', 'temperature', 'rivet', 'bolt', 'thread', 'gauge'] }).notNull(),
   siValue: real().notNull(),
-  found: text({ mode: 'json' }).$type<Measurement>().notNull(),
+  found: text({ mode: 'json' }).$type<MeasurementJson>().notNull(),
 }, (t) => [primaryKey({ columns: [t.postId, t.position] }), index('measurement_value').on(t.kind, t.siValue)])
 
 export const remark = sqliteTable('remark', {
