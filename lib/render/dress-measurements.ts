@@ -85,13 +85,15 @@ interface Look { hasArrows: boolean; hasLead: boolean; hasMore: boolean; hasAlso
 function dressed(written: string, { writtenIn, lead, more, also }: ProseMeasure, look: Look): ElementContent[] {
   const classes = ['measure', `measure-${writtenIn}`, ...(look.hasArrows ? ['measure-arrows'] : []), ...(written.length <= longestWhole ? ['measure-whole'] : [])]
   const size = span(classes, [
-    ...(look.hasLead ? [{ ...span(['measure-lead'], [text(`${lead} · `)]), properties: { className: ['measure-lead'], hidden: true } }] : []),
+    ...(look.hasLead ? [{ ...span(['measure-lead'], [text(`${kept(lead)}\u00a0· `)]), properties: { className: ['measure-lead'], hidden: true } }] : []),
     text(written),
     ...(look.hasMore && more !== '' ? [span(['measure-more'], [text(more)])] : []),
   ])
-  return look.hasAlso && also !== '' ? [size, span(['measure-also', `measure-${writtenIn}`], [text(` also ${also}`)])] : [size]
+  return look.hasAlso && also !== '' ? [size, span(['measure-also', `measure-${writtenIn}`], [text(` also ${also.split(' · ').map(kept).join(' · ')}`)])] : [size]
 }
 
+/** A number stays on one line with its unit. */
+const kept = (words: string): string => words.replaceAll(' ', '\u00a0')
 const text = (value: string): Text => ({ type: 'text', value })
 const span = (className: string[], children: ElementContent[]): Element => ({ type: 'element', tagName: 'span', properties: { className }, children })
 

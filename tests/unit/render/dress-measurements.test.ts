@@ -6,7 +6,7 @@ import { markdownToHtml } from '@/lib/render/markdown-to-html'
 /** The HTML as marks a person can read: ⟨ ⟩ around what has arrows, ‹ › around what has none, {hidden lead}, +unsaid+, (also). */
 const read = (markdown: string): string => {
   const closing: string[] = []
-  return markdownToHtml(markdown).html.replace(/<(\/?)(\w+)([^>]*)>/g, (_tag, slash: string, name: string, rest: string) => {
+  return markdownToHtml(markdown).html.replaceAll('\u00a0', ' ').replace(/<(\/?)(\w+)([^>]*)>/g, (_tag, slash: string, name: string, rest: string) => {
     if (name !== 'span') return ''
     if (slash) return closing.pop() ?? '?'
     const [open, close] = rest.includes('measure-lead') ? '{}' : rest.includes('measure-more') ? '++' : rest.includes('measure-also') ? '()' : rest.includes('measure-arrows') ? '⟨⟩' : '‹›'
