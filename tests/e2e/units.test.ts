@@ -1,6 +1,7 @@
 // Inch or metric first: chosen on a page for this device, in the account for every device; what was written always stands.
 import { describe, expect, test } from 'vitest'
 import type { Page } from 'playwright-core'
+import { violations } from '../support/axe'
 import { openPage, overflow, visit, widths } from '../support/browser'
 import { newPerson } from '../support/session'
 import { publish, unique } from './arrange'
@@ -33,6 +34,7 @@ describe.each(widths)('at %i px', (width) => {
     expect(new URL(page.url()).pathname).toBe(url)
     expect(await sentence(page)).toBe(readings.metric)
     expect(await overflow(page)).toBe(0)
+    if (javaScript) expect(await violations(page)).toEqual([])
 
     // A computed answer and a shop table take it from the first byte on; the table's own switch is the only one there.
     await go('/search?q=drill+for+1/8+rivet')
