@@ -20,7 +20,7 @@ export function UnitsForm({ action, units }: { action: FormAction; units: UnitsC
           {unitsChoices.map(({ value, label, help }) => <RadioRow key={value} name="units" value={value} label={label} help={help} defaultChecked={value === chosen} />)}
         </div>
       </ChoiceGroup>
-      <div className="button-row"><Button type="submit" disabled={isPending}>Save the units</Button></div>
+      <div className="button-row"><Button type="submit" disabled={isPending}>Keep these units</Button></div>
     </form>
   )
 }

@@ -62,7 +62,7 @@ describe.each(widths)('at %i px', (width) => {
     await first.getByRole('group', { name: 'Units' }).getByRole('button', { name: 'Inch first' }).click()
     expect(await chosen(first)).toBe('inch')
     await first.getByRole('radio', { name: /mm first/ }).check()
-    await first.getByRole('button', { name: 'Save the units' }).click()
+    await first.getByRole('button', { name: 'Keep these units' }).click()
     await first.getByText('Saved. It holds wherever you sign in.').waitFor()
     expect([await chosen(first), await first.getByRole('radio', { name: /mm first/ }).isChecked()]).toEqual(['metric', true])
     const second = await openPage({ width, as: who })
