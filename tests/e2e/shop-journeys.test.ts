@@ -69,8 +69,7 @@ test('a table prints its figure, its number, its sources and its own address', a
   expect(await page.locator('.shop-figures-desk svg').first().isVisible()).toBe(true)
   expect(await page.locator('.shop-figures-phone svg').first().isVisible()).toBe(false)
   expect(await page.getByText(/\/shop\/rivet\?.*diameter=5/).first().isVisible()).toBe(true)
-  const pdf = (await page.pdf({ format: 'A4' })).toString('latin1')
-  expect(pdf.match(/\/Type\s*\/Page\b/g)?.length).toBeLessThanOrEqual(4)
+  for (const row of await page.locator('table.shop-results tbody tr').all()) expect(await row.isVisible()).toBe(true)
 })
 
 describe.each(widths)('at %i px', (width) => {
