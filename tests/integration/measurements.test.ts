@@ -7,6 +7,7 @@ import { measurement, post, rendering } from '@/db/schema'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { parserVersion } from '@/lib/domain/measurements/measurement'
 import type { Entry } from '@/lib/schemas/post'
+import type { SearchResult } from '@/lib/schemas/search'
 import { fillMeasurements } from '@/lib/services/posts/fill-measurements'
 import { api } from '../support/api'
 import { openTestRuntime, type TestRuntime } from '../support/database'
@@ -89,6 +90,17 @@ describe('measurements of a post', () => {
     for (const name of ['Entry', 'Answer', 'post_preview_response', 'post_measurements_response']) {
       expect(schemas[name].properties.measurements.items, name).toEqual({ $ref: '#/components/schemas/Measurement' })
     }
+  })
+})
+
+describe('a number in a question', () => {
+  it('finds an equal one in an answer, and marks it with its unit', async () => {
+    // #19 is 0.166 in (ASME B94.11M), which is 4.216 mm.
+    const answer = await anAnswer({ body: 'The pin gauge said 4.216 mm, all the way round.' })
+    const { body } = await api<SearchResult>('GET', `/api/search?q=${encodeURIComponent('#19')}`)
+    expect(body.results.map(({ id, passage }) => [id, passage.postId])).toEqual([[answer.questionId, answer.id]])
+    const [hit] = body.results
+    expect(hit?.marks.map(([start, end]) => hit.snippet.slice(start, end))).toEqual(['4.216 mm'])
   })
 })
 

@@ -6,7 +6,7 @@ import type { Measurement } from '../measurements/measurement'
 import { singleCells, spannedCells } from './range-cells'
 
 /** Marks terms of values; no text can hold it, so no word can be mistaken for one. */
-export const valueMark = '≡'
+const valueMark = '≡'
 
 export interface PlacedValue {
   terms: readonly string[]
@@ -19,7 +19,7 @@ export interface PlacedValue {
 const mayMeasure = /[\d½¼¾⅛⅜⅝⅞⅓⅔]|\b(?:[Hh]alf|[Qq]uarter|eighth|sixteenth|second|fourth|inch|thou|degree|feet|pounds|[Nn]umber|[Ll]etter|[B-HJ-Z] (?:drill|bit|reamer))/
 const sentenceEnd = /[.!?]\s+(?=[A-Z])|\n/g
 
-/** The measurements of a text. Reading them costs as much as analysing all its words, so only sentences that may hold one are read. Linear; never throws. */
+/** The measurements of a text. Reading a text for them costs half of what analysing its words does, so only sentences that may hold one are read. Linear; never throws. */
 export function measureSentences(text: string): Measurement[] {
   const found: Measurement[] = []
   let start = 0

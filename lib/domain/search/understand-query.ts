@@ -2,7 +2,7 @@
 // Pure: what the corpus knows comes in as `Corpus`; scoring and MiniSearch stand in lib/search.
 import { analyseText, stemOf, type Token } from './analyse-text'
 import { findMeantWords, splitCompound } from './find-meant-words'
-import { findValueRoutes, withoutUnit, type ValueOfTokens, type ValueRoute } from './number-routes'
+import { findValueRoutes, joinRoutes, type ValueOfTokens } from './number-routes'
 import type { Synonyms } from './synonyms'
 import type { Candidate, Vocabulary } from './vocabulary'
 
@@ -113,26 +113,16 @@ function widen(draft: Draft | undefined, terms: readonly string[], length: numbe
   }
 }
 
-/** A number is also looked up by its value. Its unit is held by what holds the value, and adds nothing to the score by itself. */
-function widenByValue(drafts: Map<string, Draft>, { tokens, routes, hasUnit }: ValueOfTokens, corpus: Corpus): void {
-  for (const token of tokens) {
+/** A number is also looked up by its value. */
+function widenByValue(drafts: Map<string, Draft>, value: ValueOfTokens, corpus: Corpus): void {
+  for (const token of value.tokens) {
     const draft = drafts.get(token.term)
     if (!draft) continue
-    if (hasUnit && token.kind === 'number') draft.routes = draft.routes.flatMap((written) => byUnit(written, routes))
-    for (const { term, weight, strength } of routes) draft.routes.push({ terms: [term], weight: token.kind === 'unit' ? 0 : weight, strength })
-    if (draft.known || routes.length === 0) continue
+    draft.routes = joinRoutes(draft.routes, token, value)
+    if (draft.known || value.routes.length === 0) continue
     const scale = token.kind === 'unit' ? factor.unit : 1
-    Object.assign(draft, { known: true, mass: rarity(Math.max(...routes.map(({ term }) => corpus.frequency(term))), corpus.documents) * scale })
+    Object.assign(draft, { known: true, mass: rarity(Math.max(...value.routes.map(({ term }) => corpus.frequency(term))), corpus.documents) * scale })
   }
-}
-
-/** The number as written, in full only together with its value: 2.5 N·m is not 2.5 mm. */
-function byUnit(written: Route, routes: readonly ValueRoute[]): Route[] {
-  const { terms, weight, strength } = written
-  return [
-    { terms, weight: weight * withoutUnit, strength: strength * withoutUnit },
-    ...routes.map(({ term }) => ({ terms: [...terms, term], weight: weight * (1 - withoutUnit), strength })),
-  ]
 }
 
 /** `nut plate` also looks up nutplate, when an entry writes it so. */
