@@ -1,6 +1,7 @@
 // Describes the interface in OpenAPI 3.1 from the routes themselves: the schemas that check requests are the ones described.
 import 'server-only'
 import { z } from 'zod'
+import { measurementSchema } from '@/lib/schemas/measurement'
 import * as post from '@/lib/schemas/post'
 import { problemSchema } from '@/lib/schemas/problem'
 import { hitSchema, suggestionSchema } from '@/lib/schemas/search'
@@ -17,7 +18,7 @@ export const openApiSchema = z.object({
 
 /** Shapes that many answers share, by the name they have in the description. */
 const shared: Record<string, z.ZodType> = {
-  Caution: post.cautionSchema, Stamp: post.stampSchema, Outcomes: post.outcomesSchema, Remark: post.remarkSchema,
+  Caution: post.cautionSchema, Stamp: post.stampSchema, Outcomes: post.outcomesSchema, Remark: post.remarkSchema, Measurement: measurementSchema,
   Answer: post.answerSchema, Entry: post.entrySchema, Hit: hitSchema, Suggestion: suggestionSchema, Problem: problemSchema,
 }
 

@@ -2,6 +2,7 @@
 import { z } from 'zod'
 import { CAUTION_TOPICS } from '@/lib/domain/cautions/rule-table'
 import { stampStates, bases, replyScopes } from '@/lib/domain/stamps/stamp-state'
+import { measurementSchema } from './measurement'
 
 export const stampStateSchema = z.enum(stampStates)
 export const basisSchema = z.enum(bases)
@@ -30,7 +31,7 @@ export const orderAdviceSchema = z.object({ before: z.string(), after: z.string(
 
 const postShape = {
   id: z.int(), kind: z.enum(['question', 'lesson', 'answer']), parentId: z.int().optional(), ref: z.string().optional(), revision: z.string(), author: person,
-  createdAt: isoMoment, updatedAt: isoMoment, html: z.string(), text: z.string(), measurements: z.array(z.never()),
+  createdAt: isoMoment, updatedAt: isoMoment, html: z.string(), text: z.string(), measurements: z.array(measurementSchema),
   cautions: z.array(cautionSchema), stamp: stampStateSchema, missing: z.enum(['first', 'second', 'firm-basis']).nullable(), stamps: z.array(stampSchema), needsTwo: z.boolean(),
   outcomes: outcomesSchema, goingByThis: z.int(), remarks: z.array(remarkSchema),
   revisions: z.array(z.object({ revision: z.string(), author: person, createdAt: isoMoment })),

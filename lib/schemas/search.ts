@@ -54,7 +54,7 @@ export const suggestionSchema = z.object({
   cautions: z.array(z.object({ signalWord: z.enum(['WARNING', 'CAUTION', 'NOTICE']), topic: z.enum(CAUTION_TOPICS) })),
 })
 export const requiredCautionsResultSchema = z.object({ cautions: z.array(cautionSchema) })
-export const previewResultSchema = z.object({ html: z.string(), measurements: z.array(z.never()) })
+export const previewResultSchema = z.object({ html: z.string(), measurements: z.array(measurementSchema) })
 
 export type Hit = z.infer<typeof hitSchema>
 export type SearchQuery = z.infer<typeof searchQuerySchema>

@@ -1,6 +1,8 @@
-// Which terms an entry is indexed under: title three times, labels once, its passages, and the synonym groups they stand in.
+// Which terms an entry is indexed under: title three times, labels once, its passages, the synonym groups they stand in,
+// and the values of their measurements.
 import 'server-only'
 import { analyseText } from '@/lib/domain/search/analyse-text'
+import { findValues } from '@/lib/domain/search/number-terms'
 import type { Synonyms } from '@/lib/domain/search/synonyms'
 import type { SearchDocument } from './messages'
 
@@ -32,6 +34,7 @@ function readPart(text: string, synonyms: Synonyms, result: DocumentTerms): stri
     if (token.word.length > 2) result.words.add(token.word)
   }
   for (const match of synonyms.labelText(tokens)) terms.push(...match.terms)
+  for (const value of findValues(text)) terms.push(...value.terms)
   for (const term of terms) result.all.push(term)
   return terms
 }

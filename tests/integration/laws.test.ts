@@ -93,7 +93,7 @@ const triggers = async () => (await sql("select name from sqlite_master where ty
 
 describe('the laws of the data', () => {
   it('are all there, and each is tried below', async () => {
-    expect(await triggers()).toEqual([...Object.keys(broken), ...Object.keys(seen)].sort())
+    expect(await triggers()).toEqual([...Object.keys(broken), ...Object.keys(seen), 'redaction_takes_all'].sort())
   })
 
   it.each(Object.entries(broken))('%s refuses', async (_, { says, by }) => {
@@ -105,6 +105,22 @@ describe('the laws of the data', () => {
     await sql(by())
     const rows = (await sql(`select post_id from change where sequence > ${Number(before)}`)).rows
     expect(rows.map((r) => r['post_id'])).toContain(entry())
+  })
+
+  it('every column of a post but the parser that measured it is a change that others see', async () => {
+    const columns = (await sql("select name from pragma_table_info('post')")).rows.map((r) => String(r['name'])).filter((name) => name !== 'measured_by')
+    const law = String((await sql("select sql from sqlite_master where name = 'change_post_updated'")).rows[0]?.['sql'])
+    expect(law.match(/UPDATE OF([\w\s,]+) ON post/)?.[1]?.split(',').map((c) => c.trim()).sort()).toEqual(columns.sort())
+  })
+
+  it('a redaction takes what was made of the text with it', async () => {
+    const { id } = await anAnswer({ body: 'Drill it #30.' })
+    const kept = async () => [
+      (await sql(`select 1 from measurement where post_id = ${id}`)).rows.length, (await sql(`select 1 from rendering where key = 'post:${id}:1'`)).rows.length,
+    ]
+    expect(await kept()).toEqual([1, 1])
+    await sql(`update revision set body = '', redacted_reason = 'a name in it' where post_id = ${id}`)
+    expect(await kept()).toEqual([0, 0])
   })
 
   it('a stamp names a revision of its own post', async () => {

@@ -2,6 +2,7 @@
 // Pure: what the corpus knows comes in as `Corpus`; scoring and MiniSearch stand in lib/search.
 import { analyseText, stemOf, type Token } from './analyse-text'
 import { findMeantWords, splitCompound } from './find-meant-words'
+import { findValueRoutes, joinRoutes, type ValueOfTokens } from './number-routes'
 import type { Synonyms } from './synonyms'
 import type { Candidate, Vocabulary } from './vocabulary'
 
@@ -56,7 +57,7 @@ const mostCorrected = 8
 export function understandQuery(text: string, corpus: Corpus, options: QueryOptions): UnderstoodQuery {
   const { tokens, stopped } = analyseText(text)
   if (tokens.length === 0) return { concepts: [], ignored: distinct(stopped), didYouMean: null }
-  const drafts = draftConcepts(tokens, corpus)
+  const drafts = draftConcepts(text, tokens, corpus)
   const { kept, dropped } = keepRarest(drafts, options.mostConcepts)
   const corrections = options.correct || options.completeLast ? fillUnknown(kept, tokens, text, corpus, options) : []
   return {
@@ -73,7 +74,7 @@ export function rarity(frequency: number, documents: number): number {
 
 interface Draft { token: Token; position: number; mass: number; known: boolean; routes: Route[] }
 
-function draftConcepts(tokens: readonly Token[], corpus: Corpus): Draft[] {
+function draftConcepts(text: string, tokens: readonly Token[], corpus: Corpus): Draft[] {
   const drafts = new Map<string, Draft>()
   tokens.forEach((token, position) => {
     if (!drafts.has(token.term)) drafts.set(token.term, draftOf(token, position, corpus))
@@ -81,6 +82,7 @@ function draftConcepts(tokens: readonly Token[], corpus: Corpus): Draft[] {
   for (const { first, last, terms } of corpus.synonyms.widenQuery(tokens)) {
     for (const token of tokens.slice(first, last + 1)) widen(drafts.get(token.term), terms, last - first + 1, corpus)
   }
+  for (const value of findValueRoutes(text, tokens, (term) => corpus.frequency(term))) widenByValue(drafts, value, corpus)
   joinNeighbours(tokens, drafts, corpus)
   return [...drafts.values()]
 }
@@ -108,6 +110,18 @@ function widen(draft: Draft | undefined, terms: readonly string[], length: numbe
   if (present.length > 0 && !draft.known) {
     draft.known = true
     draft.mass = rarity(Math.max(...present.map((term) => corpus.frequency(term))), corpus.documents)
+  }
+}
+
+/** A number is also looked up by its value. */
+function widenByValue(drafts: Map<string, Draft>, value: ValueOfTokens, corpus: Corpus): void {
+  for (const token of value.tokens) {
+    const draft = drafts.get(token.term)
+    if (!draft) continue
+    draft.routes = joinRoutes(draft.routes, token, value)
+    if (draft.known || value.routes.length === 0) continue
+    const scale = token.kind === 'unit' ? factor.unit : 1
+    Object.assign(draft, { known: true, mass: rarity(Math.max(...value.routes.map(({ term }) => corpus.frequency(term))), corpus.documents) * scale })
   }
 }
 
