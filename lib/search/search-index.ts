@@ -5,6 +5,7 @@ import { leastCoverage } from '@/lib/domain/search/least-coverage'
 import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/understand-query'
 import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
 import { Vocabulary } from '@/lib/domain/search/vocabulary'
+import { searchWeights, type SearchWeights } from '@/lib/domain/search/weights'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
 import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
 import { findPassage } from './find-passage'
@@ -34,7 +35,7 @@ interface Wanted { least: number; mostScored: number; wanted: number }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
-  private readonly postings = new Postings()
+  private readonly postings: Postings
   private readonly kept = new Map<number, Kept>()
   private readonly slots: (Kept | undefined)[] = []
   private readonly freeSlots: number[] = []
@@ -44,7 +45,8 @@ export class SearchIndex {
   private readonly synonyms: Synonyms
   private readonly placed: PlacedTermsOfTexts
 
-  constructor(synonyms: SynonymList) {
+  constructor(synonyms: SynonymList, private readonly weights: SearchWeights = searchWeights) {
+    this.postings = new Postings(weights.bm25)
     this.synonyms = new Synonyms(synonyms)
     this.placed = new PlacedTermsOfTexts(this.synonyms)
   }
@@ -56,7 +58,7 @@ export class SearchIndex {
   /** Adds an entry or puts its new text in place of the old. */
   put(document: SearchDocument): void {
     this.remove(document.id)
-    const terms = termsOfDocument(document, this.synonyms)
+    const terms = termsOfDocument(document, this.synonyms, this.weights.titleRepeats)
     const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
     this.postings.add(kept.slot, terms.all)
     this.titles.put(document.id, document.title)
@@ -69,7 +71,7 @@ export class SearchIndex {
   remove(id: number): void {
     const old = this.kept.get(id)
     if (!old) return
-    const terms = termsOfDocument(old.document, this.synonyms)
+    const terms = termsOfDocument(old.document, this.synonyms, this.weights.titleRepeats)
     this.count(terms, -1)
     this.postings.remove(old.slot, terms.all)
     this.slots[old.slot] = undefined
@@ -82,7 +84,7 @@ export class SearchIndex {
     const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
     const { affordable, tooCommon } = this.afford(concepts)
     const question = new Question(affordable)
-    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored, wanted: offset + limit })
+    const found = this.rank(question, filters, { least: leastCoverage(affordable.length, this.weights.coverage), mostScored, wanted: offset + limit })
     const page = found.slice(offset, offset + limit)
     whenOrdered?.(page.map(({ kept }) => kept.document.id))
     return {
@@ -108,7 +110,7 @@ export class SearchIndex {
   }
 
   private corpus(): Corpus {
-    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms }
+    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms, factor: this.weights.factor }
   }
 
   private count(terms: DocumentTerms, by: 1 | -1): void {
