@@ -8,8 +8,9 @@ import { Vocabulary } from '@/lib/domain/search/vocabulary'
 import { searchWeights, type SearchWeights } from '@/lib/domain/search/weights'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
 import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
+import { feedbackQuestion } from './feedback-question'
 import { findPassage } from './find-passage'
-import type { HeldTerms } from './held-terms'
+import { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
 import { Postings } from './postings'
 import { Question } from './question'
@@ -84,7 +85,8 @@ export class SearchIndex {
     const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
     const { affordable, tooCommon } = this.afford(concepts)
     const question = new Question(affordable)
-    const found = this.rank(question, filters, { least: leastCoverage(affordable.length, this.weights.coverage), mostScored, wanted: offset + limit })
+    const ranked = this.rank(question, filters, { least: leastCoverage(affordable.length, this.weights.coverage), mostScored, wanted: offset + limit })
+    const found = affordable.length < this.weights.feedback.concepts ? ranked : this.orderByFeedback(ranked, question)
     const page = found.slice(offset, offset + limit)
     whenOrdered?.(page.map(({ kept }) => kept.document.id))
     return {
@@ -107,6 +109,20 @@ export class SearchIndex {
       const title = this.kept.get(id)?.document.title
       return title === undefined ? [] : [{ id, title }]
     })
+  }
+
+  /** Orders the best anew by what they share: a long question means words that it does not say. */
+  private orderByFeedback(found: Scored[], question: Question): Scored[] {
+    const { feedback } = this.weights
+    const first = found.slice(0, feedback.entries).map(({ kept, score }) => ({ score, terms: termsOfDocument(kept.document, this.synonyms, 1).all }))
+    const further = feedbackQuestion(first, question, this.corpus(), feedback)
+    if (!further) return found
+    const best = found.slice(0, mostScored)
+    const chosen = new Uint8Array(this.slots.length)
+    for (const { kept } of best) chosen[kept.slot] = 1
+    const scores = this.postings.score(further, new HeldTerms(further.terms.length, 0), chosen)
+    for (const entry of best) entry.score += (scores[entry.kept.slot] ?? 0) * entry.kept.weight
+    return [...best.sort(byScore), ...found.slice(mostScored)]
   }
 
   private corpus(): Corpus {

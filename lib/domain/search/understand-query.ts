@@ -23,6 +23,8 @@ export interface Route {
   weight: number
   /** Share of the concept that is covered, 0 … 1. */
   strength: number
+  /** Adds to the score only where this term is not held: another spelling of the same says nothing more. */
+  unless?: string
 }
 
 export interface Concept {
@@ -117,7 +119,7 @@ function joinNeighbours(tokens: readonly Token[], drafts: Map<string, Draft>, co
     const term = stemOf(before.word + token.word)
     if (corpus.frequency(term) === 0) return
     for (const draft of [drafts.get(before.term), drafts.get(token.term)]) {
-      draft?.routes.push({ terms: [term], weight: corpus.factor.joined, strength: 1 })
+      draft?.routes.push({ terms: [term], weight: corpus.factor.joined, strength: 1, unless: draft.token.term })
       if (draft && !draft.known) Object.assign(draft, { known: true, mass: rarity(corpus.frequency(term), corpus.documents) })
     }
   })

@@ -18,13 +18,18 @@ const coverage = (name: keyof SearchWeights['coverage'], values: readonly number
   name: `coverage ${name}`, values, read: (w) => w.coverage[name], with: (w, value) => ({ ...w, coverage: { ...w.coverage, [name]: value } }),
 })
 
+const feedback = (name: keyof SearchWeights['feedback'], values: readonly number[]): Coordinate => ({
+  name: `feedback ${name}`, values, read: (w) => w.feedback[name], with: (w, value) => ({ ...w, feedback: { ...w.feedback, [name]: value } }),
+})
+
 const coordinates: readonly Coordinate[] = [
   { name: 'title repeats', values: [1, 2, 3, 4, 5], read: (w) => w.titleRepeats, with: (w, titleRepeats) => ({ ...w, titleRepeats }) },
   bm25('k', [0.9, 1.2, 1.5, 1.8, 2.2]), bm25('b', [0.4, 0.55, 0.7, 0.85]),
-  factor('synonym', [0.3, 0.4, 0.5, 0.65, 0.8]), factor('also', [0.1, 0.25, 0.4, 0.6]), factor('joined', [0.1, 0.2, 0.4]),
+  factor('synonym', [0.3, 0.4, 0.5, 0.65, 0.8]), factor('also', [0.1, 0.25, 0.4, 0.6]), factor('joined', [0.2, 0.5, 0.8]),
   factor('splitKnown', [0, 0.2, 0.4]), factor('splitUnknown', [0.7, 0.9]), factor('completed', [0.6, 0.8, 1]),
   factor('unit', [0.1, 0.3, 0.5]), factor('unknownNumber', [0.2, 0.4, 0.6]),
   coverage('short', [0.4, 0.45, 0.5, 0.55]), coverage('perConcept', [0.02, 0.04, 0.06]), coverage('least', [0.25, 0.29, 0.33, 0.37]),
+  feedback('concepts', [3, 4, 5]), feedback('entries', [4, 6, 8]), feedback('terms', [15, 25, 40]), feedback('weight', [0.1, 0.2, 0.3]),
 ]
 const mostRounds = 3
 /** Less is chance: with forty questions one more answered is worth 0.05. */
