@@ -25,5 +25,5 @@ export const searchWeights: SearchWeights = {
     unit: 0.3, unknownNumber: 0.4,
   },
   coverage: { short: 0.5, perConcept: 0.04, least: 0.33 },
-  feedback: { concepts: 3, entries: 6, terms: 25, weight: 0.2 },
+  feedback: { concepts: 3, entries: 6, terms: 25, weight: 0.3 },
 }

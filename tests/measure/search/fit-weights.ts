@@ -29,7 +29,7 @@ const coordinates: readonly Coordinate[] = [
   factor('splitKnown', [0, 0.2, 0.4]), factor('splitUnknown', [0.7, 0.9]), factor('completed', [0.6, 0.8, 1]),
   factor('unit', [0.1, 0.3, 0.5]), factor('unknownNumber', [0.2, 0.4, 0.6]),
   coverage('short', [0.4, 0.45, 0.5, 0.55]), coverage('perConcept', [0.02, 0.04, 0.06]), coverage('least', [0.25, 0.29, 0.33, 0.37]),
-  feedback('concepts', [3, 4, 5]), feedback('entries', [4, 6, 8]), feedback('terms', [15, 25, 40]), feedback('weight', [0.1, 0.2, 0.3]),
+  feedback('concepts', [3, 4, 5]), feedback('entries', [4, 6, 8]), feedback('terms', [15, 25, 40]), feedback('weight', [0.1, 0.2, 0.3, 0.4]),
 ]
 const mostRounds = 3
 /** Less is chance: with forty questions one more answered is worth 0.05. */
