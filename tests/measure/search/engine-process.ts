@@ -84,6 +84,8 @@ async function askWhileWriting(engine: Engine, { questions }: QuestionKind, seco
     if (!question) break
     await engine.ask(question)
     taken.push(performance.now() - due)
+    // Also when there is no pause to look in, or an engine that is late would seem to find nothing.
+    await lookForWritten(engine, delays)
     highest = Math.max(highest, residentMB())
   }
   loop.disable()
