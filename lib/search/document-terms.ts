@@ -1,4 +1,4 @@
-// Which terms an entry is indexed under: title three times, labels once, its passages, the synonym groups they stand in,
+// Which terms an entry is indexed under: title several times, labels once, its passages, the synonym groups they stand in,
 // and the values of their measurements.
 import 'server-only'
 import { analyseText } from '@/lib/domain/search/analyse-text'
@@ -13,11 +13,11 @@ export interface DocumentTerms {
   words: Set<string>
 }
 
-/** Weight by repetition, because one joined field ranks better than several (measured). */
-const titleRepeats = 3
-
-/** Terms of an entry; the same document always gives the same terms, so that it can be counted out again. */
-export function termsOfDocument(document: SearchDocument, synonyms: Synonyms): DocumentTerms {
+/**
+ * Terms of an entry; the same document always gives the same terms, so that it can be counted out again.
+ * The title weighs by repetition, because one joined field ranks better than several (measured).
+ */
+export function termsOfDocument(document: SearchDocument, synonyms: Synonyms, titleRepeats: number): DocumentTerms {
   const result: DocumentTerms = { all: [], words: new Set() }
   const title = readPart(document.title, synonyms, result)
   for (let repeat = 1; repeat < titleRepeats; repeat++) result.all.push(...title)

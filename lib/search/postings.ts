@@ -2,19 +2,21 @@
 // MiniSearch multiplies a score by the number of matched terms and makes objects of every match; both are kept away here.
 import 'server-only'
 import MiniSearch, { type SearchResult } from 'minisearch'
+import type { SearchWeights } from '@/lib/domain/search/weights'
 import { HeldTerms } from './held-terms'
 import type { Question } from './question'
 
-/** Measured on 1,400 abstracts and on a trade collection: one joined field, no lower bound on term frequency. */
-const bm25 = { k: 1.8, b: 0.7, d: 0 }
-
 export class Postings {
-  private readonly mini = new MiniSearch<{ id: number; terms: string }>({
-    fields: ['terms'],
-    tokenize: (text) => text.split('\n'),
-    processTerm: (term) => term,
-    searchOptions: { combineWith: 'OR', bm25 },
-  })
+  private readonly mini: MiniSearch<{ id: number; terms: string }>
+
+  constructor(bm25: SearchWeights['bm25']) {
+    this.mini = new MiniSearch({
+      fields: ['terms'],
+      tokenize: (text) => text.split('\n'),
+      processTerm: (term) => term,
+      searchOptions: { combineWith: 'OR', bm25 },
+    })
+  }
 
   add(slot: number, terms: readonly string[]): void {
     this.mini.add({ id: slot, terms: terms.join('\n') })

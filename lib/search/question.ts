@@ -2,7 +2,7 @@
 import 'server-only'
 import type { Concept, Route } from '@/lib/domain/search/understand-query'
 
-interface NumberedRoute { first: number; others: readonly number[]; weight: number; strength: number }
+interface NumberedRoute { first: number; others: readonly number[]; weight: number; strength: number; unless: number | undefined }
 interface NumberedConcept { mass: number; routes: readonly NumberedRoute[] }
 
 /** Which of a question's terms something holds. */
@@ -51,16 +51,17 @@ export class Question {
   /** Factor of a term's text score: the sum of the routes it completes. */
   weight(term: number, holds: Holds): number {
     let sum = 0
-    for (const { first, others, weight } of this.routesOf[term] ?? []) {
+    for (const { first, others, weight, unless } of this.routesOf[term] ?? []) {
+      if (unless !== undefined && holds(unless)) continue
       if (others.length === 0) sum += weight
       else if (holds(first) && holdsAll(others, holds)) sum += weight / (1 + others.length)
     }
     return sum
   }
 
-  private numbered({ terms, weight, strength }: Route): NumberedRoute {
+  private numbered({ terms, weight, strength, unless }: Route): NumberedRoute {
     const [first = 0, ...others] = terms.map((term) => this.numberOf(term))
-    return { first, others, weight, strength }
+    return { first, others, weight, strength, unless: unless === undefined ? undefined : this.numberOf(unless) }
   }
 
   private numberOf(term: string): number {
