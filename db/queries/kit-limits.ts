@@ -1,6 +1,6 @@
 // The kit makers' own limits. Ended ones stay, and are only listed where a person reads them.
 import 'server-only'
-import { and, asc, desc, eq, exists, isNull } from 'drizzle-orm'
+import { and, asc, desc, eq, exists, isNull, or } from 'drizzle-orm'
 import type { ReaderOrTransaction } from '../client'
 import { kit, kitLimit, member } from '../schema'
 
@@ -24,8 +24,8 @@ export async function getLimit(reader: ReaderOrTransaction, id: number) {
   return row ?? null
 }
 
-/** Kits that have a limit in force: only these are worth choosing at a shop table. */
-export async function listKitsWithLimits(reader: ReaderOrTransaction) {
+/** Kits that have a limit in force: only these are worth choosing at a shop table. And `also`, which was chosen already. */
+export async function listKitsWithLimits(reader: ReaderOrTransaction, also = '') {
   const inForce = reader.select({ id: kitLimit.id }).from(kitLimit).where(and(eq(kitLimit.kitId, kit.id), isNull(kitLimit.endedAt)))
-  return reader.select({ slug: kit.slug, name: kit.name, maker: kit.maker }).from(kit).where(exists(inForce)).orderBy(asc(kit.id))
+  return reader.select({ slug: kit.slug, name: kit.name, maker: kit.maker }).from(kit).where(or(exists(inForce), eq(kit.slug, also))).orderBy(asc(kit.id))
 }
