@@ -82,7 +82,7 @@ function ValueFields({ units, shown }: { units: readonly string[]; shown: Form }
 function InputField({ input, shown }: { input: LimitFormProps['inputs'][number]; shown: Form }) {
   const { name, label, kind, unit, options = [] } = input
   const path = `inputs.${name}`
-  if (kind !== 'choice') return <PlainField name={path} label={label} {...(unit ? { help: `In ${unit === 'lbf-in' ? 'in-lb' : unit}, or with its unit.` } : {})} shown={shown} maxLength={60} />
+  if (kind !== 'choice') return <PlainField name={path} label={label} {...(unit ? { help: `In ${unit === 'lbf-in' ? 'in-lb' : unit === 'in' ? 'inches' : unit}, or with its unit.` } : {})} shown={shown} maxLength={60} />
   const value = shown.valueOf(path)
   return (
     <Select key={value} id={fieldId(path)} name={path} label={label} error={shown.errorOf(path)} defaultValue={value}>

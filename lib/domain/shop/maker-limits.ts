@@ -1,7 +1,9 @@
 // The kit maker's own limits, entered by a steward: they come before the handbook's and are named. Storing them is elsewhere.
 import { holdsFor, inchesOfInput } from './limit-inputs'
 import { DIAMETERS, inDiameters } from './limit-quantity'
+import { allowedBy, limitSense } from './limit-sense'
 import type { ShopInputs } from './shop-input'
+import { length } from './shop-result'
 import type { ShopResult, ShopTable, ShopValue } from './shop-table'
 
 export interface MakerLimit {
@@ -50,5 +52,21 @@ export function diameterOf({ inputs: declared }: Pick<ShopTable, 'inputs'>, inpu
 function makerResult({ result: name, value, unit, display, reference, note }: MakerLimit, table: Asked, inputs: ShopInputs): ShopResult {
   const diameter = unit === DIAMETERS ? diameterOf(table, inputs) : null
   const quantity = diameter === null ? { value, unit, display } : inDiameters(value, diameter)
-  return { name, ...quantity, source: reference, basis: 'maker', ...(note ? { note } : {}), ...(diameter === null ? {} : { how: display.inch }) }
+  const against = againstWords(table.slug, name, quantity.value, inputs)
+  const said = [note, against].filter(Boolean).join('; ')
+  return { name, ...quantity, source: reference, basis: 'maker', ...(said ? { note: said } : {}), ...(diameter === null ? {} : { how: display.inch }), ...(against ? { against } : {}) }
+}
+
+/** The input in which a reader gives what they have measured of a result, in inches. */
+const measuredIn: Readonly<Record<string, Readonly<Record<string, string>>>> = {
+  rivet: { 'edge-centre': 'edge', 'pitch-least': 'pitch' }, bend: { 'radius-least': 'radius' }, wire: { clearance: 'clearance', support: 'spacing' },
+}
+
+/** In what the reader's own measure doesn't meet the maker's limit: it may meet the handbook's. '' where it does, or where none was given. */
+function againstWords(table: string, result: string, value: ShopValue, inputs: ShopInputs): string {
+  const given = inputs[measuredIn[table]?.[result] ?? '']
+  const allowed = allowedBy(value, limitSense(table, result))
+  if (typeof given !== 'number' || !allowed) return ''
+  if (given < allowed.low - 1e-6) return `short by ${length(allowed.low - given).display.inch} of the kit maker’s least`
+  return given > allowed.high + 1e-6 ? `over the kit maker’s most by ${length(given - allowed.high).display.inch}` : ''
 }

@@ -170,6 +170,15 @@ describe("The maker's own limits", () => {
     expect(edges({ head: 'universal' }, [{ ...limit, inputs: { diameter: '1/8', head: 'flush' } }]), 'one of two').toEqual([])
   })
 
+  it('are held against what was measured, also where the handbook is met', () => {
+    const three = { ...limit, value: { min: 3 }, unit: 'D', display: { inch: 'at least 3 D', metric: 'at least 3 D' } }
+    // 3 × 1/8 less 5/16 is 1/16; the handbook's 2 D is met.
+    expect(edges({ edge: '5/16' }, [three])[0]).toMatchObject({ against: 'short by 1/16 in of the kit maker’s least' })
+    expect(edges({ edge: '3/8' }, [three])[0]?.against).toBeUndefined()
+    const support = { ...limit, table: 'wire', result: 'support', value: { max: 12 } }
+    expect(named(withLimits('wire', { spacing: '18' }, [support]), 'support')[0]).toMatchObject({ basis: 'maker', against: 'over the kit maker’s most by 6 in' })
+  })
+
   it('in diameters are worked out for the rivet asked for: 2 D of 5/32 is 5/16', () => {
     const twice = { ...limit, value: { min: 2 }, unit: 'D', display: { inch: 'at least 2 D', metric: 'at least 2 D' } }
     expect(edges({ diameter: '5/32' }, [twice])).toMatchObject([{ value: { min: 0.3125 }, unit: 'in', display: { inch: 'at least 5/16 in', metric: 'at least 7.94 mm' }, how: 'at least 2 D' }])

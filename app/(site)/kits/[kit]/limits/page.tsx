@@ -4,7 +4,6 @@ import { notFound } from 'next/navigation'
 import { Sheet, SheetHead } from '@/components/entries/sheet'
 import { LimitList } from '@/components/kits/limit-list'
 import { PageTitle } from '@/components/layout/page-title'
-import { PlansWin } from '@/components/layout/plans-win'
 import { Disclosure } from '@/components/ui/disclosure'
 import { EmptyState } from '@/components/ui/empty-state'
 import { FieldsForm } from '@/components/ui/fields-form'
@@ -38,7 +37,6 @@ export default async function KitLimitsPage({ params, searchParams }: PageProps<
       </Sheet>
       {maySet ? <EnterLimit kit={slug} of={Array.isArray(of) ? of[0] : of} /> : null}
       {ended.length > 0 ? <Sheet as="section" labelledBy="ended"><SheetHead title="Ended" id="ended" /><LimitList kit={slug} limits={ended} /></Sheet> : null}
-      <PlansWin />
     </>
   )
 }
