@@ -33,13 +33,24 @@ export function withMakerLimits(table: Asked, inputs: ShopInputs, results: reado
   const before = (name: string): ShopResult[] => mine.filter((limit) => limit.result === name).map((limit) => makerResult(limit, table, inputs))
   const seen = new Set<string>()
   const placed = results.flatMap((item) => {
-    if (!named.has(item.name)) return [item]
+    if (!named.has(item.name)) return [isWorkedFrom(table.slug, named, item.name, inputs) ? withNote(item, 'worked out from the handbook’s value, not from the kit maker’s limit') : item]
     const first = seen.has(item.name) ? [] : before(item.name)
     seen.add(item.name)
-    return [...first, { ...item, note: [item.note, 'the kit maker’s own limit wins'].filter(Boolean).join('; ') }]
+    return [...first, withNote(item, 'the kit maker’s own limit wins')]
   })
   return [...mine.filter((limit) => !seen.has(limit.result)).map((limit) => makerResult(limit, table, inputs)), ...placed]
 }
+
+/** Results that a table works out from another of its results: by result, what they are worked out from. */
+const workedFrom: Readonly<Record<string, Readonly<Record<string, readonly string[]>>>> = {
+  rivet: { 'edge-rim': ['edge-centre', 'hole'] }, torque: Object.fromEntries(['with-drag', 'castle-start', 'castle-limit', 'wrench'].map((name) => [name, ['torque']])), bend: { 'radius-times': ['radius-least'] },
+  grommet: Object.fromEntries(['drill', 'drill-below', 'drill-above', 'step-drill'].map((name) => [name, ['hole', 'hole-groove']])),
+}
+/** The wrench is set to the reader's own target where one is given. */
+const isWorkedFrom = (table: string, limited: ReadonlySet<string>, result: string, inputs: ShopInputs): boolean =>
+  !(result === 'wrench' && inputs['target'] !== undefined) && (workedFrom[table]?.[result] ?? []).some((name) => limited.has(name))
+
+const withNote = (result: ShopResult, note: string): ShopResult => ({ ...result, note: [result.note, note].filter(Boolean).join('; ') })
 
 /** The fastener's diameter in inches among a table's inputs, or null where it has none. */
 export function diameterOf({ inputs: declared }: Pick<ShopTable, 'inputs'>, inputs: ShopInputs): number | null {

@@ -170,6 +170,13 @@ describe("The maker's own limits", () => {
     expect(edges({ head: 'universal' }, [{ ...limit, inputs: { diameter: '1/8', head: 'flush' } }]), 'one of two').toEqual([])
   })
 
+  it('leave what the table works out from the handbook, and say so', () => {
+    const torque = { ...limit, table: 'torque', result: 'torque', value: { min: 26, max: 31 }, unit: 'lbf-in' }
+    // AN3 at 20 to 25 in-lb (AC 43.13-1B, Table 7-1) and 6 in-lb of drag.
+    expect(named(withLimits('torque', { thread: 'AN3', drag: '6' }, [torque]), 'with-drag')[0]).toMatchObject({ value: { min: 26, max: 31 }, note: expect.stringContaining('not from the kit maker’s limit') })
+    expect(named(withLimits('torque', { thread: 'AN4', drag: '6' }, [{ ...torque, inputs: { thread: 'AN3' } }]), 'with-drag')[0]?.note ?? '').not.toContain('kit maker')
+  })
+
   it('are held against what was measured, also where the handbook is met', () => {
     const three = { ...limit, value: { min: 3 }, unit: 'D', display: { inch: 'at least 3 D', metric: 'at least 3 D' } }
     // 3 × 1/8 less 5/16 is 1/16; the handbook's 2 D is met.
