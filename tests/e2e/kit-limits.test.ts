@@ -29,12 +29,12 @@ describe.each(journeys)('at $width px, JavaScript $javaScript, $of', ({ width, j
     expect(await page.getByLabel('Page, step or paragraph').inputValue()).toBe('page 3')
 
     // Less than any handbook: said plainly, and kept only on a second press.
-    await page.getByLabel('At least').fill('1/32')
+    await page.getByRole('textbox', { name: 'At least', exact: true }).fill('1/32')
     await page.getByLabel('Bulletin or manual').fill(bulletin)
     await page.getByLabel('Date', { exact: true }).fill('14 Mar 2026')
     await page.getByRole('button', { name: 'Enter the limit' }).click()
     await page.getByText(/allows less than the handbook/).waitFor()
-    expect(await page.getByLabel('At least').inputValue()).toBe('1/32')
+    expect(await page.getByRole('textbox', { name: 'At least', exact: true }).inputValue()).toBe('1/32')
     await page.getByRole('button', { name: 'The page is right: enter it' }).click()
     await page.waitForURL(/limits#limit-\d+/)
     const row = page.getByRole('listitem').filter({ hasText: bulletin })
