@@ -101,6 +101,15 @@ BEGIN SELECT raise(ABORT, 'law: the audit trail is append-only'); END;
 CREATE TRIGGER audit_never_deleted BEFORE DELETE ON audit
 BEGIN SELECT raise(ABORT, 'law: the audit trail is append-only'); END;
 
+CREATE TRIGGER limit_only_ended BEFORE UPDATE ON kit_limit
+WHEN NOT (OLD.ended_at IS NULL AND NEW.ended_at IS NOT NULL AND NEW.end_reason IS NOT NULL
+  AND NEW.kit_id = OLD.kit_id AND NEW.shop_table = OLD.shop_table AND NEW.result = OLD.result AND NEW.inputs = OLD.inputs AND NEW.value = OLD.value
+  AND NEW.unit = OLD.unit AND NEW.display = OLD.display AND NEW.reference = OLD.reference AND NEW.note = OLD.note AND NEW.created_at = OLD.created_at)
+BEGIN SELECT raise(ABORT, 'law: a limit can only be ended'); END;
+
+CREATE TRIGGER limit_never_deleted BEFORE DELETE ON kit_limit
+BEGIN SELECT raise(ABORT, 'law: a limit is ended, never deleted'); END;
+
 -- The change log. An answer's change is its question's: search shows one hit an entry.
 CREATE TRIGGER change_post_inserted AFTER INSERT ON post
 BEGIN INSERT INTO change (post_id) VALUES (coalesce(NEW.parent_id, NEW.id)); END;

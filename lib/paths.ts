@@ -26,6 +26,7 @@ export const paths = {
   drillChart: '/shop/drills/chart' as Route,
   kits: '/kits' as Route,
   kit: (slug: string) => `/kits/${slug}` as Route,
+  kitLimits: (slug: string, address: { of?: string } = {}, anchor?: string) => `/kits/${slug}/limits${query(address)}${anchor ? `#${anchor}` : ''}` as Route,
   section: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}` as Route,
   sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
   feed: '/feed.atom' as Route,

@@ -8,6 +8,8 @@ import * as answers from './entries/[id]/answers/route'
 import * as entries from './entries/route'
 import * as health from './health/route'
 import * as importing from './import/route'
+import * as endLimit from './kits/[kit]/limits/[id]/end/route'
+import * as kitLimits from './kits/[kit]/limits/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
@@ -42,6 +44,8 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/cautions/required': requiredCautions,
   '/api/kits': kits,
   '/api/kits/{kit}': kit,
+  '/api/kits/{kit}/limits': kitLimits,
+  '/api/kits/{kit}/limits/{id}/end': endLimit,
   '/api/operations': operations,
   '/api/measurements': measurements,
   '/api/numbers-check': numbersCheck,

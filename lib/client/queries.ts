@@ -36,10 +36,10 @@ export const requiredOf = (text: WritingText) => queryOptions({
     text.answerTo ?? { title: text.title.slice(0, 160), body: text.body, tasks: text.tasks, sections: text.sections, hardware: text.hardware, ...(text.kit ? { kit: text.kit } : {}) }),
 })
 
-/** The numbers of a text against the shop tables. */
-export const checksOf = (body: string, hardware: readonly string[]) => queryOptions({
-  queryKey: ['numbers-check', body, hardware], enabled: body.trim() !== '', staleTime: 30_000,
-  queryFn: ({ signal }) => readJson<{ checks: NumbersCheckItem[] }>('/api/numbers-check', signal, { text: body, hardware }),
+/** The numbers of a text against the shop tables and the limits of the kit it is about. */
+export const checksOf = (body: string, hardware: readonly string[], kit: string | undefined) => queryOptions({
+  queryKey: ['numbers-check', body, hardware, kit], enabled: body.trim() !== '', staleTime: 30_000,
+  queryFn: ({ signal }) => readJson<{ checks: NumbersCheckItem[] }>('/api/numbers-check', signal, { text: body, hardware, ...(kit ? { kit } : {}) }),
 })
 
 /** Markdown as it will look. */

@@ -21,6 +21,7 @@ export const whyNot: Record<Act, string> = {
   'people.set-role': 'Stewards change roles.',
   'people.set-state': 'Moderators suspend builders, stewards anyone but themselves.',
   'people.grant-mentorship': 'Mentorship is granted by a steward to somebody else.',
+  'kit.set-limits': 'Stewards enter and end the kit maker’s limits.',
   'import': 'Stewards import.',
   'account.open': 'Sign in to see your account.',
 }

@@ -8,8 +8,8 @@ export const stampStateSchema = z.enum(stampStates)
 export const basisSchema = z.enum(bases)
 export const replyScopeSchema = z.enum(replyScopes)
 export const resultSchema = z.enum(['as-written', 'with-change', 'did-not-work'])
-const isoMoment = z.iso.datetime()
-const person = z.object({ id: z.int().optional(), name: z.string() })
+export const isoMoment = z.iso.datetime()
+export const person = z.object({ id: z.int().optional(), name: z.string() })
 
 export const cautionSchema = z.object({
   code: z.string(), signalWord: z.enum(['WARNING', 'CAUTION', 'NOTICE']), topic: z.enum(CAUTION_TOPICS), title: z.string(), text: z.string(),

@@ -38,6 +38,8 @@ const table: Record<string, () => readonly [string, readonly number[]]> = {
   'an unknown shop table': () => ['/shop/nothing', nobody],
   'kits': () => ['/kits', everybody],
   'a kit': () => ['/kits/whimbrel-2', [307, 307, 307, 307, 307, 307]],
+  'the maker’s limits': () => ['/kits/whimbrel-2/limits', everybody],
+  'the limits of an unknown kit': () => ['/kits/albatross-9/limits', nobody],
   'a section': () => ['/kits/whimbrel-2/W-3', everybody],
   'an entry': () => [question.url, everybody],
   'its print': () => [`${question.url}/print`, everybody],

@@ -82,6 +82,7 @@ const table: Record<string, readonly Check[]> = {
   'feed.atom/route.ts': [{ feed: () => '/feed.atom', shows: ['title', 'open', 'lesson'] }],
   '(site)/kits/page.tsx': [{ without: () => '/kits', why: 'kits and sections only' }],
   '(site)/kits/[kit]/page.tsx': [{ without: () => '/kits/whimbrel-2', why: 'leads to the kits' }],
+  '(site)/kits/[kit]/limits/page.tsx': [{ without: () => '/kits/whimbrel-2/limits', as: 'wren', why: 'the maker’s values, no post' }],
   '(site)/ask/page.tsx': [{ without: () => '/ask', as: author, why: 'an empty form; what may already answer it has a test of its own below' }],
   '(site)/lesson/page.tsx': [{ without: () => '/lesson', as: author, why: 'an empty form' }],
   '(site)/guide/[slug]/page.tsx': [{ without: () => '/guide/how-stamps-work', why: 'prose of the house' }],
@@ -129,6 +130,11 @@ const table: Record<string, readonly Check[]> = {
   'api/kits/route.ts': [{ without: () => '/api/kits', why: 'kits only' }],
   'api/kits/[kit]/route.ts': [{ without: () => '/api/kits/whimbrel-2', why: 'sections only' }],
   'api/operations/route.ts': [{ without: () => '/api/operations', why: 'operations and tasks only' }],
+  'api/kits/[kit]/limits/route.ts': [{ without: () => '/api/kits/whimbrel-2/limits', why: 'the maker’s values, no post' }],
+  'api/kits/[kit]/limits/[id]/end/route.ts': [{ api: async () => {
+    const made = await must('wren', 'POST', '/api/kits/whimbrel-2/limits', { table: 'tube', result: 'hand-bend', value: { words: 'none by hand' }, reference: { title: 'Bulletin SB-11', section: 'page 1', year: '2026' } })
+    return must('wren', 'POST', `/api/kits/whimbrel-2/limits/${made.id}/end`, { reason: 'Replaced.' })
+  }, shows: [] }],
   'api/shop/route.ts': [{ without: () => '/api/shop', why: 'tables only' }],
   'api/shop/[table]/route.ts': [{ without: () => '/api/shop/grommet?bore=3/8', why: 'numbers and the cautions of the table, no post' }],
   'api/measurements/route.ts': [{ api: async () => JSON.stringify(await must(null, 'POST', '/api/measurements', { text: '#30 in 0.032' })), shows: [] }],

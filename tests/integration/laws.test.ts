@@ -22,6 +22,7 @@ beforeAll(async () => {
   await put(builder, 'outcome', { result: 'as-written' })
   await put(builder, 'reliance', {})
   await sql(`insert into post_caution (post_id, code, origin, because, created_at) values (${answer.id}, 'eyes', 'moderator', 'x', 1)`)
+  await sql(`insert into kit_limit (kit_id, shop_table, result, inputs, value, unit, display, reference, created_at) values (1, 'rivet', 'edge-centre', '{}', '{"min":2}', 'D', '{}', '{}', 1)`)
   await sql(`insert into mentorship (member_id, number, fields, reason, granted_by, created_at) values (${answer.by.id}, 'OW 001', 'x', 'x', ${steward.id}, 1)`)
   // Only one steward may be left for the law about the last one.
   await sql(`update member set role = 'member' where role = 'steward' and id <> ${steward.id}`)
@@ -55,6 +56,10 @@ const broken: Record<string, { says: string; by: () => string[] }> = {
   stamp_only_by_a_mentor: { says: 'mentorship was granted', by: () => [aStamp(ids.answer, { mentor: ids.builder }), aStamp(ids.answer, { mark: 'XX 999' })] },
   stamp_not_for_one_serial: { says: 'one serial cannot be stamped', by: () => [aStamp(ids.oneSerial), aStamp(ids.answer, { basis: 'maker-reply', scope: "'one-serial'" })] },
   stamp_names_the_questions_revision: { says: 'names the revision of its question', by: () => [aStamp(ids.answer, { questionRevision: 9 }), aStamp(ids.answer, { questionRevision: 0 })] },
+  limit_only_ended: { says: 'only be ended', by: () => [
+    `update kit_limit set value = '{}'`, `update kit_limit set ended_at = 1`, `update kit_limit set ended_at = 1, end_reason = 'x', unit = 'in'`,
+  ] },
+  limit_never_deleted: { says: 'ended, never deleted', by: () => ['delete from kit_limit'] },
   stamp_only_withdrawn: { says: 'only be withdrawn', by: () => [
     `update stamp set basis = 'plans' where id = ${ids.stamp}`, `update stamp set revision = 2 where id = ${ids.stamp}`, `update stamp set withdrawn_at = 1 where id = ${ids.stamp}`,
     `update stamp set withdrawn_at = 1, withdrawn_reason = 'x', mark = 'XX 999' where id = ${ids.stamp}`,

@@ -3,6 +3,7 @@ import 'server-only'
 import { countEntries, listEntryIds } from '@/db/queries/entries'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { computeQuery } from '@/lib/services/shop/compute-query'
+import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import type { AppContext } from '@/lib/context'
 import type { Hit, SearchQuery, SearchResult } from '@/lib/schemas/search'
 import { loadHits, presentHits, type HitMaterial } from './present-hits'
@@ -14,13 +15,17 @@ export async function searchEntries(context: AppContext, query: SearchQuery): Pr
   const finding = text === '' ? findNewest(context, query) : findByWords(context, text, query)
   // The tables are asked while the search thread looks the words up; a search that fails meanwhile is heard below.
   finding.catch(() => undefined)
-  const [measurements, computed] = [findMeasurements(text), query.offset === 0 ? computeQuery(text) : []]
+  const measurements = findMeasurements(text)
+  const computed = query.offset === 0 ? computeQuery(text, await limitsOf(context, query)) : []
   const { results, total, ignored, didYouMean } = await finding
   return {
     query: { text: query.q, ignored, measurements, ...(didYouMean !== null ? { didYouMean } : {}) },
     computed, results, total, tookMs: Math.round((performance.now() - startedAt) * 10) / 10,
   }
 }
+
+/** Without a kit nothing is read, nor waited for. */
+const limitsOf = async ({ reader }: AppContext, { kit }: SearchQuery) => (kit === undefined ? {} : { kit, limits: await loadMakerLimits(reader, kit) })
 
 interface Found { results: Hit[]; total: number; ignored: string[]; didYouMean: string | null }
 

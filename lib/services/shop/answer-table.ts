@@ -14,6 +14,8 @@ interface Beside {
   alternatives?: ShopAnswer['alternatives']
   /** The kit maker's own limits, which come before the handbook's. */
   limits?: readonly MakerLimit[]
+  /** Slug of the kit they are of: the permanent link keeps it. */
+  kit?: string | undefined
 }
 export type TableAnswer = { ok: true; answer: ShopAnswer } | { ok: false; errors: InputError[] }
 
@@ -21,10 +23,10 @@ export type TableAnswer = { ok: true; answer: ShopAnswer } | { ok: false; errors
 export function answerTable(table: ShopTable, raw: RawInputs, beside: Beside = {}): TableAnswer {
   const outcome = table.compute(raw)
   if (!outcome.ok) return outcome
-  const results = withMakerLimits(table.slug, outcome.results, beside.limits ?? [])
+  const results = withMakerLimits(table, outcome.inputs, outcome.results, beside.limits ?? [])
   const answer: ShopAnswer = {
     table: table.slug, inputs: { ...outcome.inputs }, readAs: beside.readAs ?? readAs(table, outcome.inputs), alternatives: beside.alternatives ?? [],
-    results: results.map((result) => labelled(table, result)), cautions: shopCautions(table), url: paths.shopTable(table.slug, linkInputs(table, raw)),
+    results: results.map((result) => labelled(table, result)), cautions: shopCautions(table), url: paths.shopTable(table.slug, { ...linkInputs(table, raw), ...(beside.kit ? { kit: beside.kit } : {}) }),
   }
   return { ok: true, answer }
 }

@@ -32,7 +32,7 @@ export function LessonSheet({ page, allCautions }: { page: EntryPage; allCaution
       <PostTitleBlock post={entry} extra={typeof hours === 'number' ? [{ label: 'Hours', value: String(hours), width: 'half' }] : []} />
       <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} />
     </Sheet>
-    <NumbersCheckSheet posts={[{ label: 'Lesson', checks: own.checks }]} />
+    <NumbersCheckSheet posts={[{ label: 'Lesson', checks: own.checks }]} kit={entry.kit} />
     </>
   )
 }
