@@ -73,7 +73,7 @@ function explainHit({ kept: { slot, document, weight }, coverage, score }: Ranke
     id: document.id, coverage, score,
     holds: question.covering(held.at(slot)).flatMap(({ concept, route }) => (route ? [{ word: concept.word, looksUp: nameTerms(route.terms, synonyms), strength: route.strength }] : [])),
     terms: terms.sort((a, b) => b.points - a.points), text: terms.reduce((sum, term) => sum + term.points, 0),
-    evidence: weight, evidenceOf: decidingPassage(document)?.postId ?? document.id, directness: directness(read), ...read,
+    evidence: weight, evidenceOf: decidingPassage(document)?.postId ?? document.id, directness: directness(read), advice: direct.advice(document), ...read,
   }
 }
 

@@ -1,5 +1,6 @@
 // What is told of why hits stand where they stand, as plain messages. How it is found out is explain-hits.ts.
 import type { RouteKind } from '@/lib/domain/search/name-route'
+import type { AdviceFound } from './messages'
 
 /** One way by which an entry can hold a concept. */
 export interface ExplainedRoute {
@@ -46,6 +47,7 @@ export interface ExplainedHit {
   evidenceOf: number
   directness: number
   advises: boolean
+  advice: AdviceFound[]
   place: 'step' | 'page' | null
   /** text × evidence × directness. */
   score: number

@@ -50,6 +50,7 @@ const looks: readonly Look[] = [
   { name: 'the desk', as: 'jory', address: () => '/desk' },
   { name: 'an open sheet', as: 'tobias', address: () => `/desk?open=${answer}` },
   { name: 'a question for a moderator', as: 'kofi', address: () => rib.url },
+  { name: 'why this order', as: 'wren', address: () => '/search/explain?q=flute+or+deburr+first' },
   { name: 'people', as: 'wren', address: () => '/people?open=2' },
 ]
 

@@ -4,10 +4,13 @@
 export interface OrderSides { left: string; right: string }
 
 const both = /\b(?:before\s*(?:or|and|\/)\s*after|after\s*(?:or|and|\/)\s*before)\b/
-const asksWhichFirst = /\b(?:first|last|earlier|later|order|sequence|before|after)\b/
+const asksWhichFirst = /\b(?:first|last|earlier|later|before|after)\b/
 const either = /\b(?:or|vs|versus)\b/
-const asksSequence = /\b(?:order|sequence)\b|\bfirst\b.*\b(?:and|then)\b/
-const together = /\b(?:and then|and|then)\b/
+/** To order parts is something else. */
+const asksSequence = /\b(?:order|sequence) of\b|\b(?:what|which|right|best|correct|proper) (?:order|sequence)\b|\b(?:order|sequence)\W*$|\bfirst\b.*\b(?:and|then)\b/
+const together = /\b(?:and then|and|then|or|vs|versus)\b/
+/** What asks for the order and is about nothing, once it is known that an order is asked for. */
+const orderWords = new Set(['first', 'last', 'earlier', 'later', 'order', 'sequence', 'comes', 'goes'])
 const relation = /\b(?:before|prior to|ahead of|in advance of|after|then)\b/
 /** A question about order is short; a long text that holds such a word tells a story. */
 const longest = 200
@@ -22,6 +25,13 @@ export function readOrderSides(text: string): OrderSides[] {
     splitAt(plain, relation),
     asksSequence.test(plain) ? splitAt(plain, together) : null,
   ].filter((sides) => sides !== null)
+}
+
+/** The words of `text` that only ask for an order: none where two things are not set against one another. */
+export function isAskedAround(text: string): (word: string) => boolean {
+  const plain = text.length > longest ? '' : text.toLowerCase()
+  const asks = (asksWhichFirst.test(plain) && splitAt(plain, either)) || (asksSequence.test(plain) && splitAt(plain, together))
+  return asks ? (word) => orderWords.has(word) : () => false
 }
 
 function splitAt(text: string, separator: RegExp): OrderSides | null {

@@ -13,7 +13,9 @@ export interface PlansReference {
 
 /** No text can hold this mark, so no word can be mistaken for a step. */
 const stepMark = '§'
-const pageForm = /^[a-z]{0,3}\d{1,3}-\d{1,3}[a-z]?$/
+const pageForm = /^(?:[a-z]{0,3}\d{1,3}-\d{1,3}[a-z]?|[a-z]{1,3}\d{1,3})$/
+/** A bare number is a page only right before its step. */
+const bareForm = /^\d{1,3}$/
 const stepForm = /^\d{1,3}[a-z]?$/
 /** A revision may stand between page and step ("W3-2 Rev C step 6"), and nothing else. */
 const mostBetween = 2
@@ -58,7 +60,7 @@ function pageBefore(tokens: readonly Token[], step: number): number | null {
   for (let place = step - 1; place >= 0 && place >= step - 1 - mostBetween; place--) {
     const token = tokens[place]
     if (!token) return null
-    if (isPage(token)) return place
+    if (isPage(token) || (place === step - 1 && bareForm.test(token.term))) return place
     if (!isOfRevision(token)) return null
   }
   return null

@@ -67,8 +67,9 @@ export class TaskNames {
 
   private nameOf(slug: string, title: string): Name {
     const { tokens } = analyseText(title)
-    const whole = this.synonyms.labelText(tokens).filter(({ first, last }) => first === 0 && last === tokens.length - 1)
-    return { slug, words: tokens.map((token) => [token.term]), groups: whole.flatMap((match) => match.terms) }
+    const labels = this.synonyms.labelText(tokens)
+    const whole = labels.filter(({ first, last }) => first === 0 && last === tokens.length - 1)
+    return { slug, words: tokens.map((token, place) => [token.term, ...labels.filter(({ first, last }) => first === place && last === place).flatMap((match) => match.terms)]), groups: whole.flatMap((match) => match.terms) }
   }
 }
 

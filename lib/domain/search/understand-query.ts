@@ -2,6 +2,7 @@
 // Pure: what the corpus knows comes in as `Corpus`; scoring and MiniSearch stand in lib/search.
 import { analyseText, stemOf, type Token } from './analyse-text'
 import { findMeantWords, splitCompound } from './find-meant-words'
+import { isAskedAround } from './order-question'
 import { readPlaces, type AskedPlace } from './place-concepts'
 import type { Synonyms } from './synonyms'
 import type { Candidate, Vocabulary } from './vocabulary'
@@ -60,7 +61,8 @@ export function understandQuery(text: string, corpus: Corpus, options: QueryOpti
   const { tokens, stopped } = analyseText(text)
   if (tokens.length === 0) return { concepts: [], places: [], ignored: distinct(stopped), didYouMean: null }
   const { places, concepts: placed, taken } = readPlaces(text, tokens, corpus, (frequency) => rarity(frequency, corpus.documents))
-  const words = taken.size === 0 ? tokens : tokens.filter((_, place) => !taken.has(place))
+  const isAround = isAskedAround(text)
+  const words = tokens.filter((token, place) => !taken.has(place) && !isAround(token.word))
   const drafts = draftConcepts(words, corpus)
   const { kept, dropped } = keepRarest(drafts, Math.max(0, options.mostConcepts - placed.length))
   const corrections = options.correct || options.completeLast ? fillUnknown(kept, words, text, corpus, options) : []

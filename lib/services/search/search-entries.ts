@@ -5,6 +5,7 @@ import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { computeQuery } from '@/lib/services/shop/compute-query'
 import type { AppContext } from '@/lib/context'
 import type { Hit, SearchQuery, SearchResult } from '@/lib/schemas/search'
+import { filtersOf } from './filters-of'
 import { loadHits, presentHits, type HitMaterial } from './present-hits'
 
 /** Throws SearchLoadingError while the index loads. */
@@ -39,5 +40,3 @@ async function findNewest(context: AppContext, query: SearchQuery): Promise<Foun
   const results = await presentHits(context, ids.map((id) => ({ id, postId: id, score: 0, terms: [] })))
   return { results, total: await countEntries(context.reader, filtersOf(query)), ignored: [], didYouMean: null }
 }
-
-const filtersOf = ({ kit, section, operation, kind, stamped }: SearchQuery) => ({ kit, section, operation, kind, ...(stamped === '1' ? { stamped: true } : {}) })
