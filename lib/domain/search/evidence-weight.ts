@@ -1,4 +1,5 @@
-// How much what is proven counts in the order of search results. One formula, here and nowhere else.
+// How much what is proven counts in the order of search results: score = text × evidence (here) × directness (directness.ts).
+// The evidence formula stands here and nowhere else.
 import type { StampState } from '../stamps/stamp-state'
 import { successBound } from '../evidence/order-posts'
 
