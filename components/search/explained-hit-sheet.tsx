@@ -19,7 +19,7 @@ export function ExplainedHitSheet({ place, explained }: { place: number; explain
           <b>{points(score)}</b> {text > 0 ? <>= text {points(text)} {factor(evidence.factor)} evidence {factor(directness)} directness</> : 'beyond those that are scored: ranked by what it holds'}
         </p>
         <dl className="explained-parts">
-          <div><dt className="label">Holds</dt><dd>{percent(coverage)} of the question: {holds.map(({ word, looksUp, strength }) => `${word}${looksUp === word.toLowerCase() ? '' : ` as ${looksUp}`}${strength < 1 ? ` (${percent(strength)})` : ''}`).join(', ')}</dd></div>
+          <div><dt className="label">Holds</dt><dd>{percent(coverage)} of the question: {holds.map(heldWords).join(', ')}</dd></div>
           <div><dt className="label">Evidence</dt><dd>{evidenceWords(evidence)}: {factor(evidence.factor)}</dd></div>
           <div><dt className="label">Directness</dt><dd>{directWords(explained) || 'by its words only'}: {factor(directness)}</dd></div>
           {hit.orderAdvice ? <div><dt className="label">Order advice</dt><dd>{orderWords(hit.orderAdvice)}</dd></div> : null}
@@ -29,6 +29,9 @@ export function ExplainedHitSheet({ place, explained }: { place: number; explain
     </article>
   )
 }
+
+const heldWords = ({ word, looksUp, how, strength }: ExplainedHit['holds'][number]): string =>
+  `${word}${how === 'as written' || how === 'plans step' ? '' : ` as ${how}: ${looksUp}`}${strength < 1 ? ` (${percent(strength)})` : ''}`
 
 function Terms({ explained: { hit, terms } }: { explained: ExplainedHit }) {
   if (terms.length === 0) return null

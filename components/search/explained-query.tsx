@@ -45,7 +45,7 @@ function notesOf({ query, least, best, cutBelow, cut, total }: SearchExplanation
     ...(ignored.length > 0 ? [`Left out: ${ignored.join(', ')}.`] : []),
     ...(didYouMean !== null ? [`Spelling looked up: ${didYouMean}.`] : []),
     ...(order ? [`A question of order: ${order.one.join(', ')} on one side, ${order.other.join(', ')} on the other.`] : []),
-    ...places.map(({ page, step }) => `A step of the plans: page ${page}, step ${step}.`),
+    ...places.map(({ page, step }) => `A step of the plans: page ${page.toUpperCase()}, step ${step}.`),
     total > 0
       ? `The best entry holds ${percent(best)} of it; ${percent(least)} are needed for anything to be shown. Entries that hold less than ${percent(cutBelow)} are cut: ${cut}.`
       : `Nothing is shown: the best entry holds ${percent(best)} of it, and ${percent(least)} are needed.`,

@@ -19,7 +19,7 @@ export const explainedQuerySchema = z.object({
 
 export const explainedHitSchema = z.object({
   hit: hitSchema, coverage: share,
-  holds: z.array(z.object({ word: z.string(), looksUp: z.string(), strength: share })),
+  holds: z.array(z.object({ word: z.string(), looksUp: z.string(), how: z.string(), strength: share })),
   /** Points add up to `text`. The counts say how often the term stands where. */
   terms: z.array(z.object({ looksUp: z.string(), weight: z.number(), points: z.number(), title: z.int(), labels: z.int(), passages: z.int() })),
   text: z.number(),

@@ -71,7 +71,7 @@ function explainHit({ kept: { slot, document, weight }, coverage, score }: Ranke
   })
   return {
     id: document.id, coverage, score,
-    holds: question.covering(held.at(slot)).flatMap(({ concept, route }) => (route ? [{ word: concept.word, looksUp: nameTerms(route.terms, synonyms), strength: route.strength }] : [])),
+    holds: question.covering(held.at(slot)).flatMap(({ concept, route }) => (route ? [{ word: concept.word, looksUp: nameTerms(route.terms, synonyms), how: nameRoute(concept, route), strength: route.strength }] : [])),
     terms: terms.sort((a, b) => b.points - a.points), text: terms.reduce((sum, term) => sum + term.points, 0),
     evidence: weight, evidenceOf: decidingPassage(document)?.postId ?? document.id, directness: directness(read), advice: direct.advice(document), ...read,
   }

@@ -38,7 +38,7 @@ export interface ExplainedHit {
   id: number
   coverage: number
   /** Concepts that are held, and by what. */
-  holds: { word: string; looksUp: string; strength: number }[]
+  holds: { word: string; looksUp: string; how: RouteKind; strength: number }[]
   terms: ExplainedTerm[]
   /** Sum of the points of its terms; 0 when it was beyond what is scored. */
   text: number
