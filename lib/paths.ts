@@ -31,6 +31,7 @@ export const paths = {
   sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
   feed: '/feed.atom' as Route,
   desk: (address: { open?: number; operation?: string; section?: string } = {}) => `/desk${query(address)}` as Route,
+  evidence: '/desk/evidence' as Route,
   signIn: (from?: string) => `/sign-in${query({ from })}` as Route,
   signUp: (from?: string) => `/sign-up${query({ from })}` as Route,
   account: '/account' as Route,

@@ -54,7 +54,7 @@ export function AnswerForm({ action, question, initial, submission, memberId }: 
         </Select>
       </div>
       {body === null ? <Acknowledge cautions={state.cautions ?? []} acknowledged={many(state.values, 'acknowledged')} />
-        : <WritingAid text={{ title: question.title, body: `${question.text}\n\n${written}`, kit: question.kit, sections: question.sections, tasks: question.tasks, hardware: question.hardware }} shown={written} wantsSimilar={false} acknowledged={many(state.values, 'acknowledged')} standing={state.cautions ?? []} />}
+        : <WritingAid text={{ title: question.title, body: `${question.text}\n\n${written}`, kit: question.kit, sections: question.sections, tasks: question.tasks, hardware: question.hardware, answerTo: { question: question.id, body: written } }} shown={written} wantsSimilar={false} acknowledged={many(state.values, 'acknowledged')} standing={state.cautions ?? []} />}
       <div className="button-row"><Button type="submit" look="primary" disabled={isPending}>{isPending ? 'Posting' : isEdit ? 'Post the new revision' : 'Post this row'}</Button></div>
     </form>
   )

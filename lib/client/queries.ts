@@ -15,7 +15,7 @@ async function readJson<T>(url: string, signal: AbortSignal, body?: unknown): Pr
   return (await response.json()) as T
 }
 
-export interface WritingText { title: string; body: string; kit?: string | undefined; tasks: string[]; sections: string[]; hardware: string[] }
+export interface WritingText { title: string; body: string; kit?: string | undefined; tasks: string[]; sections: string[]; hardware: string[]; /** What the text is an answer to, whose cautions it takes. */ answerTo?: { question: number; body: string } }
 
 /** Results while typing: the first six. */
 export const liveResults = (words: string) => queryOptions({
@@ -33,7 +33,7 @@ export const similarTo = (text: WritingText) => queryOptions({
 export const requiredOf = (text: WritingText) => queryOptions({
   queryKey: ['required', text], staleTime: 30_000,
   queryFn: ({ signal }) => readJson<{ cautions: Caution[] }>('/api/cautions/required', signal,
-    { title: text.title.slice(0, 160), body: text.body, tasks: text.tasks, sections: text.sections, hardware: text.hardware, ...(text.kit ? { kit: text.kit } : {}) }),
+    text.answerTo ?? { title: text.title.slice(0, 160), body: text.body, tasks: text.tasks, sections: text.sections, hardware: text.hardware, ...(text.kit ? { kit: text.kit } : {}) }),
 })
 
 /** The numbers of a text against the shop tables. */

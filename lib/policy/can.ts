@@ -27,6 +27,7 @@ export interface Acts {
   'stamp.withdraw': { mentorId: number | null }
   'desk.open': undefined
   'search.explain': undefined
+  'evidence.open': undefined
   'people.open': undefined
   'people.set-role': { memberId: number }
   'people.set-state': { memberId: number; role: Role }
@@ -60,6 +61,7 @@ const rules: { [A in Act]: Rule<A> } = {
   'stamp.withdraw': (actor, stamp) => actor !== null && stamp.mentorId === actor.id,
   'desk.open': (actor) => actor?.mark != null,
   'search.explain': (actor) => isAtLeast(actor, 'steward'),
+  'evidence.open': (actor) => actor?.mark != null || isAtLeast(actor, 'steward'),
   'people.open': (actor) => isAtLeast(actor, 'steward'),
   'people.set-role': (actor) => isAtLeast(actor, 'steward'),
   // A moderator suspends builders; only a steward suspends those who moderate. Nobody suspends themselves.

@@ -30,6 +30,8 @@ export const requiredCautionsInputSchema = z.strictObject({
   title: z.string().max(limits.title).optional(), body: z.string().max(4 * limits.body), tasks: z.array(slug).max(limits.list).optional(),
   operations: z.array(slug).max(limits.list).optional(), hardware: z.array(z.string().max(80)).max(limits.list).optional(),
   kit: slug.optional(), sections: z.array(sectionCode).max(limits.list).optional(),
+  /** The question that `body` is an answer to: then its words, place and cautions count, and nothing else of this. */
+  question: z.int().positive().optional(),
 })
 
 export const hitSchema = z.object({

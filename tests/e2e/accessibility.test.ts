@@ -48,6 +48,7 @@ const looks: readonly Look[] = [
   { name: 'editing a row', as: 'bryn', address: () => `/answers/${answer}/edit` },
   { name: 'a question for a mentor', as: 'tobias', address: () => own.url },
   { name: 'the desk', as: 'jory', address: () => '/desk' },
+  { name: 'time to an answer', as: 'jory', address: () => '/desk/evidence' },
   { name: 'an open sheet', as: 'tobias', address: () => `/desk?open=${answer}` },
   { name: 'a question for a moderator', as: 'kofi', address: () => rib.url },
   { name: 'why this order', as: 'wren', address: () => '/search/explain?q=flute+or+deburr+first' },

@@ -94,6 +94,7 @@ const table: Record<string, readonly Check[]> = {
     { page: () => `/desk?open=${lesson.id}`, as: 'ansel', shows: ['lesson', 'lessonText'], within: 'block' },
   ],
   '(admin)/search/explain/page.tsx': [{ page: () => explained, as: 'wren', shows: ['title'], within: 'block' }],
+  '(desk)/desk/evidence/page.tsx': [{ without: () => '/desk/evidence', as: 'wren', why: 'counts and times only' }],
   '(admin)/people/[id]/page.tsx': [
     { page: () => `/people/${authorId}`, shows: ['title', 'open', 'lesson'], within: 'block' },
     { page: () => `/people/${answererId}`, shows: ['title'], within: 'block' },

@@ -35,6 +35,14 @@ it('an answer written after a moderator cautioned its question must acknowledge 
   expect(made.body).toMatchObject({ needsTwo: true, cautions: [{ code: 'fuel', because: 'the line is a fuel line' }] })
 })
 
+it('whoever writes an answer is shown what stands on its question, a moderator’s caution too, before it is sent', async () => {
+  const question = await anEntry()
+  const shown = async () => (await api<{ cautions: { code: string }[] }>('POST', '/api/cautions/required', { body: { question: question.id, body: 'Put them on the lid.' } })).body.cautions.map((c) => c.code)
+  expect(await shown()).toEqual([])
+  await addCaution(await moderator.context(), question.id, { code: 'fuel', because: 'the line is a fuel line' })
+  expect(await shown()).toEqual(['fuel'])
+})
+
 it('a caution waived on the question still shows where it stands on the answer', async () => {
   const answer = await anAnswer({ question: await anEntry(critical) })
   await waiveCaution(await moderator.context(), answer.questionId, { code: 'structure', reason: 'The question is about labels.' })

@@ -6,6 +6,13 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { allRoutes } from '@/app/api/all-routes'
 import type { Hit, SearchResult } from '@/lib/schemas/search'
 import type { Entry } from '@/lib/schemas/post'
+import { eq } from 'drizzle-orm'
+import { renderingKey } from '@/db/queries/cautioned-post'
+import { rendering } from '@/db/schema'
+import { writeQuietly } from '@/db/transaction'
+import { contextFor } from '@/lib/context'
+import { rendererVersion } from '@/lib/render/markdown-to-html'
+import { atomFeed } from '@/lib/services/feeds/atom-feed'
 import { api } from '../support/api'
 import { openTestRuntime, type TestRuntime } from '../support/database'
 import { aMember, anAnswer, anEntry, critical } from '../support/factories'
@@ -170,5 +177,25 @@ describe('GET /api/openapi.json', () => {
     const { body } = await api<{ paths: object }>('GET', '/api/openapi.json')
     expect(Object.keys(body.paths).sort()).toEqual(addresses)
     expect(Object.keys(allRoutes).length).toBe(addresses.length - 1)
+  })
+})
+
+describe('a text that an older renderer laid out', () => {
+  it('is laid out anew when it is read, with its sizes dressed, and kept', async () => {
+    const lesson = await anEntry({ kind: 'lesson', title: 'Pilot holes', parts: { happened: 'Drilled 7/32 from the edge.' } })
+    const kept = () => runtime.database.reader.select().from(rendering).where(eq(rendering.key, renderingKey(lesson.id, 1)))
+    const [first] = await kept()
+    await writeQuietly(runtime.database, (tx) => tx.update(rendering).set({ renderer: rendererVersion - 1, html: { happened: '<p>old</p>' } }).where(eq(rendering.key, first!.key)))
+    const { body } = await api<Entry>('GET', `/api/entries/${lesson.id}`)
+    expect(body.html).toMatch(/<span class="measure [^>]*>.*7\/32.*5\.56\u00a0mm/)
+    expect(body.text).toContain('Drilled 7/32 from the edge.')
+    expect((await kept())[0]).toMatchObject({ renderer: rendererVersion, html: { happened: first!.html['happened'] } })
+  })
+
+  it('goes into a feed without the form that only our pages show', async () => {
+    await anEntry({ kind: 'lesson', title: 'Last hole', parts: { happened: 'Open it to 7/32.' } })
+    const xml = await atomFeed(await contextFor(null), {}, { title: 't', page: 'http://a.example', self: 'http://a.example/feed.atom', baseUrl: 'http://a.example' })
+    expect(xml).toContain('7/32')
+    expect(xml).not.toContain('measure-lead')
   })
 })

@@ -23,7 +23,7 @@ export default async function PeoplePage({ searchParams }: PageProps<'/people'>)
   const open = people.find((p) => String(p.id) === query.open)
   return (
     <>
-      <PageTitle title="People" lead="Roles are a ladder of care. Mentorship stands beside it: you grant it, to somebody else." aside={`${people.length} with an account`} />
+      <PageTitle title="People" lead="Roles are a ladder of care. Mentorship stands beside it: you grant it, to somebody else." aside={<><span className="block">{people.length} with an account</span><Link className="block" href={paths.evidence}>Time to an answer</Link></>} />
       {open ? <OpenMember actor={context.actor} member={open} /> : null}
       <PeopleTable people={people} openId={open?.id} />
     </>

@@ -1,5 +1,6 @@
 // The mentors' desk: the rail of tags, and under it the one sheet that is open.
 import type { Metadata } from 'next'
+import Link from 'next/link'
 import { DeskFilter } from '@/components/desk/desk-filter'
 import { tagLabel, tagNote } from '@/components/desk/rail-words'
 import { TagRail } from '@/components/entries/hung-tag'
@@ -24,7 +25,7 @@ export default async function DeskPage({ searchParams }: PageProps<'/desk'>) {
   return (
     <>
       <PageTitle title="Desk" lead="What can hurt hangs first, then what most builders go by."
-        aside={<><span className="block">You are <b className="code">{desk.mark}</b></span>{desk.waiting > 0 ? <span className="block">{desk.waiting} {desk.waiting === 1 ? 'tag' : 'tags'} off the rail, waiting for what you asked</span> : null}</>} />
+        aside={<><span className="block">You are <b className="code">{desk.mark}</b></span>{desk.waiting > 0 ? <span className="block">{desk.waiting} {desk.waiting === 1 ? 'tag' : 'tags'} off the rail, waiting for what you asked</span> : null}<Link className="block" href={paths.evidence}>Time to an answer</Link></>} />
       <DeskFilter action={paths.desk()} {...choices} section={address.section ?? ''} operation={address.operation ?? ''} />
       <Rail desk={desk} address={address} />
       {desk.open ? <OpenSheet sheet={desk.open} next={paths.desk({ ...address, open: desk.next ?? 0 })} closed={paths.desk({ ...address, open: 0 })} isHanging={desk.tags.some((t) => t.postId === desk.open?.post.id)} /> : <NothingOpen desk={desk} address={address} />}

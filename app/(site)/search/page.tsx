@@ -12,6 +12,8 @@ import { LinkButton } from '@/components/ui/link-button'
 import { NoticeLine } from '@/components/ui/notice-line'
 import { pageContext } from '@/lib/auth/guards'
 import { findContrary } from '@/lib/format/order-words'
+import { readerUnits } from '@/lib/auth/reader-units'
+import { firstSystem } from '@/lib/format/units-choice'
 import { paths, type SearchAddress } from '@/lib/paths'
 import { SearchLoadingError } from '@/lib/search/messages'
 import { searchQuerySchema, type Hit, type SearchResult } from '@/lib/schemas/search'
@@ -39,16 +41,17 @@ export default async function SearchPage({ searchParams }: PageProps<'/search'>)
     throw error
   })
   if (!result) return <>{filters}<NoticeLine boxed live>Search is loading: the index is being built. Everything else works; reload in a few seconds.</NoticeLine></>
+  const first = firstSystem(await readerUnits())
   return (
     <>
       {filters}
-      <Results result={result} address={address} />
+      <Results result={result} address={address} first={first} />
       {address.q?.trim() && can(context.actor, 'search.explain') ? <p className="text-small"><Link href={paths.explainSearch(address)}>Why these results stand in this order</Link></p> : null}
     </>
   )
 }
 
-function Results({ result, address }: { result: SearchResult; address: SearchAddress }) {
+function Results({ result, address, first }: { result: SearchResult; address: SearchAddress; first: 'inch' | 'metric' }) {
   const { results, query, total } = result
   const groups = [
     { title: 'Stamped', hits: results.filter((h) => h.stamp === 'stamped') },
@@ -65,7 +68,7 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
       {query.didYouMean ? <NoticeLine icon="search">Did you mean <Link href={paths.search({ ...address, q: query.didYouMean, offset: undefined })}>{query.didYouMean}</Link>?</NoticeLine> : null}
       {contrary ? <NoticeLine boxed>Builders disagree here: some advise {contrary.one} before {contrary.other}, some the other way round. Both are below, each with what speaks for it. The plans decide.</NoticeLine> : null}
       {query.ignored.length > 0 ? <NoticeLine>Too many words: left out {query.ignored.join(', ')}.</NoticeLine> : null}
-      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} />)}
+      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} first={first} />)}
       {result.computed.length > 0 && results.length === 0 ? <CautionPlate cautions={result.computed.flatMap((a) => a.cautions)} /> : null}
       {results.length === 0 ? <NothingFound words={words} ask={ask} address={address} /> : (
         <>

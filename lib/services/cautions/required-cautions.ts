@@ -10,10 +10,11 @@ import type { Caution } from '@/lib/schemas/post'
 import { cautionsOfAnswer } from '@/lib/services/posts/attach-cautions'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 
-interface Input { title?: string | undefined; body: string; tasks?: string[] | undefined; operations?: string[] | undefined; hardware?: string[] | undefined; kit?: string | undefined; sections?: string[] | undefined }
+interface Input { title?: string | undefined; body: string; tasks?: string[] | undefined; operations?: string[] | undefined; hardware?: string[] | undefined; kit?: string | undefined; sections?: string[] | undefined; question?: number | undefined }
 
 /** Unknown names count for nothing here: the publish itself refuses them. */
 export async function listRequiredCautions(context: AppContext, input: Input): Promise<{ cautions: Caution[] }> {
+  if (input.question !== undefined) return listRequiredAnswerCautions(context, input.question, input.body)
   const kit = input.kit === undefined ? null : await getKit(context.reader, input.kit)
   const tasks = await listTasksBySlug(context.reader, input.tasks ?? [])
   const required = requiredCautions(cautionTable, {

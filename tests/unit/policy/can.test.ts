@@ -163,6 +163,7 @@ const otherTable: readonly (readonly [Act, string, string, Ask])[] = [
   ['stamp.withdraw', 'imported', '........', (a) => can(a, 'stamp.withdraw', { mentorId: null })],
   ['desk.open', '', '...TW..X', (a) => can(a, 'desk.open')],
   ['search.explain', '', '......SX', (a) => can(a, 'search.explain')],
+  ['evidence.open', '', '...TW.SX', (a) => can(a, 'evidence.open')],
   ['people.open', '', '......SX', (a) => can(a, 'people.open')],
   ['people.set-role', 'of somebody else', '......SX', (a) => can(a, 'people.set-role', { memberId: 99 })],
   ['people.set-role', 'of the steward of the table', '......SX', (a) => can(a, 'people.set-role', { memberId: 7 })],

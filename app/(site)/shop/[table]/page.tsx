@@ -15,9 +15,11 @@ import { ErrorSummary } from '@/components/ui/error-summary'
 import { LinkButton } from '@/components/ui/link-button'
 import { PrintButton } from '@/components/ui/print-button'
 import { pageContext } from '@/lib/auth/guards'
+import { readerUnits } from '@/lib/auth/reader-units'
 import { loadPage } from '@/lib/content/load-page'
 import { SHOP_TABLES, shopTable } from '@/lib/domain/shop/shop-tables'
 import { env } from '@/lib/env'
+import { firstSystem } from '@/lib/format/units-choice'
 import { paths } from '@/lib/paths'
 import { answerTable } from '@/lib/services/shop/answer-table'
 import { shopCautions } from '@/lib/services/shop/shop-cautions'
@@ -31,7 +33,7 @@ export default async function ShopTablePage({ params, searchParams }: PageProps<
   const context = await pageContext()
   const table = shopTable((await params).table)
   if (!table) notFound()
-  const { raw, values, first, units } = readShopAddress(table, await searchParams)
+  const { raw, values, first, units } = readShopAddress(table, await searchParams, firstSystem(await readerUnits()))
   const answered = answerTable(table, raw)
   const [answer, errors] = answered.ok ? [answered.answer, []] : [null, answered.errors]
   const note = await loadPage(table.slug, {}, 'shop-notes')

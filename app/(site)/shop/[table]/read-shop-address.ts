@@ -13,8 +13,8 @@ export interface ShopAddress {
   units: FirstSystem | undefined
 }
 
-/** `units` is no input of any table. */
-export function readShopAddress(table: Pick<ShopTable, 'title' | 'inputs'>, query: Readonly<Record<string, string | string[] | undefined>>): ShopAddress {
+/** `units` is no input of any table; `preferred` stands first when the address says nothing. */
+export function readShopAddress(table: Pick<ShopTable, 'title' | 'inputs'>, query: Readonly<Record<string, string | string[] | undefined>>, preferred: FirstSystem): ShopAddress {
   const given = Object.entries(query).flatMap(([name, value]): [string, string][] => {
     const one = Array.isArray(value) ? value[0] : value
     return one === undefined ? [] : [[name, one]]
@@ -23,5 +23,5 @@ export function readShopAddress(table: Pick<ShopTable, 'title' | 'inputs'>, quer
   const units = asked === 'metric' || asked === 'inch' ? asked : undefined
   const raw = Object.fromEntries(given.filter(([name]) => name !== 'units'))
   const values = { ...Object.fromEntries(table.inputs.map(({ name }) => [name, ''])), ...linkInputs(table, raw) }
-  return { raw, values, first: units ?? 'inch', units }
+  return { raw, values, first: units ?? preferred, units }
 }
