@@ -13,6 +13,7 @@ export interface SearchAddress { q?: string | undefined; kit?: string | undefine
 export const paths = {
   home: '/' as Route,
   search: (address: SearchAddress = {}) => `/search${query({ ...address })}` as Route,
+  explainSearch: (address: SearchAddress = {}) => `/search/explain${query({ ...address })}` as Route,
   entry: (id: number, anchor?: number) => `/entries/${id}${anchor && anchor !== id ? `#post-${anchor}` : ''}` as Route,
   remark: (entryId: number, remarkId: number) => `/entries/${entryId}#remark-${remarkId}` as Route,
   entryPrint: (id: number) => `/entries/${id}/print` as Route,

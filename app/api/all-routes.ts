@@ -20,6 +20,7 @@ import * as reliance from './posts/[id]/reliance/route'
 import * as remarks from './posts/[id]/remarks/route'
 import * as stamps from './posts/[id]/stamps/route'
 import * as preview from './preview/route'
+import * as explainSearch from './search/explain/route'
 import * as search from './search/route'
 import * as shopTable from './shop/[table]/route'
 import * as shop from './shop/route'
@@ -29,6 +30,7 @@ import * as suggest from './suggest/route'
 
 export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/search': search,
+  '/api/search/explain': explainSearch,
   '/api/suggest': suggest,
   '/api/similar': similar,
   '/api/preview': preview,

@@ -7,6 +7,7 @@ import { CautionLine, type LineCaution } from '@/components/cautions/caution-lin
 import { StampFlat } from '@/components/stamps/stamp-flat'
 import type { StampState } from '@/lib/domain/stamps/stamp-state'
 import type { StampFace } from '@/lib/format/stamp-words'
+import { orderWords, type ShownAdvice } from '@/lib/format/order-words'
 import { HowItWent, type HowItWentProps } from './how-it-went'
 import { MarkedSnippet } from './marked-snippet'
 import { PartTags, type PartTagProps } from './part-tag'
@@ -19,6 +20,8 @@ export interface HitRowProps {
   cautions: readonly LineCaution[]
   snippet: string
   marks: readonly (readonly [number, number])[]
+  /** Its advice on the order that was asked for. */
+  orderAdvice?: readonly ShownAdvice[] | undefined
   partTags: readonly PartTagProps[]
   outcomes?: HowItWentProps['outcomes'] | undefined
   /** The passage is on a critical system. */
@@ -29,13 +32,14 @@ export interface HitRowProps {
   action?: ReactNode
 }
 
-export function HitRow({ kindLine, title, href, cautions, snippet, marks, partTags, outcomes, critical, stamps, stampState, action }: HitRowProps) {
+export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderAdvice, partTags, outcomes, critical, stamps, stampState, action }: HitRowProps) {
   return (
     <article className="hit">
       <div className="hit-text">
         <p className="label">{kindLine}</p>
         <h3><Link href={href}>{title}</Link></h3>
         <CautionLine cautions={cautions} />
+        {orderAdvice ? <p className="hit-order"><span className="label">Order advice</span> <b>{orderWords(orderAdvice)}</b></p> : null}
         <p className="hit-snippet"><MarkedSnippet text={snippet} marks={marks} /></p>
         <div className="hit-foot">
           <PartTags items={partTags} />

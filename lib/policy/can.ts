@@ -26,6 +26,7 @@ export interface Acts {
   'post.hide': PostSubject
   'stamp.withdraw': { mentorId: number | null }
   'desk.open': undefined
+  'search.explain': undefined
   'evidence.open': undefined
   'people.open': undefined
   'people.set-role': { memberId: number }
@@ -60,6 +61,7 @@ const rules: { [A in Act]: Rule<A> } = {
   'post.hide': (actor) => isAtLeast(actor, 'moderator'),
   'stamp.withdraw': (actor, stamp) => actor !== null && stamp.mentorId === actor.id,
   'desk.open': (actor) => actor?.mark != null,
+  'search.explain': (actor) => isAtLeast(actor, 'steward'),
   'evidence.open': (actor) => actor?.mark != null || isAtLeast(actor, 'steward'),
   'people.open': (actor) => isAtLeast(actor, 'steward'),
   'people.set-role': (actor) => isAtLeast(actor, 'steward'),

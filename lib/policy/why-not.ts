@@ -16,6 +16,7 @@ export const whyNot: Record<Act, string> = {
   'post.hide': 'Moderators hide and restore.',
   'stamp.withdraw': 'A stamp is withdrawn by the mentor who pressed it.',
   'desk.open': 'The desk is for mentors.',
+  'search.explain': 'Why results stand where they stand is shown to stewards.',
   'evidence.open': 'This page is for mentors and stewards.',
   'people.open': 'This page is for stewards.',
   'people.set-role': 'Stewards change roles.',

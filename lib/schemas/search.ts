@@ -42,6 +42,8 @@ export const hitSchema = z.object({
   /** Sections and tasks as they are printed on part tags. */
   partTags: z.array(z.object({ code: z.string().optional(), title: z.string() })),
   stamp: stampStateSchema, stamps: z.array(stampSchema), needsTwo: z.boolean(),
+  /** Its order advice about the two tasks a question asks the order of, by title; contrary advice stands in other hits, or beside it. */
+  orderAdvice: z.array(z.object({ postId: z.int(), before: z.string(), after: z.string() })).optional(),
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
 })
 export const searchResultSchema = z.object({

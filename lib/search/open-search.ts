@@ -3,6 +3,7 @@
 import 'server-only'
 import type { Database } from '@/db/client'
 import { currentSequence, listChangesAfter, listVisibleEntryIds } from '@/db/queries/search'
+import type { SearchExplanation } from './explanation'
 import { SearchLoadingError, type SearchAnswer, type SearchDoor, type SearchFilters, type SearchHealth, type SearchRequest, type WhenOrdered } from './messages'
 import { DocumentReader, readTitles } from './read-documents'
 import { SearchThread } from './search-thread'
@@ -58,6 +59,9 @@ class Search implements SearchDoor {
 
   suggest = async (text: string, limit: number): Promise<{ id: number; title: string }[]> =>
     this.readyThread().call('suggest', { text, limit }, callTimeoutMs)
+
+  explain = async (request: SearchRequest): Promise<SearchExplanation> =>
+    this.readyThread().call('explain', request, callTimeoutMs)
 
   health(): SearchHealth {
     return { state: this.ready ? 'ready' : 'loading', documents: this.documents, sequence: this.sequence }

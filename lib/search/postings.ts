@@ -48,10 +48,18 @@ export class Postings {
     return scores
   }
 
-  private search(question: Question, weigh: (slot: number, term: number) => number, take?: (result: SearchResult) => void): void {
+  /** The part of one term in what `score` gives, by slot. */
+  scoreOfTerm(question: Question, term: number, held: HeldTerms, chosen: Uint8Array): Map<number, number> {
+    const points = new Map<number, number>()
+    const weigh = (slot: number, number: number) => (chosen[slot] === 1 ? question.weight(number, held.at(slot)) : 0)
+    this.search(question, weigh, ({ id, score }) => points.set(Number(id), score), [question.terms[term] ?? ''])
+    return points
+  }
+
+  private search(question: Question, weigh: (slot: number, term: number) => number, take?: (result: SearchResult) => void, terms = question.terms): void {
     let last = ''
     let number = 0
-    this.mini.search(question.terms.join('\n'), {
+    this.mini.search(terms.join('\n'), {
       filter: (result) => {
         take?.(result)
         return false

@@ -2,13 +2,17 @@
 // Lives in the worker thread; knows entries only as SearchDocuments.
 import 'server-only'
 import { leastCoverage } from '@/lib/domain/search/least-coverage'
-import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/understand-query'
+import { understandQuery, type Concept, type Corpus, type UnderstoodQuery } from '@/lib/domain/search/understand-query'
 import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
 import { Vocabulary } from '@/lib/domain/search/vocabulary'
 import { searchWeights, type SearchWeights } from '@/lib/domain/search/weights'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
+import { TaskNames } from '@/lib/domain/search/task-names'
+import { AskedDirectly } from './asked-directly'
 import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
 import { feedbackQuestion } from './feedback-question'
+import { explainHits } from './explain-hits'
+import type { SearchExplanation } from './explanation'
 import { findPassage } from './find-passage'
 import { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
@@ -31,8 +35,13 @@ const mostPostings = 120_000
 
 /** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
 interface Kept { slot: number; document: SearchDocument; weight: number }
-interface Scored { kept: Kept; coverage: number; score: number }
-interface Wanted { least: number; mostScored: number; wanted: number }
+/** `shared`: the part of the score that comes from what the first hits share. */
+interface Scored { kept: Kept; coverage: number; score: number; shared: number }
+interface Wanted { filters: SearchFilters; least: number; mostScored: number; wanted: number }
+interface Asked { question: Question; direct: AskedDirectly }
+/** `considered` hold a word of the question; those that hold less than `cutBelow` of it are not among `found`. */
+interface Ranked { found: Scored[]; held: HeldTerms; best: number; cutBelow: number; considered: number }
+interface Looked extends Asked { understood: UnderstoodQuery; tooCommon: string[]; least: number; ranked: Ranked }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
@@ -45,11 +54,13 @@ export class SearchIndex {
   private readonly titles = new TitleIndex()
   private readonly synonyms: Synonyms
   private readonly placed: PlacedTermsOfTexts
+  private readonly tasks: TaskNames
 
   constructor(synonyms: SynonymList, private readonly weights: SearchWeights = searchWeights) {
     this.postings = new Postings(weights.bm25)
     this.synonyms = new Synonyms(synonyms)
     this.placed = new PlacedTermsOfTexts(this.synonyms)
+    this.tasks = new TaskNames(this.synonyms)
   }
 
   get documents(): number {
@@ -66,6 +77,7 @@ export class SearchIndex {
     this.count(terms, 1)
     this.kept.set(document.id, kept)
     this.slots[kept.slot] = kept
+    for (const { before, after } of document.orderAdvice ?? []) for (const task of [before, after]) this.tasks.add(task)
   }
 
   /** Takes an entry out; nothing happens when it is not in. */
@@ -79,18 +91,16 @@ export class SearchIndex {
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
     this.kept.delete(id)
+    for (const { before, after } of old.document.orderAdvice ?? []) for (const { slug } of [before, after]) this.tasks.remove(slug)
   }
 
-  search({ text, filters, limit, offset }: SearchRequest, whenOrdered?: WhenOrdered): Found {
-    const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
-    const { affordable, tooCommon } = this.afford(concepts)
-    const question = new Question(affordable)
-    const ranked = this.rank(question, filters, { least: leastCoverage(affordable.length, this.weights.coverage), mostScored, wanted: offset + limit })
-    const found = affordable.length < this.weights.feedback.concepts ? ranked : this.orderByFeedback(ranked, question)
-    const page = found.slice(offset, offset + limit)
+  search(request: SearchRequest, whenOrdered?: WhenOrdered): Found {
+    const looked = this.look(request)
+    const { understood: { ignored, didYouMean }, ranked: { found }, tooCommon } = looked
+    const page = found.slice(request.offset, request.offset + request.limit)
     whenOrdered?.(page.map(({ kept }) => kept.document.id))
     return {
-      hits: page.map((scored) => this.hit(scored, question)),
+      hits: page.map((scored) => this.hit(scored, looked)),
       total: found.length,
       ignored: [...ignored, ...tooCommon],
       // A spelling under which nothing is found either helps nobody.
@@ -98,10 +108,21 @@ export class SearchIndex {
     }
   }
 
+  /** The same search, told instead of shown. */
+  explain(request: SearchRequest): SearchExplanation {
+    const { understood, tooCommon, ...looked } = this.look(request)
+    const page = looked.ranked.found.slice(request.offset, request.offset + request.limit)
+    return {
+      ...explainHits(page, { ...looked, ...looked.ranked, postings: this.postings, placed: this.placed, synonyms: this.synonyms, frequency: this.corpus().frequency }),
+      documents: this.kept.size, ignored: [...understood.ignored, ...tooCommon], didYouMean: understood.didYouMean, places: understood.places,
+    }
+  }
+
   similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
     const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
     const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
-    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar, wanted: limit }).slice(0, limit).map((scored) => this.hit(scored, question))
+    const asked = { question, direct: new AskedDirectly(question, [], null) }
+    return this.rank(asked, { filters, least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar, wanted: limit }).found.slice(0, limit).map((scored) => this.hit(scored, asked))
   }
 
   suggest(text: string, limit: number): { id: number; title: string }[] {
@@ -121,13 +142,32 @@ export class SearchIndex {
     const chosen = new Uint8Array(this.slots.length)
     for (const { kept } of best) chosen[kept.slot] = 1
     const scores = this.postings.score(further, new HeldTerms(further.terms.length, 0), chosen)
-    for (const entry of best) entry.score += (scores[entry.kept.slot] ?? 0) * entry.kept.weight
+    for (const entry of best) {
+      entry.shared = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
+      entry.score += entry.shared
+    }
     const [top, ...others] = best
     if (!top) return found
     others.sort(byScore)
     // What others share says nothing against the best answer: it stays first (measured: one question in fifty lost it).
-    top.score = Math.max(top.score, others[0]?.score ?? 0)
+    const lift = Math.max(0, (others[0]?.score ?? 0) - top.score)
+    top.shared += lift
+    top.score += lift
     return [top, ...others, ...found.slice(mostScored)]
+  }
+
+  /** What both `search` and `explain` see. */
+  private look({ text, filters, limit, offset }: SearchRequest): Looked {
+    const understood = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
+    const { affordable, tooCommon } = this.afford(understood.concepts)
+    const question = new Question(affordable)
+    const order = this.tasks.read(understood.didYouMean ?? text)
+    const direct = new AskedDirectly(question, understood.places, order)
+    const least = leastCoverage(affordable.length, this.weights.coverage)
+    const ranked = this.rank({ question, direct }, { filters, least, mostScored, wanted: offset + limit })
+    // A question that names its step or its two tasks says what it means; what hits share would blur it.
+    if (affordable.length >= this.weights.feedback.concepts && !direct.matters) ranked.found = this.orderByFeedback(ranked.found, question)
+    return { understood, tooCommon, question, direct, least, ranked }
   }
 
   private corpus(): Corpus {
@@ -154,21 +194,23 @@ export class SearchIndex {
   }
 
   /** All that is found, the first `wanted` in order: best first, newest of equals first. Empty when even the best holds less than `least` of the question. */
-  private rank(question: Question, filters: SearchFilters, { least, mostScored: most, wanted }: Wanted): Scored[] {
-    if (question.terms.length === 0) return []
+  private rank(asked: Asked, { filters, least, mostScored: most, wanted }: Wanted): Ranked {
+    const { question } = asked
     const held = this.postings.findHeld(question, this.slots.length)
     const coverageAt = this.coverages(question, held)
-    const found: Scored[] = []
-    let best = 0
+    const near: Scored[] = []
+    let [best, considered] = [0, 0]
     for (const slot of held.slots) {
       const kept = this.slots[slot]
       if (!kept || kept.weight === 0 || !passes(kept.document, filters)) continue
+      considered++
       const coverage = coverageAt(slot)
       if (coverage > best) best = coverage
-      if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
+      if (coverage >= best * leastShareOfBest) near.push({ kept, coverage, score: 0, shared: 0 })
     }
-    if (best < least) return []
-    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, { most, wanted })
+    const cutBelow = best * leastShareOfBest
+    const found = best === 0 || best < least ? [] : this.order(near.filter(({ coverage }) => coverage >= cutBelow), asked, held, { most, wanted })
+    return { found, held, best, cutBelow, considered }
   }
 
   /** Thousands of entries hold the same few terms of a question: each set of terms is weighed once. */
@@ -185,13 +227,15 @@ export class SearchIndex {
     }
   }
 
-  /** Score = BM25 × weight of the entry's evidence. */
-  private order(found: readonly Scored[], question: Question, held: HeldTerms, { most, wanted }: { most: number; wanted: number }): Scored[] {
-    const scores = this.postings.score(question, held, this.choose(found, most))
+  /** The formula: score = BM25 (of the held terms, each by its routes) × evidence of the entry × directness. */
+  private order(found: readonly Scored[], asked: Asked, held: HeldTerms, { most, wanted }: { most: number; wanted: number }): Scored[] {
+    const { question, direct } = asked
+    const worth = ({ slot, document, weight }: Kept) => (direct.matters ? weight * direct.factor(document, held.at(slot)) : weight)
+    const scores = this.postings.score(question, held, this.choose(found, most, worth))
     const [scored, others]: [Scored[], Scored[]] = [[], []]
     let lowest = Infinity
     for (const entry of found) {
-      entry.score = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
+      entry.score = (scores[entry.kept.slot] ?? 0) * worth(entry.kept)
       if (entry.score > 0 && entry.score < lowest) lowest = entry.score
       ;(entry.score > 0 ? scored : others).push(entry)
     }
@@ -202,10 +246,10 @@ export class SearchIndex {
   }
 
   /** Marks the slots of at most `most` entries. */
-  private choose(found: readonly Scored[], most: number): Uint8Array {
+  private choose(found: readonly Scored[], most: number, worth: (kept: Kept) => number): Uint8Array {
     const chosen = new Uint8Array(this.slots.length)
-    // Evidence decides only between equals: weights are small numbers, coverages differ by far more than a millionth.
-    const promise = ({ coverage, kept }: Scored) => coverage + kept.weight * 1e-6
+    // Worth decides only between equals: it is a small number, and coverages differ by far more than a millionth.
+    const promise = ({ coverage, kept }: Scored) => coverage + worth(kept) * 1e-6
     const cut = found.length <= most ? -1 : nthLargest(found.map(promise), most)
     let room = most
     for (const entry of found) if (promise(entry) > cut) { chosen[entry.kept.slot] = 1; room-- }
@@ -213,8 +257,10 @@ export class SearchIndex {
     return chosen
   }
 
-  private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
-    return { id: document.id, score, ...findPassage(document, question, this.placed) }
+  private hit({ kept: { document }, score }: Scored, { question, direct }: Asked): SearchAnswer['hits'][number] {
+    const advice = direct.advice(document)
+    const preferred = new Set(advice.map(({ postId }) => postId))
+    return { id: document.id, score, ...findPassage(document, question, this.placed, preferred), ...(advice.length > 0 ? { advice } : {}) }
   }
 }
 

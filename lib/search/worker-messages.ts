@@ -1,5 +1,6 @@
 // What passes between the search door and the worker thread, both ways. Every request gets one reply with its number.
 import 'server-only'
+import type { SearchExplanation } from './explanation'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest } from './messages'
 
 /** Entries to put and to take out, and the change sequence that is reached with them. */
@@ -10,6 +11,7 @@ export interface WorkerCalls {
   search: { asked: SearchRequest; given: SearchAnswer }
   similar: { asked: { text: string; filters: SearchFilters; limit: number }; given: SearchAnswer['hits'] }
   suggest: { asked: { text: string; limit: number }; given: { id: number; title: string }[] }
+  explain: { asked: SearchRequest; given: SearchExplanation }
 }
 
 export type CallName = keyof WorkerCalls

@@ -37,6 +37,7 @@ async function answer(request: WorkerRequest): Promise<WorkerCalls[WorkerRequest
     case 'search': return { ...index.search(request.asked, (ordered) => port?.postMessage({ number: request.number, ordered } satisfies WorkerReply)), sequence }
     case 'similar': return index.similar(request.asked.text, request.asked.filters, request.asked.limit)
     case 'suggest': return index.suggest(request.asked.text, request.asked.limit)
+    case 'explain': return index.explain(request.asked)
     default: return request satisfies never
   }
 }

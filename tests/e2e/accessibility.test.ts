@@ -54,6 +54,7 @@ const looks: readonly Look[] = [
   { name: 'time to an answer', as: 'jory', address: () => '/desk/evidence' },
   { name: 'an open sheet', as: 'tobias', address: () => `/desk?open=${answer}` },
   { name: 'a question for a moderator', as: 'kofi', address: () => rib.url },
+  { name: 'why this order', as: 'wren', address: () => '/search/explain?q=flute+or+deburr+first' },
   { name: 'people', as: 'wren', address: () => '/people?open=2' },
 ]
 

@@ -51,6 +51,7 @@ const table: Record<string, () => readonly [string, readonly number[]]> = {
   'lesson': () => ['/lesson', members],
   'account': () => ['/account', members],
   'desk': () => ['/desk', [401, 403, 200, 403, 403, 401]],
+  'why this order': () => ['/search/explain?q=rivet', [401, 403, 403, 403, 200, 401]],
   'time to an answer': () => ['/desk/evidence', [401, 403, 200, 403, 200, 401]],
   'people': () => ['/people', [401, 403, 403, 403, 200, 401]],
   'a member’s sheet': () => ['/people/1', everybody],

@@ -51,6 +51,9 @@ type Check =
 const get = (address: string, as: Who | null = null) => must(as, 'GET', address)
 const codesOf = (list: Caution[]) => list.map((c) => c.code)
 
+/** Asked in other words than those of the texts: the page says what it looked up. */
+const explained = `/search/explain?kit=whimbrel-2&section=${section}&q=belt+anchor`
+
 const table: Record<string, readonly Check[]> = {
   '(site)/page.tsx': [{ page: () => '/', shows: ['title', 'open'], within: 'block' }],
   '(site)/search/page.tsx': [
@@ -91,6 +94,7 @@ const table: Record<string, readonly Check[]> = {
     { page: () => `/desk?open=${open.id}`, as: 'ansel', shows: ['open', 'openText'], within: 'block' },
     { page: () => `/desk?open=${lesson.id}`, as: 'ansel', shows: ['lesson', 'lessonText'], within: 'block' },
   ],
+  '(admin)/search/explain/page.tsx': [{ page: () => explained, as: 'wren', shows: ['title'], within: 'block' }],
   '(desk)/desk/evidence/page.tsx': [{ without: () => '/desk/evidence', as: 'wren', why: 'counts and times only' }],
   '(admin)/people/[id]/page.tsx': [
     { page: () => `/people/${authorId}`, shows: ['title', 'open', 'lesson'], within: 'block' },
@@ -108,6 +112,7 @@ const table: Record<string, readonly Check[]> = {
   'forbidden.tsx': [{ without: () => '/people', as: author, why: 'a sentence' }],
   'robots.ts': [{ without: () => '/robots.txt', why: 'addresses only' }],
   'api/search/route.ts': [{ api: () => get(`/api/search?q=${word.title}`), shows: ['title'] }, { api: () => get(`/api/search?q=${word.answer}`), shows: ['answer'] }],
+  'api/search/explain/route.ts': [{ api: () => must('wren', 'GET', `/api${explained}`), shows: ['title'] }],
   'api/suggest/route.ts': [{ api: () => get(`/api/suggest?q=${word.title.slice(0, -1)}`), shows: ['title'] }],
   'api/similar/route.ts': [{ api: () => must(null, 'POST', '/api/similar', { title: `Belt anchor ${word.title}`, kit: 'whimbrel-2' }), shows: ['title'] }],
   'api/entries/route.ts': [

@@ -3,6 +3,8 @@
 import { analyseText, stemOf, type Token } from './analyse-text'
 import { findMeantWords, splitCompound } from './find-meant-words'
 import { findValueRoutes, joinRoutes, type ValueOfTokens } from './number-routes'
+import { isAskedAround } from './order-question'
+import { readPlaces, type AskedPlace } from './place-concepts'
 import type { Synonyms } from './synonyms'
 import type { Candidate, Vocabulary } from './vocabulary'
 import type { SearchWeights } from './weights'
@@ -38,6 +40,8 @@ export interface Concept {
 
 export interface UnderstoodQuery {
   concepts: Concept[]
+  /** Steps of plans pages that are asked for. */
+  places: AskedPlace[]
   ignored: string[]
   didYouMean: string | null
 }
@@ -56,13 +60,20 @@ const mostCorrected = 8
 /** Reads `text` for this corpus. Never throws; at most `mostConcepts` concepts, the rarest, the rest named in `ignored`. */
 export function understandQuery(text: string, corpus: Corpus, options: QueryOptions): UnderstoodQuery {
   const { tokens, stopped } = analyseText(text)
-  if (tokens.length === 0) return { concepts: [], ignored: distinct(stopped), didYouMean: null }
-  const drafts = draftConcepts(text, tokens, corpus)
-  const { kept, dropped } = keepRarest(drafts, options.mostConcepts)
-  const corrections = options.correct || options.completeLast ? fillUnknown(kept, tokens, text, corpus, options) : []
+  if (tokens.length === 0) return { concepts: [], places: [], ignored: distinct(stopped), didYouMean: null }
+  const { places, concepts: placed, taken } = readPlaces(text, tokens, corpus, (frequency) => rarity(frequency, corpus.documents))
+  const isAround = isAskedAround(text)
+  const words = tokens.filter((token, place) => !taken.has(place) && !isAround(token.word))
+  const drafts = draftConcepts(text, words, corpus)
+  const { kept, dropped } = keepRarest(drafts, Math.max(0, options.mostConcepts - placed.length))
+  const corrections = options.correct || options.completeLast ? fillUnknown(kept, words, text, corpus, options) : []
   return {
-    concepts: kept.filter((draft) => draft.mass > 0).map(({ token, mass, routes }) => ({ word: text.slice(token.start, token.end), mass, routes })),
-    ignored: distinct(dropped.map(({ token }) => text.slice(token.start, token.end))),
+    concepts: [
+      ...placed.slice(0, options.mostConcepts),
+      ...kept.filter((draft) => draft.mass > 0).map(({ token, mass, routes }) => ({ word: text.slice(token.start, token.end), mass, routes })),
+    ],
+    places,
+    ignored: distinct([...placed.slice(options.mostConcepts).map(({ word }) => word), ...dropped.map(({ token }) => text.slice(token.start, token.end))]),
     didYouMean: corrections.length > 0 ? replaceWords(text, corrections) : null,
   }
 }

@@ -6,6 +6,7 @@ import { computeQuery } from '@/lib/services/shop/compute-query'
 import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import type { AppContext } from '@/lib/context'
 import type { Hit, SearchQuery, SearchResult } from '@/lib/schemas/search'
+import { filtersOf } from './filters-of'
 import { loadHits, presentHits, type HitMaterial } from './present-hits'
 
 /** Throws SearchLoadingError while the index loads. */
@@ -44,5 +45,3 @@ async function findNewest(context: AppContext, query: SearchQuery): Promise<Foun
   const results = await presentHits(context, ids.map((id) => ({ id, postId: id, score: 0, terms: [] })))
   return { results, total: await countEntries(context.reader, filtersOf(query)), ignored: [], didYouMean: null }
 }
-
-const filtersOf = ({ kit, section, operation, kind, stamped }: SearchQuery) => ({ kit, section, operation, kind, ...(stamped === '1' ? { stamped: true } : {}) })

@@ -162,6 +162,7 @@ const otherTable: readonly (readonly [Act, string, string, Ask])[] = [
   ['stamp.withdraw', 'pressed by somebody whose mentorship ended', '.M......', (a) => can(a, 'stamp.withdraw', { mentorId: 2 })],
   ['stamp.withdraw', 'imported', '........', (a) => can(a, 'stamp.withdraw', { mentorId: null })],
   ['desk.open', '', '...TW..X', (a) => can(a, 'desk.open')],
+  ['search.explain', '', '......SX', (a) => can(a, 'search.explain')],
   ['evidence.open', '', '...TW.SX', (a) => can(a, 'evidence.open')],
   ['people.open', '', '......SX', (a) => can(a, 'people.open')],
   ['people.set-role', 'of somebody else', '......SX', (a) => can(a, 'people.set-role', { memberId: 99 })],
