@@ -4,6 +4,9 @@ import type { CautionedPost } from '@/db/queries/cautioned-post'
 import { evidenceWeight } from '@/lib/domain/search/evidence-weight'
 import type { SearchDocument } from './messages'
 
+/** Counts up when the same rows give another document than before (here, in evidence-weight.ts or in the plain text): snapshots made of older ones are not used. */
+export const documentVersion = 1
+
 /** Titles by slug: what people type instead of a slug. Sections bring their titles along. */
 export interface SearchTitles { tasks: ReadonlyMap<string, string>; operations: ReadonlyMap<string, string> }
 

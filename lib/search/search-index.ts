@@ -6,10 +6,12 @@ import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/
 import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
 import { Vocabulary } from '@/lib/domain/search/vocabulary'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
-import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
+import { countTerms, termsOfDocument } from './document-terms'
 import { findPassage } from './find-passage'
 import type { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
+import { packDocument, unpackDocument, type PackedDocument } from './packed-document'
+import type { PostingList } from './posting-list'
 import { Postings } from './postings'
 import { Question } from './question'
 import { PlacedTermsOfTexts } from './placed-terms'
@@ -28,9 +30,11 @@ const mostScoredOfSimilar = 300
 const mostPostings = 120_000
 
 /** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
-interface Kept { slot: number; document: SearchDocument; weight: number }
+interface Kept { slot: number; document: PackedDocument; weight: number }
 interface Scored { kept: Kept; coverage: number; score: number }
 interface Wanted { least: number; mostScored: number; wanted: number }
+/** What a snapshot keeps of an entry. */
+export interface IndexRecord { document: PackedDocument; terms: ReadonlyMap<string, number>; words: ReadonlySet<string> }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
@@ -38,7 +42,6 @@ export class SearchIndex {
   private readonly kept = new Map<number, Kept>()
   private readonly slots: (Kept | undefined)[] = []
   private readonly freeSlots: number[] = []
-  private readonly frequencies = new Map<string, number>()
   private readonly vocabulary = new Vocabulary()
   private readonly titles = new TitleIndex()
   private readonly synonyms: Synonyms
@@ -53,29 +56,66 @@ export class SearchIndex {
     return this.kept.size
   }
 
+  /** Bytes kept outside the heap, nearly. */
+  get bytes(): number {
+    let sum = this.postings.bytes
+    for (const { document } of this.kept.values()) sum += document.texts.byteLength
+    return sum
+  }
+
   /** Adds an entry or puts its new text in place of the old. */
   put(document: SearchDocument): void {
     this.remove(document.id)
-    const terms = termsOfDocument(document, this.synonyms)
-    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
-    this.postings.add(kept.slot, terms.all)
-    this.titles.put(document.id, document.title)
-    this.count(terms, 1)
-    this.kept.set(document.id, kept)
-    this.slots[kept.slot] = kept
+    const { all, words } = termsOfDocument(document, this.synonyms)
+    const { slot } = this.keep(packDocument(document))
+    this.postings.add(slot, countTerms(all))
+    for (const word of words) this.vocabulary.add(word)
   }
 
   /** Takes an entry out; nothing happens when it is not in. */
   remove(id: number): void {
     const old = this.kept.get(id)
     if (!old) return
-    const terms = termsOfDocument(old.document, this.synonyms)
-    this.count(terms, -1)
-    this.postings.remove(old.slot, terms.all)
+    const { all, words } = termsOfDocument(unpackDocument(old.document), this.synonyms)
+    for (const word of words) this.vocabulary.remove(word)
+    this.postings.remove(old.slot, new Set(all))
     this.slots[old.slot] = undefined
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
     this.kept.delete(id)
+  }
+
+  /** Ids of all entries, in the order in which a snapshot keeps them. */
+  ids(): number[] {
+    return [...this.kept.keys()]
+  }
+
+  /** An entry with its terms, as a snapshot keeps it; null when it is not in. */
+  record(id: number): IndexRecord | null {
+    const kept = this.kept.get(id)
+    if (!kept) return null
+    const { all, words } = termsOfDocument(unpackDocument(kept.document), this.synonyms)
+    return { document: kept.document, terms: countTerms(all), words }
+  }
+
+  /** Puts in an entry whose terms are known; `terms` holds a list and a count each. Only for an index that is being filled, once an entry. */
+  restore(document: PackedDocument, terms: Iterable<readonly [PostingList, number]>): void {
+    const { slot } = this.keep(document)
+    let different = 0
+    for (const [list, count] of terms) {
+      list.put(slot, count)
+      different++
+    }
+    this.postings.noteLength(slot, different)
+  }
+
+  /** The list of `term`, to restore with. */
+  listOf(term: string): PostingList {
+    return this.postings.listOf(term)
+  }
+
+  restoreWord(word: string, documents: number): void {
+    this.vocabulary.add(word, documents)
   }
 
   search({ text, filters, limit, offset }: SearchRequest, whenOrdered?: WhenOrdered): Found {
@@ -108,15 +148,15 @@ export class SearchIndex {
   }
 
   private corpus(): Corpus {
-    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms }
+    return { documents: this.kept.size, frequency: (term) => this.postings.frequency(term), vocabulary: this.vocabulary, synonyms: this.synonyms }
   }
 
-  private count(terms: DocumentTerms, by: 1 | -1): void {
-    countTerms(this.frequencies, terms.all, by)
-    for (const word of terms.words) {
-      if (by === 1) this.vocabulary.add(word)
-      else this.vocabulary.remove(word)
-    }
+  private keep(document: PackedDocument): Kept {
+    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
+    this.kept.set(document.id, kept)
+    this.slots[kept.slot] = kept
+    this.titles.put(document.id, document.title)
+    return kept
   }
 
   /** Keeps the rarest concepts whose postings can be read in time. */
@@ -124,7 +164,7 @@ export class SearchIndex {
     const affordable = new Set<Concept>()
     let postings = 0
     for (const concept of [...concepts].sort((a, b) => b.mass - a.mass)) {
-      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + (this.frequencies.get(term) ?? 0), 0), 0)
+      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + this.postings.frequency(term), 0), 0)
       if (affordable.size === 0 || postings <= mostPostings) affordable.add(concept)
     }
     return { affordable: concepts.filter((c) => affordable.has(c)), tooCommon: concepts.filter((c) => !affordable.has(c)).map((c) => c.word) }
@@ -191,7 +231,7 @@ export class SearchIndex {
   }
 
   private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
-    return { id: document.id, score, ...findPassage(document, question, this.placed) }
+    return { id: document.id, score, ...findPassage(unpackDocument(document), question, this.placed) }
   }
 }
 
@@ -200,7 +240,7 @@ const byScore = (a: Scored, b: Scored): number =>
 
 const nthLargest = (values: readonly number[], n: number): number => Float64Array.from(values).sort()[Math.max(0, values.length - n)] ?? 0
 
-function passes(document: SearchDocument, filters: SearchFilters): boolean {
+function passes(document: Omit<PackedDocument, 'texts'>, filters: SearchFilters): boolean {
   return (filters.kit === undefined || document.kit === filters.kit)
     && (filters.section === undefined || document.sections.includes(filters.section))
     && (filters.operation === undefined || document.operations.includes(filters.operation))
