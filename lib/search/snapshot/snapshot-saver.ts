@@ -1,12 +1,15 @@
 // Saving one snapshot in the search thread, in two steps: the pieces, then, once the database was asked how far it has come, the header and the name.
 import 'server-only'
 import { statSync } from 'node:fs'
+import path from 'node:path'
 import type { SearchIndex } from '../search-index'
 import { threadMemoryMB } from '../thread-memory'
 import { writeIndex } from './index-snapshot'
 import { SnapshotWriter, type SealedFacts } from './snapshot-file'
 import { snapshotFile, tidyFolder } from './snapshot-folder'
-import path from 'node:path'
+
+/** Between two steps: nobody waits for a snapshot, and the processor is also the main thread's. */
+const restMs = 3
 
 /** What the door knows and the thread does not. */
 export type FactsOfDatabase = Omit<SealedFacts, 'thread' | 'documents'>
@@ -28,7 +31,7 @@ export class SnapshotSaver {
     try {
       const documents = await writeIndex(index, writer, async () => {
         memoryMB = Math.max(memoryMB, threadMemoryMB())
-        await new Promise((resolve) => setImmediate(resolve))
+        await new Promise((resolve) => setTimeout(resolve, restMs))
       })
       this.unsealed = { writer, documents }
       return { documents, ms: performance.now() - begun, memoryMB }
