@@ -40,7 +40,7 @@ export class SnapshotWriter {
     frame.writeUInt32LE(packed.length, 4)
     frame.writeUInt32LE(raw.length, 8)
     frame.writeUInt32LE(checksum(frame, packed), 12)
-    await this.handle.write(Buffer.concat([frame, packed]), 0, undefined, this.bytes)
+    await writeAll(this.handle, Buffer.concat([frame, packed]), this.bytes)
     this.bytes += frameBytes + packed.length
     this.pieces++
   }
@@ -49,7 +49,7 @@ export class SnapshotWriter {
   async seal(facts: SealedFacts, file: string): Promise<number> {
     await this.handle.sync()
     const block = encodeHeader({ ...facts, format: snapshotFormat, pieces: this.pieces, bytes: this.bytes })
-    await this.handle.write(block, 0, headerBytes, 0)
+    await writeAll(this.handle, block, 0)
     await this.handle.sync()
     await this.handle.close()
     await rename(this.temporary, file)
@@ -128,6 +128,10 @@ function readExactly(handle: number, at: number, length: number): Buffer {
     read += more
   }
   return buffer
+}
+
+async function writeAll(handle: FileHandle, bytes: Buffer, at: number): Promise<void> {
+  for (let written = 0; written < bytes.length;) written += (await handle.write(bytes, written, bytes.length - written, at + written)).bytesWritten
 }
 
 const checksum = (frame: Buffer, packed: Buffer): number => crc32(packed, crc32(frame.subarray(0, frameBytes - 4)))

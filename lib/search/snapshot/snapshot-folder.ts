@@ -30,8 +30,8 @@ export function listSnapshots(folder: string, thread: string): FoundSnapshot[] {
       const header = readHeader(file)
       return header.thread === thread ? { file, header } : { file, refused: 'of another version' }
     } catch (error) {
-      if (error instanceof SnapshotError) return { file, refused: error.message }
-      throw error
+      // Whatever the disk says: the index can be made without it.
+      return { file, refused: error instanceof SnapshotError ? error.message : 'not readable' }
     }
   })
 }

@@ -61,7 +61,8 @@ export class SnapshotKeeper {
       }
       because = `the snapshot is ${'refused' in loaded ? loaded.refused : 'gone'}`
       this.tell('snapshot-refused', { because })
-      await rm(found.file, { force: true })
+      // One that cannot be removed is refused again the next time.
+      await rm(found.file, { force: true }).catch(() => undefined)
     }
     return { because }
   }

@@ -117,6 +117,24 @@ test('one made with other section titles is not used', async () => {
   await expectAnew('the snapshot is made with other titles')
 })
 
+test('one that ends the thread that reads it is not tried twice', async () => {
+  const id = await addPost(database, { title: 'Swaging a cable', body: '' })
+  const fragile = path.join(folder.path, 'fragile.mjs')
+  writeFileSync(fragile, `import { parentPort as port } from 'node:worker_threads'\nport.on('message', ({ call }) => { if (call === 'loadSnapshot') process.exit(9) })\n${readFileSync(thread, 'utf8')}`)
+  const first = await start(database, fragile)
+  await saved(first)
+  await first.close()
+  await expectAnew('the snapshot is one that ended the search thread', database, fragile)
+  expect(await idsFor(opened.at(-1) as SearchDoor, 'cable')).toEqual([id])
+})
+
+test('one that is far behind is not caught up with: reading the tables is sooner done', async () => {
+  await addPost(database, { title: 'Swaging a cable', body: '' })
+  await saveAndStop()
+  await database.reader.run(sql`with recursive n(i) as (select 1 union all select i + 1 from n where i < 6000) insert into change (post_id) select 1 from n`)
+  await expectAnew('the snapshot is far behind the database')
+})
+
 /** Gives back the copy taken before `lose` ran. */
 async function restoreFromBefore(lose: () => Promise<void>): Promise<Database> {
   const copy = path.join(folder.path, 'copy.db')
