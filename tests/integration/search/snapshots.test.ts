@@ -120,7 +120,7 @@ test('one made with other section titles is not used', async () => {
 test('one that ends the thread that reads it is not tried twice', async () => {
   const id = await addPost(database, { title: 'Swaging a cable', body: '' })
   const fragile = path.join(folder.path, 'fragile.mjs')
-  writeFileSync(fragile, `import { parentPort as port } from 'node:worker_threads'\nport.on('message', ({ call }) => { if (call === 'loadSnapshot') process.exit(9) })\n${readFileSync(thread, 'utf8')}`)
+  writeFileSync(fragile, `import { parentPort as fromDoor } from 'node:worker_threads'\nfromDoor.on('message', ({ call }) => { if (call === 'loadSnapshot') process.exit(9) })\n${readFileSync(thread, 'utf8')}`)
   const first = await start(database, fragile)
   await saved(first)
   await first.close()
