@@ -7,6 +7,9 @@ import { isAbout, type OrderQuestion } from '@/lib/domain/search/task-names'
 import type { AdviceFound, SearchDocument } from './messages'
 import type { Holds, Question } from './question'
 
+/** What of an entry is asked here. */
+type Advising = Pick<SearchDocument, 'orderAdvice'>
+
 export class AskedDirectly {
   /** Numbers of the terms of the steps asked for, and of their pages' steps. */
   private readonly steps: readonly number[]
@@ -23,17 +26,17 @@ export class AskedDirectly {
     return this.order !== null || this.pages.length > 0
   }
 
-  factor(document: SearchDocument, holds: Holds): number {
+  factor(document: Advising, holds: Holds): number {
     return this.matters ? directness(this.read(document, holds)) : 1
   }
 
-  read(document: SearchDocument, holds: Holds): Direct {
+  read(document: Advising, holds: Holds): Direct {
     const place = this.steps.some(holds) ? 'step' : this.pages.some(holds) ? 'page' : null
     return { advises: this.advice(document).length > 0, place }
   }
 
   /** The order advice of an entry that is about the pair in question. */
-  advice({ orderAdvice }: SearchDocument): AdviceFound[] {
+  advice({ orderAdvice }: Advising): AdviceFound[] {
     const { order } = this
     if (order === null || !orderAdvice) return []
     return orderAdvice.map(({ postId, before, after }) => ({ postId, before: before.slug, after: after.slug })).filter((advice) => isAbout(advice, order))

@@ -5,6 +5,9 @@ import { evidenceWeight, type EvidenceFact } from '@/lib/domain/search/evidence-
 import type { TaskName } from '@/lib/domain/search/task-names'
 import type { OrderAdvice, SearchDocument } from './messages'
 
+/** Counts up when the same rows give another document than before (here, in evidence-weight.ts or in the plain text): snapshots made of older ones are not used. */
+export const documentVersion = 1
+
 /** Titles by slug: what people type instead of a slug. Sections bring their titles along. */
 export interface SearchTitles {
   tasks: ReadonlyMap<string, string>

@@ -39,11 +39,9 @@ function readPart(text: string, synonyms: Synonyms, result: DocumentTerms): stri
   return terms
 }
 
-/** Adds or takes away one entry's different terms from the counts of entries a term. */
-export function countTerms(frequencies: Map<string, number>, terms: readonly string[], by: 1 | -1): void {
-  for (const term of new Set(terms)) {
-    const count = (frequencies.get(term) ?? 0) + by
-    if (count > 0) frequencies.set(term, count)
-    else frequencies.delete(term)
-  }
+/** How often each term stands there. */
+export function countTerms(terms: readonly string[]): Map<string, number> {
+  const counts = new Map<string, number>()
+  for (const term of terms) counts.set(term, (counts.get(term) ?? 0) + 1)
+  return counts
 }

@@ -60,7 +60,19 @@ export interface SearchAnswer {
   sequence: number
 }
 
-export interface SearchHealth { state: 'loading' | 'ready'; documents: number; sequence: number }
+export interface SearchHealth {
+  state: 'loading' | 'ready'
+  documents: number
+  sequence: number
+  /** What the search thread has, heap and buffers, now and at most since it started; megabytes of 10⁶ bytes. */
+  memoryMB: number
+  highestMemoryMB: number
+  /** What the index was filled from, and why not from a snapshot when it was not. Absent while that is not known. */
+  startedFrom?: 'snapshot' | 'tables'
+  because?: string
+  /** The newest snapshot that this process saved or started from. */
+  snapshot?: { sequence: number; savedAt: number; MB: number; seconds?: number; highestMemoryMB?: number }
+}
 
 export type WhenOrdered = (entryIds: number[]) => void
 

@@ -16,6 +16,8 @@ import type { SearchExplanation } from './explanation'
 import { findPassage } from './find-passage'
 import { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
+import { packDocument, unpackDocument, type PackedDocument } from './packed-document'
+import type { PostingList } from './posting-list'
 import { Postings } from './postings'
 import { Question } from './question'
 import { PlacedTermsOfTexts } from './placed-terms'
@@ -34,7 +36,7 @@ const mostScoredOfSimilar = 300
 const mostPostings = 120_000
 
 /** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
-interface Kept { slot: number; document: SearchDocument; weight: number }
+interface Kept { slot: number; document: PackedDocument; weight: number }
 /** `shared`: the part of the score that comes from what the first hits share. */
 interface Scored { kept: Kept; coverage: number; score: number; shared: number }
 interface Wanted { filters: SearchFilters; least: number; mostScored: number; wanted: number }
@@ -42,6 +44,8 @@ interface Asked { question: Question; direct: AskedDirectly }
 /** `considered` hold a word of the question; those that hold less than `cutBelow` of it are not among `found`. */
 interface Ranked { found: Scored[]; held: HeldTerms; best: number; cutBelow: number; considered: number }
 interface Looked extends Asked { understood: UnderstoodQuery; tooCommon: string[]; least: number; ranked: Ranked }
+/** What a snapshot keeps of an entry. */
+export interface IndexRecord { document: PackedDocument; terms: ReadonlyMap<string, number>; words: ReadonlySet<string> }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
@@ -49,7 +53,6 @@ export class SearchIndex {
   private readonly kept = new Map<number, Kept>()
   private readonly slots: (Kept | undefined)[] = []
   private readonly freeSlots: number[] = []
-  private readonly frequencies = new Map<string, number>()
   private readonly vocabulary = new Vocabulary()
   private readonly titles = new TitleIndex()
   private readonly synonyms: Synonyms
@@ -67,31 +70,67 @@ export class SearchIndex {
     return this.kept.size
   }
 
+  /** Bytes kept outside the heap, nearly. */
+  get bytes(): number {
+    let sum = this.postings.bytes
+    for (const { document } of this.kept.values()) sum += document.texts.byteLength
+    return sum
+  }
+
   /** Adds an entry or puts its new text in place of the old. */
   put(document: SearchDocument): void {
     this.remove(document.id)
-    const terms = termsOfDocument(document, this.synonyms, this.weights.titleRepeats)
-    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
-    this.postings.add(kept.slot, terms.all)
-    this.titles.put(document.id, document.title)
-    this.count(terms, 1)
-    this.kept.set(document.id, kept)
-    this.slots[kept.slot] = kept
-    for (const { before, after } of document.orderAdvice ?? []) for (const task of [before, after]) this.tasks.add(task)
+    const { all, words } = termsOfDocument(document, this.synonyms, this.weights.titleRepeats)
+    const { slot } = this.keep(packDocument(document))
+    this.postings.add(slot, countTerms(all))
+    for (const word of words) this.vocabulary.add(word)
   }
 
   /** Takes an entry out; nothing happens when it is not in. */
   remove(id: number): void {
     const old = this.kept.get(id)
     if (!old) return
-    const terms = termsOfDocument(old.document, this.synonyms, this.weights.titleRepeats)
-    this.count(terms, -1)
-    this.postings.remove(old.slot, terms.all)
+    const { all, words } = termsOfDocument(unpackDocument(old.document), this.synonyms, this.weights.titleRepeats)
+    for (const word of words) this.vocabulary.remove(word)
+    this.postings.remove(old.slot, new Set(all))
     this.slots[old.slot] = undefined
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
     this.kept.delete(id)
     for (const { before, after } of old.document.orderAdvice ?? []) for (const { slug } of [before, after]) this.tasks.remove(slug)
+  }
+
+  /** Ids of all entries, in the order in which a snapshot keeps them. */
+  ids(): number[] {
+    return [...this.kept.keys()]
+  }
+
+  /** An entry with its terms, as a snapshot keeps it; null when it is not in. */
+  record(id: number): IndexRecord | null {
+    const kept = this.kept.get(id)
+    if (!kept) return null
+    const { all, words } = termsOfDocument(unpackDocument(kept.document), this.synonyms, this.weights.titleRepeats)
+    return { document: kept.document, terms: countTerms(all), words }
+  }
+
+  /** Puts in an entry whose terms are known; `terms` holds a list and a count each. Only for an index that is being filled, once an entry. */
+  restore(document: PackedDocument, terms: Iterable<readonly [PostingList, number]>): void {
+    const { slot } = this.keep(document)
+    let different = 0
+    for (const [list, count] of terms) {
+      list.put(slot, count)
+      different++
+    }
+    this.postings.noteLength(slot, different)
+  }
+
+  /** The list of `term`, to restore with. */
+  listOf(term: string): PostingList {
+    return this.postings.listOf(term)
+  }
+
+  restoreWord(word: string, documents: number): void {
+    this.vocabulary.add(word, documents)
   }
 
   search(request: SearchRequest, whenOrdered?: WhenOrdered): Found {
@@ -113,7 +152,7 @@ export class SearchIndex {
     const { understood, tooCommon, ...looked } = this.look(request)
     const page = looked.ranked.found.slice(request.offset, request.offset + request.limit)
     return {
-      ...explainHits(page, { ...looked, ...looked.ranked, postings: this.postings, placed: this.placed, synonyms: this.synonyms, frequency: this.corpus().frequency }),
+      ...explainHits(page.map((hit) => ({ ...hit, kept: { ...hit.kept, document: unpackDocument(hit.kept.document) } })), { ...looked, ...looked.ranked, postings: this.postings, placed: this.placed, synonyms: this.synonyms, frequency: this.corpus().frequency }),
       documents: this.kept.size, ignored: [...understood.ignored, ...tooCommon], didYouMean: understood.didYouMean, places: understood.places,
     }
   }
@@ -135,7 +174,7 @@ export class SearchIndex {
   /** Orders the best anew by what they share: a long question means words that it does not say. */
   private orderByFeedback(found: Scored[], question: Question): Scored[] {
     const { feedback } = this.weights
-    const first = found.slice(0, feedback.entries).map(({ kept, score }) => ({ score, terms: termsOfDocument(kept.document, this.synonyms, 1).all }))
+    const first = found.slice(0, feedback.entries).map(({ kept, score }) => ({ score, terms: termsOfDocument(unpackDocument(kept.document), this.synonyms, 1).all }))
     const further = feedbackQuestion(first, question, this.corpus(), feedback)
     if (!further) return found
     const best = found.slice(0, mostScored)
@@ -171,15 +210,16 @@ export class SearchIndex {
   }
 
   private corpus(): Corpus {
-    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms, factor: this.weights.factor }
+    return { documents: this.kept.size, frequency: (term) => this.postings.frequency(term), vocabulary: this.vocabulary, synonyms: this.synonyms, factor: this.weights.factor }
   }
 
-  private count(terms: DocumentTerms, by: 1 | -1): void {
-    countTerms(this.frequencies, terms.all, by)
-    for (const word of terms.words) {
-      if (by === 1) this.vocabulary.add(word)
-      else this.vocabulary.remove(word)
-    }
+  private keep(document: PackedDocument): Kept {
+    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
+    this.kept.set(document.id, kept)
+    this.slots[kept.slot] = kept
+    this.titles.put(document.id, document.title)
+    for (const { before, after } of document.orderAdvice ?? []) for (const task of [before, after]) this.tasks.add(task)
+    return kept
   }
 
   /** Keeps the rarest concepts whose postings can be read in time. */
@@ -187,7 +227,7 @@ export class SearchIndex {
     const affordable = new Set<Concept>()
     let postings = 0
     for (const concept of [...concepts].sort((a, b) => b.mass - a.mass)) {
-      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + (this.frequencies.get(term) ?? 0), 0), 0)
+      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + this.postings.frequency(term), 0), 0)
       if (affordable.size === 0 || postings <= mostPostings) affordable.add(concept)
     }
     return { affordable: concepts.filter((c) => affordable.has(c)), tooCommon: concepts.filter((c) => !affordable.has(c)).map((c) => c.word) }
@@ -260,7 +300,7 @@ export class SearchIndex {
   private hit({ kept: { document }, score }: Scored, { question, direct }: Asked): SearchAnswer['hits'][number] {
     const advice = direct.advice(document)
     const preferred = new Set(advice.map(({ postId }) => postId))
-    return { id: document.id, score, ...findPassage(document, question, this.placed, preferred), ...(advice.length > 0 ? { advice } : {}) }
+    return { id: document.id, score, ...findPassage(unpackDocument(document), question, this.placed, preferred), ...(advice.length > 0 ? { advice } : {}) }
   }
 }
 
@@ -269,7 +309,7 @@ const byScore = (a: Scored, b: Scored): number =>
 
 const nthLargest = (values: readonly number[], n: number): number => Float64Array.from(values).sort()[Math.max(0, values.length - n)] ?? 0
 
-function passes(document: SearchDocument, filters: SearchFilters): boolean {
+function passes(document: Omit<PackedDocument, 'texts'>, filters: SearchFilters): boolean {
   return (filters.kit === undefined || document.kit === filters.kit)
     && (filters.section === undefined || document.sections.includes(filters.section))
     && (filters.operation === undefined || document.operations.includes(filters.operation))

@@ -6,7 +6,7 @@ import type { Measurement } from '../measurements/measurement'
 import { singleCells, spannedCells } from './range-cells'
 
 /** Marks terms of values; no text can hold it, so no word can be mistaken for one. */
-const valueMark = '≡'
+export const valueMark = '≡'
 
 export interface PlacedValue {
   terms: readonly string[]
