@@ -41,6 +41,7 @@ export const hitSchema = z.object({
   partTags: z.array(z.object({ code: z.string().optional(), title: z.string() })),
   stamp: stampStateSchema, stamps: z.array(stampSchema), needsTwo: z.boolean(),
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
+  balloons: z.array(z.int()).describe('Numbers of the balloons of computed[0] that the passage speaks of, most about first; empty without a computed answer.'),
 })
 export const searchResultSchema = z.object({
   query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(measurementSchema), didYouMean: z.string().optional() }),
@@ -48,7 +49,7 @@ export const searchResultSchema = z.object({
   computed: z.array(shopAnswerSchema), results: z.array(hitSchema), total: z.int(), tookMs: z.number(),
 })
 export const suggestionSchema = z.object({
-  text: z.string(), kind: z.enum(['question', 'lesson', 'section', 'operation']), id: z.int().optional(), url: z.string(),
+  text: z.string(), kind: z.enum(['question', 'lesson', 'section', 'operation', 'shop']), id: z.int().optional(), url: z.string(),
   cautions: z.array(z.object({ signalWord: z.enum(['WARNING', 'CAUTION', 'NOTICE']), topic: z.enum(CAUTION_TOPICS) })),
 })
 export const requiredCautionsResultSchema = z.object({ cautions: z.array(cautionSchema) })

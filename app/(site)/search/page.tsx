@@ -1,7 +1,7 @@
 // The results page: works without JavaScript. Filters stand in the address; hits are grouped stamped, not stamped, open.
 import type { Metadata, Route } from 'next'
 import Link from 'next/link'
-import { HitList, HitPlate } from '@/components/entries/hit-list'
+import { HitList, HitPlate, hitAnchor } from '@/components/entries/hit-list'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { ComputedAnswer } from '@/components/shop/computed-answer'
@@ -49,12 +49,14 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
   const words = address.q?.trim() ?? ''
   const ask = paths.ask({ title: words.slice(0, 160), ...(address.kit ? { kit: address.kit } : {}), ...(address.section ? { section: address.section } : {}) })
   const offset = address.offset ?? 0
+  const balloons = result.computed.flatMap((answer) => answer.balloons)
+  const posts = groups.flatMap((group) => group.hits).map((hit) => ({ balloons: hit.balloons, title: hit.title, anchor: hitAnchor(hit) }))
   return (
     <>
       <h1 className="sr-only">{words ? `Results for ${words}` : 'All entries'}</h1>
       {query.didYouMean ? <NoticeLine icon="search">Did you mean <Link href={paths.search({ ...address, q: query.didYouMean, offset: undefined })}>{query.didYouMean}</Link>?</NoticeLine> : null}
       {query.ignored.length > 0 ? <NoticeLine>Too many words: left out {query.ignored.join(', ')}.</NoticeLine> : null}
-      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} />)}
+      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} posts={posts} />)}
       {result.computed.length > 0 && results.length === 0 ? <CautionPlate cautions={result.computed.flatMap((a) => a.cautions)} /> : null}
       {results.length === 0 ? <NothingFound words={words} ask={ask} address={address} /> : (
         <>
@@ -62,7 +64,7 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
           {groups.map((group) => (
             <section key={group.title} aria-labelledby={`group-${group.title}`} className="page-body">
               <RivetLine title={group.title} id={`group-${group.title}`} />
-              <HitList hits={group.hits} actionFor={sayWhatToDo} />
+              <HitList hits={group.hits} balloons={balloons} actionFor={sayWhatToDo} />
             </section>
           ))}
           <Pager address={address} offset={offset} total={total} />

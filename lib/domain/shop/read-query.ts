@@ -31,7 +31,9 @@ function grommets(query: string, words: ReadonlySet<string>, found: readonly Mea
   const size = aSize(found)
   if (!size || !has(words, 'grommet', 'grommets')) return []
   const inches = sizeOf(size)
+  const through = has(words, 'tube', 'tubing', 'conduit', 'line', 'hose', 'cable', 'bundle') ? [{ table: 'grommet', inputs: { bore: inches, through: inches }, label: `a grommet for ${inches} tube or conduit` }] : []
   return [
+    ...through,
     { table: 'grommet', inputs: { bore: inches }, label: `a grommet with a ${inches} bore` },
     { table: 'grommet', inputs: { hole: inches }, label: `a ${inches} hole that takes a grommet` },
   ]
@@ -52,8 +54,10 @@ function rivets(words: ReadonlySet<string>, found: readonly Measurement[]): Shop
   const inches = designation?.diameter ?? found.find((m) => m.kind === 'length')?.inches
   const diameter = rivetSizes.find((size) => { const [n = 0, d = 1] = size.split('/').map(Number); return inches !== undefined && Math.abs(n / d - inches) < 0.002 })
   if (!diameter) return []
-  const head = has(words, 'flush', 'countersunk') || /(?:426|1097)/.test(designation?.raw ?? '') ? 'flush' : has(words, 'pop', 'pull', 'blind') ? 'blind' : 'universal'
-  return [{ table: 'rivet', inputs: { diameter, head }, label: `a ${head === 'universal' ? 'solid' : head} rivet of ${diameter} in` }]
+  const isFlush = has(words, 'flush', 'countersunk') || /(?:426|1097)/.test(designation?.raw ?? '')
+  const said = isFlush ? 'flush' : has(words, 'pop', 'pull', 'blind') ? 'blind' : designation || has(words, 'universal', 'solid') ? 'universal' : null
+  // A rivet whose head nobody named is most often a solid one, but a flush or a blind one is a tap away.
+  return (said ? [said] : ['universal', 'flush', 'blind']).map((head) => ({ table: 'rivet', inputs: { diameter, head }, label: `a ${head === 'universal' ? 'solid' : head} rivet of ${diameter} in` }))
 }
 
 function bolts(query: string, words: ReadonlySet<string>): ShopReading[] {

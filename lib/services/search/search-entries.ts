@@ -2,6 +2,7 @@
 import 'server-only'
 import { countEntries, listEntryIds } from '@/db/queries/entries'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
+import { keyBalloons, type BalloonKeys } from '@/lib/domain/shop/key-balloons'
 import { computeQuery } from '@/lib/services/shop/compute-query'
 import type { AppContext } from '@/lib/context'
 import type { Hit, SearchQuery, SearchResult } from '@/lib/schemas/search'
@@ -11,10 +12,13 @@ import { loadHits, presentHits, type HitMaterial } from './present-hits'
 export async function searchEntries(context: AppContext, query: SearchQuery): Promise<SearchResult> {
   const startedAt = performance.now()
   const text = query.q.trim()
-  const finding = text === '' ? findNewest(context, query) : findByWords(context, text, query)
+  let keys: BalloonKeys | null = null
+  const finding = text === '' ? findNewest(context, query) : findByWords(context, text, query, () => keys)
   // The tables are asked while the search thread looks the words up; a search that fails meanwhile is heard below.
   finding.catch(() => undefined)
   const [measurements, computed] = [findMeasurements(text), query.offset === 0 ? computeQuery(text) : []]
+  const [answer] = computed
+  if (answer) keys = keyBalloons(answer.table, answer.balloons, answer.results)
   const { results, total, ignored, didYouMean } = await finding
   return {
     query: { text: query.q, ignored, measurements, ...(didYouMean !== null ? { didYouMean } : {}) },
@@ -24,14 +28,14 @@ export async function searchEntries(context: AppContext, query: SearchQuery): Pr
 
 interface Found { results: Hit[]; total: number; ignored: string[]; didYouMean: string | null }
 
-async function findByWords(context: AppContext, text: string, query: SearchQuery): Promise<Found> {
+async function findByWords(context: AppContext, text: string, query: SearchQuery, keys: () => BalloonKeys | null): Promise<Found> {
   let loading: Promise<HitMaterial> | undefined
   const { hits, ...found } = await context.search.search({ text, filters: filtersOf(query), limit: query.limit, offset: query.offset }, (entryIds) => {
     loading = loadHits(context, entryIds)
     // Heard by presentHits, unless the search itself fails first.
     loading.catch(() => undefined)
   })
-  return { ...found, results: await presentHits(context, hits, loading) }
+  return { ...found, results: await presentHits(context, hits, { loading, keys: keys() }) }
 }
 
 async function findNewest(context: AppContext, query: SearchQuery): Promise<Found> {
