@@ -3,7 +3,7 @@ import type { ShopResult } from './shop-table'
 
 /** Names in order of preference, where the first result of the table is not what one came for. */
 const leads: Readonly<Record<string, readonly string[]>> = {
-  drills: ['drill', 'nearest'],
+  drills: ['screw-drill', 'drill', 'nearest'],
   bend: ['flat-length'],
   grommet: ['hole-groove', 'hole'],
   units: ['mm', 'in', 'N·m', 'lbf-in'],

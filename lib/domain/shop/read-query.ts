@@ -2,6 +2,7 @@
 import type { Measurement } from '@/lib/domain/measurements/measurement'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { BOLTS, boltThread } from './bolt-designation'
+import { SCREWS, smallestDrillFor } from './screw-clearance'
 
 export interface ShopReading {
   table: string
@@ -18,7 +19,7 @@ export function readShopQuery(text: string): ShopReading[] {
   const query = text.slice(0, 300)
   const words = new Set(query.toLowerCase().match(/[a-z]+/g) ?? [])
   const found = findMeasurements(query)
-  return [...grommets(query, words, found), ...torques(query, words), ...rivets(words, found), ...bolts(query, words), ...drills(words, found)]
+  return [...grommets(query, words, found), ...torques(query, words), ...rivets(words, found), ...bolts(query, words), ...screws(query, words), ...drills(words, found)]
 }
 
 const has = (words: ReadonlySet<string>, ...any: string[]) => any.some((word) => words.has(word))
@@ -66,6 +67,14 @@ function bolts(query: string, words: ReadonlySet<string>): ShopReading[] {
   const part = /\ban\d{1,2}h?-\d{1,3}a?\b/i.exec(query)?.[0]
   if (!bolt || (!part && !has(words, 'bolt', 'bolts', 'grip', 'length'))) return []
   return [{ table: 'bolt', inputs: { bolt, ...(part ? { part: part.toUpperCase() } : {}) }, label: part ? `the bolt ${part.toUpperCase()}` : `an ${bolt} bolt` }]
+}
+
+/** A hole for a numbered screw; "10-32" is its thread. Not a tapped hole: no table here gives tap drills. */
+function screws(query: string, words: ReadonlySet<string>): ShopReading[] {
+  if (!has(words, 'screw', 'screws') || !has(words, 'hole', 'holes', 'drill', 'clearance') || has(words, 'tap', 'tapped', 'torque')) return []
+  const size = Number(/(?<![\w./-])(?:#|no\.? ?)?(\d{1,2})(?:-\d{2})?(?![\w/.])/i.exec(query)?.[1])
+  const drill = SCREWS.some((known) => known === size) ? smallestDrillFor(size) : null
+  return drill ? [{ table: 'drills', inputs: { screw: `#${size}`, size: drill.name }, label: `a hole that passes a #${size} screw` }] : []
 }
 
 function drills(words: ReadonlySet<string>, found: readonly Measurement[]): ShopReading[] {
