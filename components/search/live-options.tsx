@@ -38,10 +38,16 @@ function SuggestionWords({ suggestion: { text, kind, cautions } }: { suggestion:
   const topics = [...new Set(cautions.map((c) => topicWords(c.topic)))]
   return (
     <>
-      <span className="live-words"><b>{text}</b> <span className="live-kind">{kinds[kind]}</span></span>
+      <span className="live-words"><span>{kind === 'shop' ? <NumberWords text={text} /> : <b>{text}</b>}</span> <span className="live-kind">{kinds[kind]}</span></span>
       {topics.length > 0 ? <Cautions words={cautions.map((c) => c.signalWord)} text={topics.join(', ')} /> : null}
     </>
   )
+}
+
+/** "5/8 in: a grommet with a 3/8 bore (from memory …)": the number stands out, what it is of and whose it is are read with it. */
+function NumberWords({ text }: { text: string }) {
+  const colon = text.indexOf(': ')
+  return colon < 0 ? <b>{text}</b> : <><b>{text.slice(0, colon + 1)}</b>{text.slice(colon + 1)}</>
 }
 
 function HitWords({ hit }: { hit: Hit }) {

@@ -67,6 +67,8 @@ describe('lists and small reads', () => {
   it('GET /api/suggest gives what a shop table works out before everything else, and tables by their names', async () => {
     const items = async (q: string) => (await api<{ items: { kind: string; url: string; text: string }[] }>('GET', `/api/suggest?q=${encodeURIComponent(q)}`)).body.items
     expect((await items('grommet hole 3/8')).slice(0, 2).map((s) => [s.kind, s.url])).toEqual([['shop', '/shop/grommet?bore=3%2F8'], ['shop', '/shop/grommet?hole=3%2F8']])
+    // No grommet of the list goes in a 3/8 hole: no other number stands in its place.
+    expect((await items('grommet hole 3/8'))[1]?.text).toBe('a 3/8 hole that takes a grommet')
     // The torque of an AN3 stands in a source that was seen; a grommet's hole is recalled and says so.
     expect((await items('AN3 torque'))[0]?.text).not.toContain('memory')
     expect((await items('grommet hole 3/8'))[0]?.text).toContain('from memory, not checked')
