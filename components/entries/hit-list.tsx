@@ -9,18 +9,22 @@ import type { Route } from 'next'
 import { HitRow } from './hit-row'
 import { Sheet } from './sheet'
 
-/** One sheet; nothing when there are no hits. */
-export function HitList({ hits, actionFor }: { hits: readonly Hit[]; actionFor?: (hit: Hit) => ReactNode }) {
+/** One sheet; nothing when there are no hits. `balloons`: those of a computed answer on the same page, which hits are keyed to. */
+export function HitList({ hits, balloons = [], actionFor }: { hits: readonly Hit[]; balloons?: readonly { n: number; label: string }[]; actionFor?: (hit: Hit) => ReactNode }) {
   if (hits.length === 0) return null
   return (
     <Sheet>
       {hits.map((hit) => (
         <HitRow key={hit.id} kindLine={hitKindLine(hit)} title={hit.title} href={hit.url as Route} cautions={standing(hit)} snippet={hit.snippet} marks={hit.marks}
-          orderAdvice={hit.orderAdvice} partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} action={actionFor?.(hit)} />
+          orderAdvice={hit.orderAdvice} partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} action={actionFor?.(hit)}
+          anchor={hitAnchor(hit)} balloons={hit.balloons.flatMap((n) => balloons.find((balloon) => balloon.n === n) ?? [])} />
       ))}
     </Sheet>
   )
 }
+
+/** The id of a hit's row on its page. */
+export const hitAnchor = ({ id }: Pick<Hit, 'id'>): string => `hit-${id}`
 
 /**
  * `also`: cautions of a computed answer on the same page. One plate for all hits of a page, a short line a topic with on how many of them it stands; the full texts head each entry.

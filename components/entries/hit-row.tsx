@@ -4,6 +4,7 @@ import type { Route } from 'next'
 import Link from 'next/link'
 import type { ReactNode } from 'react'
 import { CautionLine, type LineCaution } from '@/components/cautions/caution-line'
+import { BalloonNumber } from '@/components/shop/figure-balloon'
 import { StampFlat } from '@/components/stamps/stamp-flat'
 import type { StampState } from '@/lib/domain/stamps/stamp-state'
 import type { StampFace } from '@/lib/format/stamp-words'
@@ -28,13 +29,18 @@ export interface HitRowProps {
   critical: boolean
   stamps: readonly (StampFace & { readonly id: number | string })[]
   stampState: StampState
+  /** Balloons of the drawing above that the passage speaks of, with the names of their features. */
+  balloons?: readonly { readonly n: number; readonly label: string }[] | undefined
+  /** To be jumped to from elsewhere on the page. */
+  anchor?: string | undefined
   /** A next step in the row, such as a link button Tell what to do. */
   action?: ReactNode
 }
 
-export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderAdvice, partTags, outcomes, critical, stamps, stampState, action }: HitRowProps) {
+export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderAdvice, partTags, outcomes, critical, stamps, stampState, balloons = [], anchor, action }: HitRowProps) {
   return (
-    <article className="hit">
+    <article className={balloons.length > 0 ? 'hit hit-keyed' : 'hit'} id={anchor}>
+      {balloons.length > 0 ? <div className="hit-balloons">{balloons.map(({ n, label }) => <BalloonNumber key={n} n={n} label={`About ${n}, ${midSentence(label)}`} />)}</div> : null}
       <div className="hit-text">
         <p className="label">{kindLine}</p>
         <h3><Link href={href}>{title}</Link></h3>
@@ -52,4 +58,9 @@ export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderA
       ) : null}
     </article>
   )
+}
+
+/** "the groove", but "E, 1/4" and "#30" stay as they are. */
+function midSentence(label: string): string {
+  return /^[A-Z][a-z]/.test(label) ? `the ${label.charAt(0).toLowerCase()}${label.slice(1)}` : label
 }

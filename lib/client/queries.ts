@@ -2,7 +2,7 @@
 import { queryOptions } from '@tanstack/react-query'
 import type { Caution } from '@/lib/schemas/post'
 import type { NumbersCheckItem } from '@/lib/schemas/numbers-check'
-import type { Hit, SearchResult } from '@/lib/schemas/search'
+import type { Hit, SearchResult, Suggestion } from '@/lib/schemas/search'
 
 async function readJson<T>(url: string, signal: AbortSignal, body?: unknown): Promise<T> {
   const response = await fetch(url, {
@@ -21,6 +21,12 @@ export interface WritingText { title: string; body: string; kit?: string | undef
 export const liveResults = (words: string) => queryOptions({
   queryKey: ['search', words], enabled: words.trim() !== '', staleTime: 10_000,
   queryFn: ({ signal }) => readJson<SearchResult>(`/api/search?${new URLSearchParams({ q: words, limit: '6' })}`, signal),
+})
+
+/** What completes the words: shop tables, sections, operations, entries. */
+export const completionsOf = (words: string) => queryOptions({
+  queryKey: ['suggest', words], enabled: words.trim() !== '', staleTime: 10_000,
+  queryFn: ({ signal }) => readJson<{ items: Suggestion[] }>(`/api/suggest?${new URLSearchParams({ q: words })}`, signal),
 })
 
 /** Posts that may already answer a question being written. */

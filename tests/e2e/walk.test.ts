@@ -250,7 +250,7 @@ describe('what is loaded into a page later', () => {
     const page = await openPage()
     await visit(page, '/kits')
     await page.getByLabel('Search', { exact: true }).fill(word.title)
-    const option = page.getByRole('listbox', { name: 'Results' }).getByRole('option').filter({ hasText: word.title })
+    const option = page.getByRole('listbox', { name: 'Suggestions and results' }).getByRole('option').filter({ hasText: word.title })
     await option.waitFor()
     expect(isCovered((await option.textContent()) ?? '', 'title')).toBe(true)
   })

@@ -71,6 +71,18 @@ describe('lists and small reads', () => {
     expect(body.items.length).toBeLessThanOrEqual(8)
   })
 
+  it('GET /api/suggest gives what a shop table works out before everything else, and tables by their names', async () => {
+    const items = async (q: string) => (await api<{ items: { kind: string; url: string; text: string }[] }>('GET', `/api/suggest?q=${encodeURIComponent(q)}`)).body.items
+    expect((await items('grommet hole 3/8')).slice(0, 2).map((s) => [s.kind, s.url])).toEqual([['shop', '/shop/grommet?bore=3%2F8'], ['shop', '/shop/grommet?hole=3%2F8']])
+    // No grommet of the list goes in a 3/8 hole: no other number stands in its place.
+    expect((await items('grommet hole 3/8'))[1]?.text).toBe('a 3/8 hole that takes a grommet')
+    // The torque of an AN3 stands in a source that was seen; a grommet's hole is recalled and says so.
+    expect((await items('AN3 torque'))[0]?.text).not.toContain('memory')
+    expect((await items('grommet hole 3/8'))[0]?.text).toContain('from memory, not checked')
+    expect((await items('torq')).map((s) => s.url)).toContain('/shop/torque')
+    expect((await items('ribs mix')).map((s) => s.kind)).not.toContain('shop')
+  })
+
   it('POST /api/similar finds what may already answer it, for a visitor', async () => {
     const { status, body } = await api<{ results: Hit[] }>('POST', '/api/similar', { body: { title: 'What hole for a grommet in a panel' } })
     expect(status).toBe(200)
@@ -168,6 +180,15 @@ describe('GET /api/openapi.json', () => {
     const result = await validator.validate(body)
     expect(result).toEqual({ valid: true })
     expect(validator.version).toBe('3.1')
+  })
+
+  it('names the shapes that answers share, so that a client has them once', async () => {
+    const { body } = await api<{ components: { schemas: Record<string, { properties?: Record<string, unknown> }> } }>('GET', '/api/openapi.json')
+    const { ShopAnswer, ShopResult, Hit } = body.components.schemas
+    expect(Object.keys(body.components.schemas)).toEqual(expect.arrayContaining(['ShopAnswer', 'ShopResult', 'Measurement', 'Source', 'Hit', 'Entry', 'Caution']))
+    expect(ShopAnswer?.properties?.results).toMatchObject({ items: { $ref: '#/components/schemas/ShopResult' } })
+    expect(JSON.stringify(ShopResult?.properties?.source)).toContain('#/components/schemas/Source')
+    expect(Hit?.properties?.balloons).toMatchObject({ type: 'array', items: { type: 'integer' } })
   })
 
   it('describes every route there is', async () => {

@@ -2,7 +2,7 @@
 import type { Metadata, Route } from 'next'
 import Link from 'next/link'
 import { readSearchAddress } from '@/app/search-address'
-import { HitList, HitPlate } from '@/components/entries/hit-list'
+import { HitList, HitPlate, hitAnchor } from '@/components/entries/hit-list'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { ComputedAnswer } from '@/components/shop/computed-answer'
@@ -62,13 +62,15 @@ function Results({ result, address, first }: { result: SearchResult; address: Se
   const contrary = findContrary(results.flatMap((hit) => hit.orderAdvice ?? []))
   const ask = paths.ask({ title: words.slice(0, 160), ...(address.kit ? { kit: address.kit } : {}), ...(address.section ? { section: address.section } : {}) })
   const offset = address.offset ?? 0
+  const balloons = result.computed.flatMap((answer) => answer.balloons)
+  const posts = groups.flatMap((group) => group.hits).map((hit) => ({ balloons: hit.balloons, title: hit.title, anchor: hitAnchor(hit) }))
   return (
     <>
       <h1 className="sr-only">{words ? `Results for ${words}` : 'All entries'}</h1>
       {query.didYouMean ? <NoticeLine icon="search">Did you mean <Link href={paths.search({ ...address, q: query.didYouMean, offset: undefined })}>{query.didYouMean}</Link>?</NoticeLine> : null}
       {contrary ? <NoticeLine boxed>Builders disagree here: some advise {contrary.one} before {contrary.other}, some the other way round. Both are below, each with what speaks for it. The plans decide.</NoticeLine> : null}
       {query.ignored.length > 0 ? <NoticeLine>Too many words: left out {query.ignored.join(', ')}.</NoticeLine> : null}
-      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} first={first} />)}
+      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} first={first} posts={posts} />)}
       {result.computed.length > 0 && results.length === 0 ? <CautionPlate cautions={result.computed.flatMap((a) => a.cautions)} /> : null}
       {results.length === 0 ? <NothingFound words={words} ask={ask} address={address} /> : (
         <>
@@ -76,7 +78,7 @@ function Results({ result, address, first }: { result: SearchResult; address: Se
           {groups.map((group) => (
             <section key={group.title} aria-labelledby={`group-${group.title}`} className="page-body">
               <RivetLine title={group.title} id={`group-${group.title}`} />
-              <HitList hits={group.hits} actionFor={sayWhatToDo} />
+              <HitList hits={group.hits} balloons={balloons} actionFor={sayWhatToDo} />
             </section>
           ))}
           <Pager address={address} offset={offset} total={total} />

@@ -8,6 +8,7 @@ import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { makeSnippet } from '@/lib/domain/search/snippet'
 import { paths } from '@/lib/paths'
+import type { BalloonKeys } from '@/lib/domain/shop/key-balloons'
 import type { Hit } from '@/lib/schemas/search'
 import type { AdviceFound } from '@/lib/search/messages'
 import { presentCautions, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
@@ -29,19 +30,19 @@ export async function loadHits({ reader }: AppContext, entryIds: readonly number
   return { answers, posts, tasks: new Map(tasks.map((t) => [t.slug, t.title])) }
 }
 
-/** Hits in the order given. Anything not visible any more is left out, whatever the index says. */
-export async function presentHits(context: AppContext, found: readonly Found[], loading?: Promise<HitMaterial>): Promise<Hit[]> {
+/** Hits in the order given, keyed to the balloons of a computed answer where there is one. Anything not visible any more is left out, whatever the index says. */
+export async function presentHits(context: AppContext, found: readonly Found[], { loading, keys = null }: { loading?: Promise<HitMaterial> | undefined; keys?: BalloonKeys | null } = {}): Promise<Hit[]> {
   const { answers, posts, tasks } = await (loading ?? loadHits(context, found.map((f) => f.id)))
   return found.flatMap((f) => {
     const entry = posts.get(f.id)
     const passage = posts.get(f.postId) ?? entry
     if (!entry || !passage || entry.state !== 'visible' || entry.kind === 'answer') return []
     const own = answers.flatMap((a) => (a.parentId === entry.id ? (posts.get(a.id) ?? []) : [])).filter((a) => a.state === 'visible')
-    return [presentHit(f, entry, passage.state === 'visible' ? passage : entry, own, tasks)]
+    return [presentHit(f, entry, passage.state === 'visible' ? passage : entry, own, { tasks, keys })]
   })
 }
 
-function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, answers: readonly CautionedPost[], tasks: ReadonlyMap<string, string>): Hit {
+function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, answers: readonly CautionedPost[], { tasks, keys }: { tasks: HitMaterial['tasks']; keys: BalloonKeys | null }): Hit {
   // A question shows the stamps of the advice under it: the passage's, or the best there is.
   const advice = passage.kind === 'question' ? (answers.find((a) => a.stampState === 'stamped') ?? answers.find((a) => a.stampState !== 'none') ?? null) : passage
   const plain = plainText(passage)
@@ -54,6 +55,7 @@ function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, 
     stamp: advice?.stampState ?? 'none', stamps: advice ? presentStamps(advice, advice.kind === 'answer' ? entry.current.number : 0).filter((s) => s.withdrawn === undefined) : [],
     ...(ordered.advice.length > 0 ? { orderAdvice: ordered.advice } : {}), needsTwo: passage.needsTwo || entry.needsTwo, open: entry.kind === 'question' && answers.length === 0, answers: answers.length,
     outcomes: presentOutcomes(advice ?? passage), cautions: unionCautions([presentCautions(entry), presentCautions(passage), ...(advice ? [presentCautions(advice)] : []), ...ordered.posts.map(presentCautions)]),
+    balloons: keys?.(entry.current.title, plain) ?? [],
   }
 }
 

@@ -249,6 +249,10 @@ describe('Numbered screws', () => {
     expect(machineScrewDiameter(8)).toBe(0.164)
     expect([findDrill('#30')!, findDrill('#19')!].map(({ inches }) => passesScrew(inches, 8))).toEqual([false, true])
     expect(smallestDrillFor(8)?.name).toBe('#19')
+    // #4 0.112, #6 0.138, #10 0.190: Machinery's Handbook, American standard machine screws, basic major diameters.
+    expect([4, 6, 10].map(machineScrewDiameter)).toEqual([0.112, 0.138, 0.19])
+    expect(one(ask('drills', { screw: '8' }), 'screw-drill')).toMatchObject({ value: { number: 0.166, label: '#19' }, basis: 'memory' })
+    expect(named(ask('drills', {}), 'screw-drill')).toEqual([])
     expect([machineScrewDiameter(13), machineScrewDiameter(-1), machineScrewDiameter(1.5)]).toEqual([null, null, null])
   })
 })
