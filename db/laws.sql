@@ -116,7 +116,7 @@ BEGIN INSERT INTO change (post_id) VALUES (coalesce(NEW.parent_id, NEW.id)); END
 
 -- Every column but measured_by: finding a post's measurements anew is no change that others see.
 CREATE TRIGGER change_post_updated AFTER UPDATE OF
-  id, kind, parent_id, author_id, author_name, ref, state, state_reason, state_by, state_at, current_revision, stamp_state, needs_two, created_at, updated_at ON post
+  id, kind, parent_id, author_id, author_name, ref, state, state_reason, merged_into_id, state_by, state_at, current_revision, stamp_state, needs_two, created_at, updated_at ON post
 BEGIN INSERT INTO change (post_id) VALUES (coalesce(NEW.parent_id, NEW.id)); END;
 
 CREATE TRIGGER change_revision AFTER UPDATE ON revision
