@@ -1,13 +1,13 @@
 // One engine in a process of its own, started by bench-search.ts: comes up, answers what it is asked, and says how long each took.
 import { monitorEventLoopDelay } from 'node:perf_hooks'
 import { spreadOf, type Spread } from '../percentiles'
-import type { Engine, EngineTask, Start } from './engine'
+import type { Engine, EngineTask, IndexMB, Start } from './engine'
 import { startFts5 } from './fts5-engine'
 import { startMiniSearch } from './minisearch-engine'
 import { startProduct } from './product-engine'
 import type { QuestionKind } from './questions'
 
-export interface Ready { buildSeconds: number; startSeconds: number | string; fileMB: number | null; /** Resident, of the whole process; `before` without an index. */ memoryMB: { before: number; after: number; heap: number }; stallMs: number }
+export interface Ready { buildSeconds: number; startSeconds: number | string; indexMB?: IndexMB; saveSeconds?: number; fileMB: number | null; /** Resident, of the whole process; `before` without an index. */ memoryMB: { before: number; after: number; heap: number }; stallMs: number }
 export interface Asked { kind: string; ms: Spread; /** Questions that found something, of all. */ found: number }
 /** Questions at a steady rate while others write; `delaysMs`: from the end of a write elsewhere until it was found. */
 export interface WhileWriting { ms: Spread; stallMs: number; delaysMs: Spread; memoryMB: number }
@@ -26,12 +26,12 @@ async function run(task: EngineTask): Promise<void> {
   const before = residentMB()
   const loop = monitorEventLoopDelay({ resolution: 1 })
   loop.enable()
-  const { engine, buildSeconds, startSeconds } = await start(task)
+  const { engine, ...started } = await start(task)
   loop.disable()
   // What building left behind is not the index.
   globalThis.gc?.()
   process.on('message', (request: EngineRequest) => { void answer(engine, request) })
-  tell({ buildSeconds, startSeconds, fileMB: engine.fileMB ?? null, memoryMB: { before, after: residentMB(), heap: Math.round(process.memoryUsage().heapUsed / 1_048_576) }, stallMs: Math.max(0, loop.max / 1e6 - 1) } satisfies Ready)
+  tell({ ...started, fileMB: engine.fileMB ?? null, memoryMB: { before, after: residentMB(), heap: Math.round(process.memoryUsage().heapUsed / 1_048_576) }, stallMs: Math.max(0, loop.max / 1e6 - 1) } satisfies Ready)
 }
 
 function start(task: EngineTask): Promise<Start> {

@@ -13,6 +13,9 @@ export interface Engine {
 }
 
 /** How an engine came up. */
-export interface Start { engine: Engine; buildSeconds: number; /** From what was saved; a sentence when there is no such thing. */ startSeconds: number | string }
+export interface Start { engine: Engine; buildSeconds: number; /** From what was saved; a sentence when there is no such thing. */ startSeconds: number | string; indexMB?: IndexMB; saveSeconds?: number }
+
+/** What the search thread has, by its own count: after building, after starting from the snapshot, and at most while one was saved. */
+export interface IndexMB { built: number; restored: number; saving: number }
 
 export const hitsWanted = 20

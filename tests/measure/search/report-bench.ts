@@ -23,6 +23,7 @@ function rowsOf({ size, engines, whileWriting }: OfSize): Row[] {
     row('built', ({ ready }) => `${round(ready.buildSeconds)} s`),
     row('started from what was saved', ({ ready }) => start(ready.startSeconds)),
     row('memory, resident (more than without)', ({ ready: { memoryMB: { before, after } } }) => `${after} MB (${after - before})`),
+    ...indexRows(engines.find(({ engine }) => engine === 'product')).map(([what, value]) => product(what, value)),
     product('longest stall of the main thread while coming up', `${round(engines.find(({ engine }) => engine === 'product')?.ready.stallMs ?? 0)} ms`),
     ...(engines[0]?.asked ?? []).map(({ kind }, i) => row(kind, ({ asked }) => spread(asked[i]?.ms))),
     product('questions while 50 entries a second are written elsewhere', `${spread(whileWriting.ms)}, slowest ${whileWriting.ms.max}`),
@@ -33,3 +34,12 @@ function rowsOf({ size, engines, whileWriting }: OfSize): Row[] {
 }
 
 const spread = (ms: Spread | undefined): string => (ms ? `${ms.p50} / ${ms.p95} / ${ms.p99}` : '')
+
+function indexRows(engine: OfEngine | undefined): [string, string][] {
+  const { indexMB, saveSeconds, fileMB } = engine?.ready ?? {}
+  if (!indexMB) return []
+  return [
+    ['index by its own count: built / from the snapshot / at most while saving', `${Math.round(indexMB.built)} / ${Math.round(indexMB.restored)} / ${Math.round(indexMB.saving)} MB`],
+    ['snapshot: size, time to save', `${round(fileMB ?? 0)} MB, ${round(saveSeconds ?? 0)} s`],
+  ]
+}
