@@ -27,6 +27,8 @@ export const paths = {
   kits: '/kits' as Route,
   kit: (slug: string) => `/kits/${slug}` as Route,
   section: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}` as Route,
+  brief: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/brief` as Route,
+  briefPrint: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/brief/print` as Route,
   sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
   feed: '/feed.atom' as Route,
   desk: (address: { open?: number; operation?: string; section?: string } = {}) => `/desk${query(address)}` as Route,

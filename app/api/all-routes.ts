@@ -8,6 +8,7 @@ import * as answers from './entries/[id]/answers/route'
 import * as entries from './entries/route'
 import * as health from './health/route'
 import * as importing from './import/route'
+import * as brief from './kits/[kit]/sections/[section]/brief/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
@@ -42,6 +43,7 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/cautions/required': requiredCautions,
   '/api/kits': kits,
   '/api/kits/{kit}': kit,
+  '/api/kits/{kit}/sections/{section}/brief': brief,
   '/api/operations': operations,
   '/api/measurements': measurements,
   '/api/numbers-check': numbersCheck,

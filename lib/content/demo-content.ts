@@ -2,8 +2,10 @@
 import 'server-only'
 import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
+import entries3 from '@/content/demo/entries-3.json'
 import kits from '@/content/demo/kits.json'
 import members from '@/content/demo/members.json'
+import planSteps from '@/content/demo/plan-steps.json'
 import operations from '@/content/operations.json'
 import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
 
@@ -29,10 +31,13 @@ export interface DemoEntry extends DemoMarks, DemoText {
 }
 export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
 
+/** Page, step and task of each plan step of a section, in order. */
+export interface DemoPlanSteps { kit: string; section: string; revision: string; steps: [string, string, string][] }
+
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[],
-  entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
+  kits, operations, members: members as DemoMember[], planSteps: planSteps as unknown as DemoPlanSteps[],
+  entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[]), ...(entries3 as unknown as DemoEntry[])],
 }
