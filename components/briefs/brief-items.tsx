@@ -16,8 +16,7 @@ export function SizeRow({ size }: { size: BriefSize }) {
       <div className="brief-size">
         <p>{capital(size.claim)}</p>
         <p className="brief-size-value">{/^[#\d.]/u.test(size.expected) ? <DimensionText text={size.expected} /> : size.expected}</p>
-        <p className="brief-note">{isLoud ? <b>{text}. </b> : null}{[source, isLoud ? '' : text].filter(Boolean).join(' · ')} <Link href={size.url as Route}>{size.tableTitle}</Link></p>
-        <p className="brief-note">Used in <PostLinks posts={size.posts} /></p>
+        <p className="brief-note brief-size-source">{isLoud ? <b>{text}. </b> : null}{[source, isLoud ? '' : text].filter(Boolean).join(' · ')}  · <Link href={size.url as Route}>{size.tableTitle}</Link> · used in <PostLinks posts={size.posts} /></p>
       </div>
     </BriefRow>
   )

@@ -31,7 +31,7 @@ function FirstPage({ brief }: { brief: Brief }) {
       <ol className="brief-paper-order">
         {tasks.map((task) => (
           <li key={task.slug}>
-            <b>{capital(task.title)}</b> {stepWords(task.steps) ?? (order.hasBaseLine ? 'not in the plans' : '')} <CautionMention cautions={task.cautions} />
+            <b>{capital(task.title)}</b> · {stepWords(task.steps) ?? (order.hasBaseLine ? 'not in the plans' : '')} <CautionMention cautions={task.cautions} />
           </li>
         ))}
       </ol>
@@ -53,7 +53,7 @@ function SecondPage({ brief }: { brief: Brief }) {
       {items.length > 0 ? <h2>Know-how and lessons</h2> : null}
       {items.map(({ item, task, builders }) => (
         <div key={item.postId} className="brief-paper-item">
-          <p><b>{capital(task)}: {item.title}</b> {stampsOf(item)}{builders > 1 ? ` · ${builderWords(builders)} say so` : ''} <CautionMention cautions={item.cautions} /></p>
+          <p><b>{capital(task)}: {item.title}</b> · {stampsOf(item)}{builders > 1 ? ` · ${builderWords(builders)} say so` : ''} <CautionMention cautions={item.cautions} /></p>
           <p>{item.passage}</p>
         </div>
       ))}

@@ -1,8 +1,7 @@
 // Chooses what of a brief goes on its two printed pages. How much room there is stands in lib/domain/briefs/fit-print.
-import { linesOf, linesOfSecondPage, takeLines } from '@/lib/domain/briefs/fit-print'
+import { linesOf, linesOfFirstPage, linesOfSecondPage, takeLines } from '@/lib/domain/briefs/fit-print'
 import type { Brief, BriefItem, BriefSize } from '@/lib/schemas/brief'
 
-const mostTasks = 18
 const mostDepartures = 3
 const mostDisputes = 3
 const mostTools = 10
@@ -10,9 +9,13 @@ const mostTools = 10
 export interface PrintedSize { size: BriefSize; task: string }
 export interface PrintedItem { item: BriefItem; task: string; builders: number }
 
-/** Tasks with their cautions first, since a plate of every topic leaves half the page. */
-export function fitOrder({ tasks, order: { departures, disagreements } }: Brief) {
-  const fits = { tasks: tasks.slice(0, mostTasks), departures: departures.slice(0, mostDepartures), disputes: disagreements.slice(0, mostDisputes) }
+/** The plate has all the room it needs, then what was said of the order, then as many tasks as fit. */
+export function fitOrder({ cautions, tasks, order: { departures, disagreements } }: Brief) {
+  // Two columns, smaller type; half a line is lost at the end of every topic.
+  const plate = cautions.reduce((sum, c) => sum + (c.signalWord === 'WARNING' ? c.text : c.short).length / 110 + 0.5, 2)
+  const said = 2 * (Math.min(departures.length, mostDepartures) + Math.min(disagreements.length, mostDisputes))
+  const fitting = takeLines(tasks, Math.max(0, linesOfFirstPage - plate - said), (task) => linesOf(`${task.title} ${'·'.repeat(24)} ${mentions(task.cautions)}`))
+  const fits = { tasks: fitting.taken, departures: departures.slice(0, mostDepartures), disputes: disagreements.slice(0, mostDisputes) }
   return { ...fits, leftOut: tasks.length - fits.tasks.length + departures.length - fits.departures.length + disagreements.length - fits.disputes.length }
 }
 

@@ -1,8 +1,9 @@
 // What of a brief fits two printed pages, by how much room each line takes; what is left out is counted, never silently gone. Pure.
 
-/** Lines of the second page, of both A4 and Letter, at the print's size of type. */
-export const linesOfSecondPage = 50
-const charactersOfLine = 105
+/** Lines of a page, of both A4 and Letter, at the print's size of type; a title's room is off the first. */
+export const linesOfFirstPage = 58
+export const linesOfSecondPage = 62
+const charactersOfLine = 112
 
 /** Lines that a text takes; an empty one takes none. */
 export const linesOf = (text: string, extra = 0): number => (text === '' ? 0 : Math.ceil(text.length / charactersOfLine) + extra)

@@ -1,7 +1,8 @@
 // Lessons that say the same, found by the words they share. Pure; which of a group speaks for it is the caller's order.
 import { analyseText } from '../search/analyse-text'
 
-export interface Alike { id: number; title: string; text: string; builder: string }
+/** `advice`: the order that it gives, a key for each pair of tasks. */
+export interface Alike { id: number; title: string; text: string; builder: string; advice: readonly string[] }
 export interface AlikeGroup<T extends Alike> {
   /** The first of the group in the order given. */
   lead: T
@@ -13,6 +14,8 @@ export interface AlikeGroup<T extends Alike> {
 /** Shares of common words from which two say the same: of titles, or of what they say at length. */
 const alikeTitles = 0.5
 const alikeTexts = 0.34
+/** Who gives the same order needs fewer of the same words. */
+const alikeWithAdvice = 0.2
 /** Fewer words than this match by chance. */
 const leastWords = 3
 
@@ -21,7 +24,8 @@ export function groupAlike<T extends Alike>(lessons: readonly T[]): AlikeGroup<T
   const known = lessons.map((lesson) => ({ lesson, title: wordsOf(lesson.title), text: wordsOf(`${lesson.title}\n${lesson.text}`) }))
   const groupOf = known.map((_, index) => index)
   known.forEach((one, i) => known.slice(0, i).forEach((other, j) => {
-    if (sharedWords(one.title, other.title) < alikeTitles && sharedWords(one.text, other.text) < alikeTexts) return
+    const wanted = one.lesson.advice.some((pair) => other.lesson.advice.includes(pair)) ? alikeWithAdvice : alikeTexts
+    if (sharedWords(one.title, other.title) < alikeTitles && sharedWords(one.text, other.text) < wanted) return
     const [from, to] = [groupOf[i] ?? i, groupOf[j] ?? j]
     groupOf.forEach((group, k) => { if (group === Math.max(from, to)) groupOf[k] = Math.min(from, to) })
   }))

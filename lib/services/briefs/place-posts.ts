@@ -31,7 +31,7 @@ export function presentTask(task: { slug: string; title: string }, steps: readon
 /** Lessons that say the same as one, most builders first; then as they came, newest first. */
 function groupLessons(lessons: readonly BriefPost[]): BriefTask['lessons'] {
   const groups = groupAlike(lessons.map((post) => ({
-    post, id: post.found.id, title: post.found.current.title, text: plainOf(post.found), builder: builderOf({ id: post.found.author.id, name: post.found.author.name, postId: post.found.id }),
+    post, id: post.found.id, title: post.found.current.title, text: plainOf(post.found), advice: post.found.current.orderAdvice.map(({ before, after }) => `${before} ${after}`), builder: builderOf({ id: post.found.author.id, name: post.found.author.name, postId: post.found.id }),
   })))
   return groups.sort((a, b) => b.builders - a.builders).map(({ lead, others, builders }) => ({
     lead: presentItem(lead.post), builders, others: others.map((o) => presentLink(o.post)), cautions: unionCautions([lead, ...others].map((o) => cautionsOf(o.post))),
