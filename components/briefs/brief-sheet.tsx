@@ -28,7 +28,7 @@ export function BriefSheet({ brief }: { brief: Brief }) {
       {tasks.length > 0 ? (
         <>
           <StripKey hasBaseLine={order.hasBaseLine} hasDepartures={order.departures.length > 0} hasDisputes={order.disagreements.length > 0} />
-          <OrderStrip tasks={tasks} departures={order.departures.map(asLine)} straightOn={order.straightOn} bodyOf={bodyOf}
+          <OrderStrip tasks={tasks.map((t) => ({ slug: t.slug, isInPlans: t.isInPlans || !order.hasBaseLine }))} departures={order.departures.map(asLine)} straightOn={order.straightOn} bodyOf={bodyOf}
             disputes={order.disagreements.map((d) => ({ tasks: d.tasks.map((t) => t.slug), counts: d.sides.map((s) => s.builders), body: <Dispute dispute={d} /> }))} />
         </>
       ) : null}

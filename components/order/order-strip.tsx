@@ -3,6 +3,7 @@
 import { Fragment, type ReactNode } from 'react'
 import { layStrip, type LanePart, type StripLine } from '@/lib/domain/order/lay-strip'
 
+/** `isInPlans`: its hole lies on the base line, not beside it. */
 export interface StripTask { slug: string; isInPlans: boolean }
 export interface StripDispute { tasks: readonly string[]; counts: readonly number[]; body: ReactNode }
 
