@@ -1,11 +1,13 @@
 // What a section's order is made of: plan steps, order advice and debriefs; and which posts a brief is about. Slugs, numbers and ids only: text comes through cautioned-post.ts.
 import 'server-only'
-import { and, asc, desc, eq, isNull, ne, or, sql } from 'drizzle-orm'
+import { and, asc, desc, eq, isNull, ne, sql } from 'drizzle-orm'
 import { alias } from 'drizzle-orm/sqlite-core'
 import type { ReaderOrTransaction } from '../client'
 import { build, closingItem, debrief, kit, planStep, post, postSection, revision, section, task } from '../schema'
-import { isVisible } from './cautioned-post'
 import { oneOf } from './one-of'
+
+/** Visible, said so that the section's few posts are found first: by its index on state SQLite would walk through every post there is. */
+const isVisibleHere = sql`+${post.state} = 'visible'`
 
 /** Plan steps that name a task, in their order. */
 export async function listTaskSteps(reader: ReaderOrTransaction, sectionId: number) {
@@ -26,7 +28,7 @@ export async function listLessonAdvice(reader: ReaderOrTransaction, sectionIds: 
     sectionId: postSection.sectionId, postId: post.id, authorId: post.authorId, authorName: post.authorName, at: revision.createdAt, orderAdvice: revision.orderAdvice,
     hours: sql<number | string | null>`json_extract(${revision.parts}, '$.hours')`,
   }).from(postSection).innerJoin(post, eq(post.id, postSection.postId)).innerJoin(revision, and(eq(revision.postId, post.id), eq(revision.number, post.currentRevision)))
-    .where(and(oneOf(postSection.sectionId, sectionIds), isVisible, eq(post.kind, 'lesson'))).orderBy(asc(post.id))
+    .where(and(oneOf(postSection.sectionId, sectionIds), isVisibleHere, eq(post.kind, 'lesson'))).orderBy(asc(post.id))
 }
 
 /** Debriefs of these sections that were not taken back, newest first. Who told is named by number only. */
@@ -35,15 +37,17 @@ export async function listDebriefOrders(reader: ReaderOrTransaction, sectionIds:
     .innerJoin(build, eq(build.id, debrief.buildId)).where(and(oneOf(debrief.sectionId, sectionIds), isNull(debrief.undoneAt))).orderBy(desc(debrief.createdAt), desc(debrief.id))
 }
 
-const parent = alias(post, 'parent')
+const question = alias(post, 'question')
 
-/** Every visible entry of a section and every visible answer under one, newest first; `answers` counts an entry's. */
+/** Every visible entry of a section and every visible answer under one, newest first; `answers` counts an entry's. Two statements, since one with an "or" would walk through all posts. */
 export async function listBriefPosts(reader: ReaderOrTransaction, sectionId: number) {
-  return reader.select({
-    id: post.id, parentId: post.parentId, kind: post.kind, stampState: post.stampState,
-    answers: sql<number>`(select count(*) from post a where a.parent_id = ${post.id} and a.state = 'visible')`,
-  }).from(postSection).innerJoin(post, or(eq(post.id, postSection.postId), eq(post.parentId, postSection.postId))).leftJoin(parent, eq(parent.id, post.parentId))
-    .where(and(eq(postSection.sectionId, sectionId), isVisible, sql`(${parent.id} is null or ${parent.state} = 'visible')`)).orderBy(desc(post.createdAt), desc(post.id))
+  const shown = { id: post.id, parentId: post.parentId, kind: post.kind, stampState: post.stampState, createdAt: post.createdAt }
+  const entries = await reader.select(shown).from(postSection).innerJoin(post, eq(post.id, postSection.postId)).where(and(eq(postSection.sectionId, sectionId), isVisibleHere))
+  const answers = await reader.select(shown).from(postSection).innerJoin(question, eq(question.id, postSection.postId)).innerJoin(post, eq(post.parentId, question.id))
+    .where(and(eq(postSection.sectionId, sectionId), isVisibleHere, sql`+${question.state} = 'visible'`))
+  const counts = new Map<number | null, number>()
+  for (const { parentId } of answers) counts.set(parentId, (counts.get(parentId) ?? 0) + 1)
+  return [...entries, ...answers].map((row) => ({ ...row, answers: counts.get(row.id) ?? 0 })).sort((a, b) => b.createdAt - a.createdAt || b.id - a.id)
 }
 
 export async function listClosingLines(reader: ReaderOrTransaction, sectionId: number) {
