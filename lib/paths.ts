@@ -29,6 +29,8 @@ export const paths = {
   kit: (slug: string) => `/kits/${slug}` as Route,
   kitLimits: (slug: string, address: { of?: string } = {}, anchor?: string) => `/kits/${slug}/limits${query(address)}${anchor ? `#${anchor}` : ''}` as Route,
   section: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}` as Route,
+  brief: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/brief` as Route,
+  briefPrint: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/brief/print` as Route,
   sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
   feed: '/feed.atom' as Route,
   desk: (address: { open?: number; operation?: string; section?: string } = {}) => `/desk${query(address)}` as Route,

@@ -10,6 +10,7 @@ import * as health from './health/route'
 import * as importing from './import/route'
 import * as endLimit from './kits/[kit]/limits/[id]/end/route'
 import * as kitLimits from './kits/[kit]/limits/route'
+import * as brief from './kits/[kit]/sections/[section]/brief/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
@@ -48,6 +49,7 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/kits/{kit}': kit,
   '/api/kits/{kit}/limits': kitLimits,
   '/api/kits/{kit}/limits/{id}/end': endLimit,
+  '/api/kits/{kit}/sections/{section}/brief': brief,
   '/api/operations': operations,
   '/api/measurements': measurements,
   '/api/numbers-check': numbersCheck,

@@ -2,9 +2,11 @@
 import 'server-only'
 import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
+import entries3 from '@/content/demo/entries-3.json'
 import kits from '@/content/demo/kits.json'
 import limits from '@/content/demo/limits.json'
 import members from '@/content/demo/members.json'
+import planSteps from '@/content/demo/plan-steps.json'
 import operations from '@/content/operations.json'
 import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
 
@@ -31,11 +33,13 @@ export interface DemoEntry extends DemoMarks, DemoText {
 export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
 
 export interface DemoLimit { kit: string; by: string; day: number; table: string; result: string; inputs: Record<string, string>; value: { number?: string; min?: string; max?: string; words?: string }; unit: string; reference: { title: string; section: string; year: string }; note: string }
+/** Page, step and task of each plan step of a section, in order. */
+export interface DemoPlanSteps { kit: string; section: string; revision: string; steps: [string, string, string][] }
 
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[],
-  entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
+  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[], planSteps: planSteps as unknown as DemoPlanSteps[],
+  entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[]), ...(entries3 as unknown as DemoEntry[])],
 }

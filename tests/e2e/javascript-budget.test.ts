@@ -26,6 +26,7 @@ describe('JavaScript of reading pages', () => {
     ['/search', () => '/search?q=grommet+hole'],
     ['/entries/[id]', async () => (await demoEntry('demo-rib-7-edge')).url],
     ['/kits/[kit]/[section]', () => '/kits/whimbrel-2/W-3'],
+    ['/kits/[kit]/[section]/brief', () => '/kits/whimbrel-2/W-3/brief'],
     ['/kits', () => '/kits'],
     ['/kits/[kit]/limits', () => '/kits/whimbrel-2/limits'],
     ['/shop/[table]', () => '/shop/grommet?bore=3/8'],

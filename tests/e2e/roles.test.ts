@@ -41,6 +41,9 @@ const table: Record<string, () => readonly [string, readonly number[]]> = {
   'the maker’s limits': () => ['/kits/whimbrel-2/limits', everybody],
   'the limits of an unknown kit': () => ['/kits/albatross-9/limits', nobody],
   'a section': () => ['/kits/whimbrel-2/W-3', everybody],
+  'a section’s brief': () => ['/kits/whimbrel-2/W-3/brief', everybody],
+  'its two pages': () => ['/kits/whimbrel-2/W-3/brief/print', everybody],
+  'the brief of an unknown section': () => ['/kits/whimbrel-2/Z-9/brief', nobody],
   'an entry': () => [question.url, everybody],
   'its print': () => [`${question.url}/print`, everybody],
   'its revisions': () => [`/posts/${question.id}/revisions`, everybody],
@@ -201,7 +204,7 @@ test('with public reading off a visitor reads nothing but the sign-in and health
       if (answered.status === 401) expect(answered.text).not.toContain(entry.title)
       return answered.status
     }
-    for (const address of ['/', '/search?q=rib', '/kits', '/kits/whimbrel-2', '/kits/whimbrel-2/W-3', entry.url, `/entries/${entry.id}/print`, `/posts/${entry.id}/revisions`, '/people/1', '/ask', '/feed.atom', '/kits/whimbrel-2/W-3/feed.atom', '/api/search?q=rib', '/api/suggest?q=rib', '/api/entries', `/api/entries/${entry.id}`, '/api/kits', '/api/operations']) {
+    for (const address of ['/', '/search?q=rib', '/kits', '/kits/whimbrel-2', '/kits/whimbrel-2/W-3', '/kits/whimbrel-2/W-3/brief', '/api/kits/whimbrel-2/sections/W-3/brief', entry.url, `/entries/${entry.id}/print`, `/posts/${entry.id}/revisions`, '/people/1', '/ask', '/feed.atom', '/kits/whimbrel-2/W-3/feed.atom', '/api/search?q=rib', '/api/suggest?q=rib', '/api/entries', `/api/entries/${entry.id}`, '/api/kits', '/api/operations']) {
       expect([address, await status(null, address)]).toEqual([address, 401])
       expect([address, (await status('dela', address)) < 400]).toEqual([address, true])
     }

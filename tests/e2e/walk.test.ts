@@ -78,6 +78,8 @@ const table: Record<string, readonly Check[]> = {
     { page: () => `/posts/${answer}/revisions`, shows: ['answer'], within: 'page' },
   ],
   '(site)/kits/[kit]/[section]/page.tsx': [{ page: () => `/kits/whimbrel-2/${section}`, shows: ['title', 'open', 'lesson'], within: 'block' }],
+  '(site)/kits/[kit]/[section]/brief/page.tsx': [{ page: () => `/kits/whimbrel-2/${section}/brief`, shows: ['open', 'lesson', 'lessonText', 'title', 'answer'], within: 'block' }],
+  '(site)/kits/[kit]/[section]/brief/print/page.tsx': [{ page: () => `/kits/whimbrel-2/${section}/brief/print`, shows: ['title', 'answer'], within: 'page' }],
   '(site)/kits/[kit]/[section]/feed.atom/route.ts': [{ feed: () => `/kits/whimbrel-2/${section}/feed.atom`, shows: ['title', 'open', 'lesson'] }],
   '(site)/shop/page.tsx': [{ without: () => '/shop', why: 'tables only' }],
   '(site)/shop/[table]/page.tsx': [{ without: () => '/shop/grommet?bore=3/8', why: 'numbers and the cautions of the table, no post' }],
@@ -134,6 +136,7 @@ const table: Record<string, readonly Check[]> = {
   'api/preview/route.ts': [{ api: async () => { const { html } = await must(null, 'POST', '/api/preview', { body: 'Only what was sent.' }); return html }, shows: [] }],
   'api/kits/route.ts': [{ without: () => '/api/kits', why: 'kits only' }],
   'api/kits/[kit]/route.ts': [{ without: () => '/api/kits/whimbrel-2', why: 'sections only' }],
+  'api/kits/[kit]/sections/[section]/brief/route.ts': [{ api: () => get(`/api/kits/whimbrel-2/sections/${section}/brief`), shows: ['open', 'lesson', 'lessonText', 'title', 'answer'] }],
   'api/operations/route.ts': [{ without: () => '/api/operations', why: 'operations and tasks only' }],
   'api/kits/[kit]/limits/route.ts': [{ without: () => '/api/kits/whimbrel-2/limits', why: 'the maker’s values, no post' }],
   'api/kits/[kit]/limits/[id]/end/route.ts': [{ api: async () => {

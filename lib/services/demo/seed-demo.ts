@@ -10,6 +10,7 @@ import type { Renderer } from '@/lib/render/renderer'
 import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 import { seedEntry, type SeedPeople } from './seed-entry'
 import { seedLimits } from './seed-limits'
+import { seedPlanSteps } from './seed-plan-steps'
 import { seedPlaces } from './seed-places'
 
 const dayMs = 24 * 3600 * 1000
@@ -32,6 +33,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   const people = await seedPeople(database, at)
   await seedPlaces(database, at(joinedDaysAgo))
   await seedLimits(database, people, at)
+  await seedPlanSteps(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
   await keepState(database, 'complete')
   return demoContent.entries.length
