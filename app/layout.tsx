@@ -12,6 +12,7 @@ import { SearchLine } from '@/components/search/search-line'
 import { currentActor } from '@/lib/auth/current-user'
 import { fontClassNames } from '@/lib/fonts/fonts'
 import { paths } from '@/lib/paths'
+import { countNotices } from '@/lib/services/notices/count-notices'
 import { navigationFor } from './navigation'
 
 export const metadata: Metadata = { title: { default: 'Pilothole: know before you drill', template: '%s · Pilothole' }, description: 'Answers and lessons of people who build all-metal kit aeroplanes, checked by mentors.' }
@@ -21,7 +22,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   const [jar, actor] = await Promise.all([cookies(), currentActor()])
   const value = jar.get('shift')?.value
   const shift = value === 'day' || value === 'night' ? value : 'system'
-  const { rooms, bar, footer } = navigationFor(actor)
+  const { rooms, bar, footer } = navigationFor(actor, await countNotices(actor))
   return (
     <html lang="en" className={fontClassNames} data-shift={shift === 'system' ? undefined : shift}>
       <body>

@@ -16,7 +16,7 @@ export function HitList({ hits, actionFor }: { hits: readonly Hit[]; actionFor?:
     <Sheet>
       {hits.map((hit) => (
         <HitRow key={hit.id} kindLine={hitKindLine(hit)} title={hit.title} href={hit.url as Route} cautions={standing(hit)} snippet={hit.snippet} marks={hit.marks}
-          partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} action={actionFor?.(hit)} />
+          partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} planChanges={hit.planChanges} action={actionFor?.(hit)} />
       ))}
     </Sheet>
   )

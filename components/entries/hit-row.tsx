@@ -9,6 +9,7 @@ import type { StampState } from '@/lib/domain/stamps/stamp-state'
 import type { StampFace } from '@/lib/format/stamp-words'
 import { HowItWent, type HowItWentProps } from './how-it-went'
 import { MarkedSnippet } from './marked-snippet'
+import { PlanChanges, type ShownChange } from './plan-changes'
 import { PartTags, type PartTagProps } from './part-tag'
 
 export interface HitRowProps {
@@ -25,17 +26,20 @@ export interface HitRowProps {
   critical: boolean
   stamps: readonly (StampFace & { readonly id: number | string })[]
   stampState: StampState
+  /** Where a bulletin changed the plans since. */
+  planChanges: readonly ShownChange[]
   /** A next step in the row, such as a link button Tell what to do. */
   action?: ReactNode
 }
 
-export function HitRow({ kindLine, title, href, cautions, snippet, marks, partTags, outcomes, critical, stamps, stampState, action }: HitRowProps) {
+export function HitRow({ kindLine, title, href, cautions, snippet, marks, partTags, outcomes, critical, stamps, stampState, planChanges, action }: HitRowProps) {
   return (
     <article className="hit">
       <div className="hit-text">
         <p className="label">{kindLine}</p>
         <h3><Link href={href}>{title}</Link></h3>
         <CautionLine cautions={cautions} />
+        <PlanChanges changes={planChanges} brief />
         <p className="hit-snippet"><MarkedSnippet text={snippet} marks={marks} /></p>
         <div className="hit-foot">
           <PartTags items={partTags} />

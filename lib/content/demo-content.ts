@@ -4,6 +4,7 @@ import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
 import kits from '@/content/demo/kits.json'
 import members from '@/content/demo/members.json'
+import plans from '@/content/demo/plans.json'
 import operations from '@/content/operations.json'
 import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
 
@@ -29,10 +30,20 @@ export interface DemoEntry extends DemoMarks, DemoText {
 }
 export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
 
+type InSection<T> = { kit: string; section: string } & T
+export interface DemoPlans {
+  /** Page, step, revision, task. */
+  steps: InSection<{ steps: [string, string, string, string][] }>[]
+  /** Designation, length, left, right, where. */
+  hardware: InSection<{ items: [string, string, number, number, string][] }>[]
+  closing: InSection<{ items: [string, 'plans' | 'builder' | 'inspector', string][] }>[]
+  bulletins: { kit: string; by: string; day: number; number: string; issuedOn: string; serials: string; summary: string; steps: { page: string; step?: string; revision?: string }[] }[]
+}
+
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[],
+  kits, operations, members: members as DemoMember[], plans: plans as unknown as DemoPlans,
   entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
 }

@@ -31,6 +31,8 @@ export interface Acts {
   'people.set-role': { memberId: number }
   'people.set-state': { memberId: number; role: Role }
   'people.grant-mentorship': { memberId: number }
+  'kits.keep': undefined
+  'notice.close': { memberId: number }
   'import': undefined
   'account.open': undefined
 }
@@ -65,6 +67,8 @@ const rules: { [A in Act]: Rule<A> } = {
   // A moderator suspends builders; only a steward suspends those who moderate. Nobody suspends themselves.
   'people.set-state': (actor, s) => actor !== null && actor.id !== s.memberId && (isAtLeast(actor, 'steward') || (isAtLeast(actor, 'moderator') && s.role === 'member')),
   'people.grant-mentorship': (actor, s) => isAtLeast(actor, 'steward') && actor?.id !== s.memberId,
+  'kits.keep': (actor) => isAtLeast(actor, 'steward'),
+  'notice.close': (actor, notice) => actor !== null && actor.id === notice.memberId,
   'import': (actor) => isAtLeast(actor, 'steward'),
   'account.open': (actor) => actor !== null,
 }

@@ -1,7 +1,7 @@
 // Search, suggest, similar, preview and required cautions.
 import { z } from 'zod'
 import { CAUTION_TOPICS } from '@/lib/domain/cautions/rule-table'
-import { cautionSchema, outcomesSchema, stampSchema, stampStateSchema } from './post'
+import { cautionSchema, outcomesSchema, planChangeSchema, stampSchema, stampStateSchema } from './post'
 import { measurementSchema } from './measurement'
 import { shopAnswerSchema } from './shop'
 import { limits, sectionCode, slug } from './text'
@@ -43,6 +43,8 @@ export const hitSchema = z.object({
   partTags: z.array(z.object({ code: z.string().optional(), title: z.string() })),
   stamp: stampStateSchema, stamps: z.array(stampSchema), needsTwo: z.boolean(),
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
+  /** Where the plans changed under the advice shown. */
+  planChanges: z.array(planChangeSchema),
 })
 export const searchResultSchema = z.object({
   query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(measurementSchema), didYouMean: z.string().optional() }),

@@ -9,6 +9,7 @@ import { demoContent, demoPassword } from '@/lib/content/demo-content'
 import type { Renderer } from '@/lib/render/renderer'
 import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 import { seedEntry, type SeedPeople } from './seed-entry'
+import { seedPlans } from './seed-plans'
 import { seedPlaces } from './seed-places'
 
 const dayMs = 24 * 3600 * 1000
@@ -31,6 +32,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   const people = await seedPeople(database, at)
   await seedPlaces(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
+  await seedPlans(database, people, at, at(joinedDaysAgo))
   await keepState(database, 'complete')
   return demoContent.entries.length
 }
