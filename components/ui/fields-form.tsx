@@ -59,7 +59,7 @@ export function FieldsForm({ action, id, fields, button, look = 'plain', hidden 
 function PlainField({ field, id, error, value }: { field: FormField; id: string; error: string | undefined; value: string }) {
   const { name, label, kind = 'text', help, optional = false, maxLength, rows = 3, autoComplete, placeholder, options = [] } = field
   const shared = { id, name, label, error, optional, ...(help ? { help } : {}) }
-  if (kind === 'area') return <TextArea {...shared} rows={rows} maxLength={maxLength} defaultValue={value} />
+  if (kind === 'area') return <TextArea {...shared} rows={rows} maxLength={maxLength} placeholder={placeholder} defaultValue={value} />
   // The key draws it anew: a select does not follow a changed defaultValue when the form is reset after an action.
   if (kind === 'select') return <Select key={value} {...shared} defaultValue={value}>{options.map((o) => <option key={o.value} value={o.value}>{o.label}</option>)}</Select>
   return <TextField {...shared} type={kind} maxLength={maxLength} autoComplete={autoComplete} placeholder={placeholder} defaultValue={kind === 'password' ? undefined : value} />

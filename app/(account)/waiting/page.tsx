@@ -37,7 +37,7 @@ function OneNotice({ notice: { id, kind, createdAt, post, bulletin } }: { notice
       <h2 className="text-heading"><Link href={post.url as Route}>{post.title}</Link></h2>
       <CautionLine cautions={post.cautions.filter((c) => !c.waived)} />
       {bulletin ? <><PlanChanges changes={bulletin.places} kit={bulletin.kit} brief /><p>{bulletin.summary}</p></> : null}
-      <p className="text-small text-ink-soft">You go by advice under this. Its stamps are from before the change: stop at that step until you have the page in force.</p>
+      <p className="text-small text-ink-soft">You go by advice under this. Stop at that step until you have the page in force and a mentor has looked again.</p>
       <FieldsForm action={closeNoticeAction} id={`close-${id}`} hidden={{ noticeId: id }} button="I have read it" fields={[]} about={post.title} />
     </>
   )

@@ -55,7 +55,7 @@ function EnterBulletin({ kit, count }: { kit: string; count: number }) {
           { name: 'issuedOn', label: 'Date printed on it', kind: 'date' },
           { name: 'serials', label: 'Serials', maxLength: 120, placeholder: 'all, or 12 to 48', autoComplete: 'off' },
           { name: 'summary', label: 'What it changes, in one line of our own words', kind: 'area', maxLength: 300 },
-          { name: 'steps', label: 'Pages and steps, one a line', kind: 'area', rows: 4, placeholder: 'W3-2, 6, D', help: 'Page, step, revision of the page that carries the change. Without a step it is the whole page: “W3-2,,D”.' },
+          { name: 'steps', label: 'Pages and steps, one a line', kind: 'area', rows: 4, placeholder: 'W3-2, 6, D', help: 'Page, step, revision of the page that carries the change. Without a step it is the whole page: W3-2, , D.' },
         ]} />
       </div>
     </Sheet>

@@ -41,7 +41,7 @@ function Hardware({ lists: { kit, section, hardware, mayKeep } }: { lists: Lists
         <div className="relative overflow-x-auto" role="group" aria-label="Table of hardware" tabIndex={0}>
           <table className="w-full text-left">
             <caption className="sr-only">Hardware of this section, with its count per side</caption>
-            <thead className="bg-inset"><tr>{['Designation', 'Length', 'Left', 'Right', 'Where'].map((head) => <th key={head} scope="col" className="label px-4 py-3">{head}</th>)}</tr></thead>
+            <thead className="bg-inset"><tr>{['Designation', 'Length', 'Left', 'Right', 'Where'].map((head) => <th key={head} scope="col" className={`label px-4 py-3 ${head === 'Left' || head === 'Right' ? 'text-right' : ''}`}>{head}</th>)}</tr></thead>
             <tbody>
               {hardware.map((h) => (
                 <tr key={h.id} className="border-t border-line align-baseline">

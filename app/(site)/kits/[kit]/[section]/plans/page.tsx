@@ -53,15 +53,14 @@ function StepTable({ steps, kit }: { steps: readonly PlanStepLine[]; kit: string
     <div className="sheet relative overflow-x-auto" role="group" aria-label="Table of plan steps" tabIndex={0}>
       <table className="w-full text-left">
         <caption className="sr-only">Plan steps in the plans’ order</caption>
-        <thead className="bg-inset"><tr>{['Page', 'Step', 'Rev', 'What is done', 'Bulletins'].map((head) => <th key={head} scope="col" className="label px-4 py-3">{head}</th>)}</tr></thead>
+        <thead className="bg-inset"><tr>{['Page', 'Step', 'Rev', 'What is done'].map((head) => <th key={head} scope="col" className="label px-4 py-3">{head}</th>)}</tr></thead>
         <tbody>
           {steps.map((s) => (
             <tr key={s.id} className="border-t border-line align-baseline">
               <th scope="row" className="code px-4 py-3 font-bold whitespace-nowrap">{s.page}</th>
               <td className="code px-4 py-3">{s.step}</td>
               <td className="code px-4 py-3">{s.revision || <span className="text-ink-soft">not noted</span>}</td>
-              <td className="px-4 py-3">{s.task ? s.task.title : <span className="text-ink-soft">not named</span>}</td>
-              <td className="px-4 py-3">{s.changes.map((c) => <Link key={c.bulletin} className="block" href={paths.bulletins(kit, c.bulletin)}>{c.bulletin}{c.revision ? `, Rev ${c.revision}` : ''}</Link>)}</td>
+              <td className="px-4 py-3">{s.task ? s.task.title : <span className="text-ink-soft">not named</span>}{s.changes.map((c) => <Link key={c.bulletin} className="block" href={paths.bulletins(kit, c.bulletin)}>Bulletin {c.bulletin}{c.revision ? `, Rev ${c.revision}` : ''}</Link>)}</td>
             </tr>
           ))}
         </tbody>
