@@ -18,7 +18,7 @@ let question: Published
 let open: Published
 let lesson: Published
 let answer: number
-/** Of odile's, about a lesson whose title has the lesson's word: a bulletin changed its page. */
+/** Of ife's, about a lesson whose title has the lesson's word: a bulletin changed its page. */
 let notice: number
 let cautions: Record<Word, Caution[]>
 const author: Who = 'marit'
@@ -35,9 +35,9 @@ beforeAll(async () => {
   await stampIt('jory', answer)
   await stampIt('tobias', answer)
   const followed = await publish(author, { kind: 'lesson', title: `Belt page ${word.lesson}`, section, text: 'Anchors first, by the page.', plans: [{ page: 'ZW-1', step: '1' }] })
-  await must('odile', 'PUT', `/api/posts/${followed.id}/reliance`, {})
+  for (const follower of ['odile', 'ife'] as const) await must(follower, 'PUT', `/api/posts/${followed.id}/reliance`, {})
   await enterBulletin({ number: 'SB-walk', steps: 'ZW-1, 1, B' })
-  notice = (await must('odile', 'GET', '/api/notices')).items[0].id
+  notice = (await must('ife', 'GET', '/api/notices')).items.find((n: { post: { id: number } }) => n.post.id === followed.id).id
   const entry = await must(null, 'GET', `/api/entries/${question.id}`)
   const ofOpen = (await must(null, 'GET', `/api/entries/${open.id}`)).cautions
   const ofLesson = (await must(null, 'GET', `/api/entries/${lesson.id}`)).cautions
@@ -137,7 +137,7 @@ const table: Record<string, readonly Check[]> = {
   'api/cautions/required/route.ts': [{ api: () => must(null, 'POST', '/api/cautions/required', { body: word.openText, kit: 'whimbrel-2', sections: [section] }), shows: [] }],
   'api/preview/route.ts': [{ api: async () => { const { html } = await must(null, 'POST', '/api/preview', { body: 'Only what was sent.' }); return html }, shows: [] }],
   'api/notices/route.ts': [{ api: () => must('odile', 'GET', '/api/notices'), shows: ['lesson'] }],
-  'api/notices/[id]/close/route.ts': [{ api: () => must('odile', 'POST', `/api/notices/${notice}/close`, {}), shows: ['lesson'] }],
+  'api/notices/[id]/close/route.ts': [{ api: () => must('ife', 'POST', `/api/notices/${notice}/close`, {}), shows: ['lesson'] }],
   'api/kits/route.ts': [{ without: () => '/api/kits', why: 'kits only' }],
   'api/kits/[kit]/route.ts': [{ without: () => '/api/kits/whimbrel-2', why: 'sections only' }],
   'api/operations/route.ts': [{ without: () => '/api/operations', why: 'operations and tasks only' }],
