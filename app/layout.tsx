@@ -14,6 +14,7 @@ import { currentActor } from '@/lib/auth/current-user'
 import { readerUnits } from '@/lib/auth/reader-units'
 import { fontClassNames } from '@/lib/fonts/fonts'
 import { paths } from '@/lib/paths'
+import { countNotices } from '@/lib/services/notices/count-notices'
 import { navigationFor } from './navigation'
 import { keepUnitsAction } from './units-action'
 
@@ -24,7 +25,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   const [jar, actor, units] = await Promise.all([cookies(), currentActor(), readerUnits()])
   const value = jar.get('shift')?.value
   const shift = value === 'day' || value === 'night' ? value : 'system'
-  const { rooms, bar, footer } = navigationFor(actor)
+  const { rooms, bar, footer } = navigationFor(actor, await countNotices(actor))
   return (
     <html lang="en" className={fontClassNames} data-shift={shift === 'system' ? undefined : shift} data-units={units === 'written' ? undefined : units}>
       <body>

@@ -14,6 +14,8 @@ import * as brief from './kits/[kit]/sections/[section]/brief/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
+import * as notices from './notices/route'
+import * as closeNotice from './notices/[id]/close/route'
 import * as numbersCheck from './numbers-check/route'
 import * as operations from './operations/route'
 import * as outcome from './posts/[id]/outcome/route'
@@ -51,6 +53,8 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/kits/{kit}/limits/{id}/end': endLimit,
   '/api/kits/{kit}/sections/{section}/brief': brief,
   '/api/operations': operations,
+  '/api/notices': notices,
+  '/api/notices/{id}/close': closeNotice,
   '/api/measurements': measurements,
   '/api/numbers-check': numbersCheck,
   '/api/shop': shop,

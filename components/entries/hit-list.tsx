@@ -16,7 +16,7 @@ export function HitList({ hits, balloons = [], actionFor }: { hits: readonly Hit
     <Sheet>
       {hits.map((hit) => (
         <HitRow key={hit.id} kindLine={hitKindLine(hit)} title={hit.title} href={hit.url as Route} cautions={standing(hit)} snippet={hit.snippet} marks={hit.marks}
-          orderAdvice={hit.orderAdvice} partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} action={actionFor?.(hit)}
+          orderAdvice={hit.orderAdvice} partTags={hit.partTags} outcomes={hit.outcomes} critical={hit.needsTwo} stamps={hit.stamps} stampState={hit.stamp} planChanges={hit.planChanges} action={actionFor?.(hit)}
           anchor={hitAnchor(hit)} balloons={hit.balloons.flatMap((n) => balloons.find((balloon) => balloon.n === n) ?? [])} />
       ))}
     </Sheet>

@@ -11,6 +11,7 @@ import type { StampFace } from '@/lib/format/stamp-words'
 import { orderWords, type ShownAdvice } from '@/lib/format/order-words'
 import { HowItWent, type HowItWentProps } from './how-it-went'
 import { MarkedSnippet } from './marked-snippet'
+import { PlanChanges, type ShownChange } from './plan-changes'
 import { PartTags, type PartTagProps } from './part-tag'
 
 export interface HitRowProps {
@@ -33,11 +34,13 @@ export interface HitRowProps {
   balloons?: readonly { readonly n: number; readonly label: string }[] | undefined
   /** To be jumped to from elsewhere on the page. */
   anchor?: string | undefined
+  /** Where a bulletin changed the plans since. */
+  planChanges: readonly ShownChange[]
   /** A next step in the row, such as a link button Tell what to do. */
   action?: ReactNode
 }
 
-export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderAdvice, partTags, outcomes, critical, stamps, stampState, balloons = [], anchor, action }: HitRowProps) {
+export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderAdvice, partTags, outcomes, critical, stamps, stampState, planChanges, balloons = [], anchor, action }: HitRowProps) {
   return (
     <article className={balloons.length > 0 ? 'hit hit-keyed' : 'hit'} id={anchor}>
       {balloons.length > 0 ? <div className="hit-balloons">{balloons.map(({ n, label }) => <BalloonNumber key={n} n={n} label={`About ${n}, ${midSentence(label)}`} />)}</div> : null}
@@ -46,6 +49,7 @@ export function HitRow({ kindLine, title, href, cautions, snippet, marks, orderA
         <h3><Link href={href}>{title}</Link></h3>
         <CautionLine cautions={cautions} />
         {orderAdvice ? <p className="hit-order"><span className="label">Order advice</span> <b>{orderWords(orderAdvice)}</b></p> : null}
+        <PlanChanges changes={planChanges} brief />
         <p className="hit-snippet"><MarkedSnippet text={snippet} marks={marks} /></p>
         <div className="hit-foot">
           <PartTags items={partTags} />

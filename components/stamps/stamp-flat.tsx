@@ -6,7 +6,7 @@ import type { StampProps } from './stamp-octagon'
 
 export function StampFlat({ stamp, state }: StampProps) {
   const condition = stampCondition(stamp, state)
-  const note = stampNote(condition)
+  const note = stampNote(condition, stamp.bulletin)
   const line = `${basisLines(stamp.basis).join(' ')} · ${stamp.mentor.mark} · Rev ${stamp.revision}`
   const standing = condition === 'live' || condition === 'in-question'
   return (

@@ -13,7 +13,7 @@ export interface StampProps {
 
 export function StampOctagon({ stamp, state }: StampProps) {
   const condition = stampCondition(stamp, state)
-  const note = stampNote(condition)
+  const note = stampNote(condition, stamp.bulletin)
   const [first, second] = basisLines(stamp.basis)
   const standing = condition === 'live' || condition === 'in-question'
   return (

@@ -11,6 +11,7 @@ declare const cautioned: unique symbol
 type Row<T extends { $inferSelect: object }> = T['$inferSelect']
 
 export interface PersonName { id: number | null; name: string }
+export interface KitBulletin { id: number; number: string; enteredAt: number; steps: { page: string; step: string | null; revision: string }[] }
 export interface SectionOfPost { code: string; title: string; jasc: string | null }
 
 /** A post with its current text. The brand can only be given here, so no query can hand out text without cautions. */
@@ -39,6 +40,12 @@ export interface CautionedPost {
   outcomes: { memberId: number; author: string; revision: number; result: Row<typeof outcome>['result']; note: string; createdAt: number }[]
   goingByThis: number
   remarks: { id: number; author: PersonName; body: string; createdAt: number }[]
+  /** Of an answer: its question's state and current revision; null for an entry. */
+  question: { state: Row<typeof post>['state']; currentRevision: number } | null
+  /** Plans pages and steps that it is about; an answer's are its question's. */
+  plans: Row<typeof revision>['plans']
+  /** Bulletins of its kit. */
+  bulletins: KitBulletin[]
   /** The rendered text without its marks; null while it is missing. */
   plain: string | null
   /** The HTML too; null while it is missing, and where it was not asked for. */
@@ -90,6 +97,7 @@ function prepareLoad(reader: ReaderOrTransaction) {
   return reader.query.post.findMany({
     where: oneOf(post.id, sql.placeholder('ids')),
     with: {
+      parent: { columns: { state: true, currentRevision: true }, with: { current: { columns: { kitId: true, plans: true } } } },
       author: name, current: { with: { kit: { columns: { slug: true, name: true, maker: true } } } },
       placed: { columns: { position: true }, with: { section: { columns: { code: true, title: true, jasc: true } } } },
       revisions: { columns: { number: true, authorId: true, authorName: true, createdAt: true }, with: { author: name } },
@@ -100,18 +108,27 @@ function prepareLoad(reader: ReaderOrTransaction) {
   }).prepare()
 }
 
-type Loaded = Awaited<ReturnType<ReturnType<typeof prepareLoad>['execute']>>[number]
-const prepared = new WeakMap<ReaderOrTransaction, ReturnType<typeof prepareLoad>>()
+/** Every bulletin there is: a steward's list, short enough to be read whole and cheaper than asking once a post. */
+function prepareBulletins(reader: ReaderOrTransaction) {
+  return reader.query.bulletin.findMany({ columns: { id: true, kitId: true, number: true, createdAt: true }, with: { steps: { columns: { page: true, step: true, revision: true } } } }).prepare()
+}
 
-function preparedLoad(reader: ReaderOrTransaction): ReturnType<typeof prepareLoad> {
-  const known = prepared.get(reader) ?? prepareLoad(reader)
+type Loaded = Awaited<ReturnType<ReturnType<typeof prepareLoad>['execute']>>[number]
+interface Prepared { load: ReturnType<typeof prepareLoad>; bulletins: ReturnType<typeof prepareBulletins> }
+const prepared = new WeakMap<ReaderOrTransaction, Prepared>()
+
+function preparedFor(reader: ReaderOrTransaction): Prepared {
+  const known = prepared.get(reader) ?? { load: prepareLoad(reader), bulletins: prepareBulletins(reader) }
   prepared.set(reader, known)
   return known
 }
 
 async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTransaction, ids: readonly number[], wanted: Wanted): Promise<void> {
   if (ids.length === 0) return
-  const loaded = await preparedLoad(reader).execute({ ids: JSON.stringify(ids), mostMeasurements: wanted === 'html' ? noLimit : 0 })
+  const { load, bulletins } = preparedFor(reader)
+  const loaded = await load.execute({ ids: JSON.stringify(ids), mostMeasurements: wanted === 'html' ? noLimit : 0 })
+  const byKit = new Map<number, KitBulletin[]>()
+  for (const { kitId, createdAt: enteredAt, ...b } of await bulletins.execute()) byKit.set(kitId, [...(byKit.get(kitId) ?? []), { ...b, enteredAt }])
   // A rendering belongs to one revision and never changes, so it may be read a moment later.
   const keys = loaded.map((row) => renderingKey(row.id, row.currentRevision))
   const renderings = wanted === 'html' ? await listRenderings(reader, keys) : []
@@ -119,14 +136,15 @@ async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTrans
   const plain = new Map((wanted === 'html' ? renderings : await listPlainTexts(reader, keys)).map((r) => [r.key, r.plain]))
   for (const row of loaded) {
     const key = renderingKey(row.id, row.currentRevision)
-    found.set(row.id, caution(row, plain.get(key) ?? null, whole.get(key) ?? null))
+    found.set(row.id, caution(row, byKit, plain.get(key) ?? null, whole.get(key) ?? null))
   }
 }
 
 /** Gives the brand: the one place that may. */
-function caution(row: Loaded, plain: string | null, kept: Row<typeof rendering> | null): CautionedPost {
-  const { author, authorName, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, measurements, ...own } = row
+function caution(row: Loaded, bulletinsByKit: ReadonlyMap<number, KitBulletin[]>, plain: string | null, kept: Row<typeof rendering> | null): CautionedPost {
+  const { author, authorName, parent, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, measurements, ...own } = row
   const { id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt, measuredBy } = own
+  const about = parent?.current ?? current
   const history = [...revisions].sort((a, b) => a.number - b.number)
   return {
     id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt, author: person(row.authorId, author, authorName),
@@ -137,6 +155,8 @@ function caution(row: Loaded, plain: string | null, kept: Row<typeof rendering> 
     outcomes: [...outcomes].sort((a, b) => a.createdAt - b.createdAt).map(({ member: teller, memberId, revision: number, result, note, createdAt: at }) => ({ memberId, author: teller.name, revision: number, result, note, createdAt: at })),
     goingByThis: reliances.length,
     remarks: [...remarks].sort(byId).map((r) => ({ id: r.id, author: person(r.authorId, r.author, r.authorName), body: r.body, createdAt: r.createdAt })),
+    question: parent ? { state: parent.state, currentRevision: parent.currentRevision } : null,
+    plans: about.plans, bulletins: (about.kitId === null ? undefined : bulletinsByKit.get(about.kitId)) ?? [],
     plain, rendering: kept, measuredBy, measurements: measurements.map((m) => m.found),
   } as unknown as CautionedPost
 }

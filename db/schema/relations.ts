@@ -2,12 +2,13 @@
 // foreign keys and laws stand with the tables.
 import { relations } from 'drizzle-orm'
 import { postCaution } from './cautions'
-import { kit, section } from './kits'
+import { bulletin, bulletinStep, kit, section } from './kits'
 import { member } from './people'
 import { measurement, outcome, post, postSection, reliance, remark, revision } from './posts'
 import { stamp } from './stamps'
 
 export const postRelations = relations(post, ({ one, many }) => ({
+  parent: one(post, { relationName: 'parent', fields: [post.parentId], references: [post.id] }),
   author: one(member, { fields: [post.authorId], references: [member.id] }),
   current: one(revision, { relationName: 'current', fields: [post.id, post.currentRevision], references: [revision.postId, revision.number] }),
   revisions: many(revision, { relationName: 'history' }),
@@ -47,4 +48,8 @@ export const remarkRelations = relations(remark, ({ one }) => ({
 }))
 export const measurementRelations = relations(measurement, ({ one }) => ({
   post: one(post, { fields: [measurement.postId], references: [post.id] }),
+}))
+export const bulletinRelations = relations(bulletin, ({ many }) => ({ steps: many(bulletinStep) }))
+export const bulletinStepRelations = relations(bulletinStep, ({ one }) => ({
+  bulletin: one(bulletin, { fields: [bulletinStep.bulletinId], references: [bulletin.id] }),
 }))

@@ -7,6 +7,7 @@ import kits from '@/content/demo/kits.json'
 import limits from '@/content/demo/limits.json'
 import members from '@/content/demo/members.json'
 import planSteps from '@/content/demo/plan-steps.json'
+import plans from '@/content/demo/plans.json'
 import operations from '@/content/operations.json'
 import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
 
@@ -35,11 +36,20 @@ export interface DemoMember { key: string; name: string; email: string; role: 'm
 export interface DemoLimit { kit: string; by: string; day: number; table: string; result: string; inputs: Record<string, string>; value: { number?: string; min?: string; max?: string; words?: string }; unit: string; reference: { title: string; section: string; year: string }; note: string }
 /** Page, step and task of each plan step of a section, in order. */
 export interface DemoPlanSteps { kit: string; section: string; revision: string; steps: [string, string, string][] }
+type InSection<T> = { kit: string; section: string } & T
+export interface DemoPlans {
+  /** Page, step, revision, task. */
+  steps: InSection<{ steps: [string, string, string, string][] }>[]
+  /** Designation, length, left, right, where. */
+  hardware: InSection<{ items: [string, string, number, number, string][] }>[]
+  closing: InSection<{ items: [string, 'plans' | 'builder' | 'inspector', string][] }>[]
+  bulletins: { kit: string; by: string; day: number; number: string; issuedOn: string; serials: string; summary: string; steps: { page: string; step?: string; revision?: string }[] }[]
+}
 
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[], planSteps: planSteps as unknown as DemoPlanSteps[],
+  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[], planSteps: planSteps as unknown as DemoPlanSteps[], plans: plans as unknown as DemoPlans,
   entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[]), ...(entries3 as unknown as DemoEntry[])],
 }

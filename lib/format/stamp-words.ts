@@ -16,12 +16,15 @@ export interface StampFace {
   readonly scope?: ReplyScope | null | undefined
   readonly createdAt: Moment
   readonly withdrawn?: { readonly at: Moment, readonly reason: string } | null | undefined
+  /** Number of the bulletin that changed its step since. */
+  readonly bulletin?: string | undefined
   readonly live: boolean
 }
 
 /** Which of its looks a stamp has on a post in `state`: taken back, across which a question stands, no longer binding, or live. */
 export function stampCondition(stamp: StampFace, state: StampState): StampCondition {
   if (stamp.withdrawn) return 'withdrawn'
+  if (stamp.bulletin !== undefined) return 'plans-changed'
   if (!stamp.live) return state === 'plans-changed' ? 'plans-changed' : 'lapsed'
   if (state === 'plans-changed' || state === 'in-question') return state
   return 'live'
@@ -35,7 +38,8 @@ const notes: Record<Exclude<StampCondition, 'live'>, string> = {
 }
 
 /** The line at the foot of a stamp that no longer stands as pressed; null when it does. */
-export function stampNote(condition: StampCondition): string | null {
+export function stampNote(condition: StampCondition, bulletin?: string): string | null {
+  if (condition === 'plans-changed' && bulletin !== undefined) return `Plans changed: ${bulletin}`
   return condition === 'live' ? null : notes[condition]
 }
 
@@ -43,7 +47,7 @@ function conditionSentence(stamp: StampFace, condition: StampCondition): string 
   switch (condition) {
     case 'live': return ''
     case 'lapsed': return ' Lapsed: the text changed since.'
-    case 'plans-changed': return ' The plans changed since.'
+    case 'plans-changed': return stamp.bulletin === undefined ? ' The plans changed since.' : ` The plans changed since, by bulletin ${stamp.bulletin}.`
     case 'in-question': return ' In question: it did not work for a builder, a mentor has to look again.'
     case 'withdrawn': return stamp.withdrawn ? ` Withdrawn on ${formatFullDate(stamp.withdrawn.at)}: ${stamp.withdrawn.reason}` : ''
   }

@@ -33,6 +33,8 @@ export interface Acts {
   'people.set-state': { memberId: number; role: Role }
   'people.grant-mentorship': { memberId: number }
   'kit.set-limits': undefined
+  'kits.keep': undefined
+  'notice.close': { memberId: number }
   'import': undefined
   'account.open': undefined
 }
@@ -69,6 +71,8 @@ const rules: { [A in Act]: Rule<A> } = {
   'people.set-state': (actor, s) => actor !== null && actor.id !== s.memberId && (isAtLeast(actor, 'steward') || (isAtLeast(actor, 'moderator') && s.role === 'member')),
   'people.grant-mentorship': (actor, s) => isAtLeast(actor, 'steward') && actor?.id !== s.memberId,
   'kit.set-limits': (actor) => isAtLeast(actor, 'steward'),
+  'kits.keep': (actor) => isAtLeast(actor, 'steward'),
+  'notice.close': (actor, notice) => actor !== null && actor.id === notice.memberId,
   'import': (actor) => isAtLeast(actor, 'steward'),
   'account.open': (actor) => actor !== null,
 }

@@ -23,6 +23,8 @@ export const whyNot: Record<Act, string> = {
   'people.set-state': 'Moderators suspend builders, stewards anyone but themselves.',
   'people.grant-mentorship': 'Mentorship is granted by a steward to somebody else.',
   'kit.set-limits': 'Stewards enter and end the kit maker’s limits.',
+  'kits.keep': 'Stewards keep plan steps, lists and bulletins.',
+  'notice.close': 'What waits for somebody is theirs to close.',
   'import': 'Stewards import.',
   'account.open': 'Sign in to see your account.',
 }

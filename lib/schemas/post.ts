@@ -19,7 +19,9 @@ export const cautionSchema = z.object({
 export const stampSchema = z.object({
   id: z.int(), revision: z.string(), mentor: z.object({ id: z.int(), mark: z.string() }), basis: basisSchema, reference: z.string(),
   plansRevision: z.string().optional(), scope: replyScopeSchema.optional(), conflictReason: z.string().optional(), createdAt: isoMoment,
-  withdrawn: z.object({ at: isoMoment, reason: z.string() }).optional(), live: z.boolean(),
+  withdrawn: z.object({ at: isoMoment, reason: z.string() }).optional(),
+  /** Number of the bulletin that changed its step after it was pressed; such a stamp is not live. */
+  bulletin: z.string().optional(), live: z.boolean(),
 })
 export const outcomeItemSchema = z.object({ author: person, revision: z.string(), result: resultSchema, note: z.string(), createdAt: isoMoment })
 export const outcomesSchema = z.object({
@@ -29,10 +31,13 @@ export const remarkSchema = z.object({ id: z.int(), author: person, html: z.stri
 export const plansReferenceSchema = z.object({ page: z.string(), step: z.string().optional(), revision: z.string().optional() })
 export const orderAdviceSchema = z.object({ before: z.string(), after: z.string() })
 
+/** A page or step that a bulletin changed after the text was written and looked at. */
+export const planChangeSchema = z.object({ bulletin: z.string(), page: z.string(), step: z.string().optional(), revision: z.string().optional() })
+
 const postShape = {
   id: z.int(), kind: z.enum(['question', 'lesson', 'answer']), parentId: z.int().optional(), ref: z.string().optional(), revision: z.string(), author: person,
   createdAt: isoMoment, updatedAt: isoMoment, html: z.string(), text: z.string(), measurements: z.array(measurementSchema),
-  cautions: z.array(cautionSchema), stamp: stampStateSchema, missing: z.enum(['first', 'second', 'firm-basis']).nullable(), stamps: z.array(stampSchema), needsTwo: z.boolean(),
+  cautions: z.array(cautionSchema), planChanges: z.array(planChangeSchema), stamp: stampStateSchema, missing: z.enum(['first', 'second', 'firm-basis']).nullable(), stamps: z.array(stampSchema), needsTwo: z.boolean(),
   outcomes: outcomesSchema, goingByThis: z.int(), remarks: z.array(remarkSchema),
   revisions: z.array(z.object({ revision: z.string(), author: person, createdAt: isoMoment })),
   state: z.enum(['visible', 'hidden', 'merged', 'withdrawn']),
@@ -47,6 +52,7 @@ export const entrySchema = z.object({
 })
 
 export type Caution = z.infer<typeof cautionSchema>
+export type PlanChange = z.infer<typeof planChangeSchema>
 export type Stamp = z.infer<typeof stampSchema>
 export type Outcomes = z.infer<typeof outcomesSchema>
 export type Remark = z.infer<typeof remarkSchema>

@@ -1,7 +1,7 @@
 // Search, suggest, similar, preview and required cautions.
 import { z } from 'zod'
 import { CAUTION_TOPICS } from '@/lib/domain/cautions/rule-table'
-import { cautionSchema, outcomesSchema, stampSchema, stampStateSchema } from './post'
+import { cautionSchema, outcomesSchema, planChangeSchema, stampSchema, stampStateSchema } from './post'
 import { measurementSchema } from './measurement'
 import { shopAnswerSchema } from './shop'
 import { limits, sectionCode, slug } from './text'
@@ -46,6 +46,8 @@ export const hitSchema = z.object({
   orderAdvice: z.array(z.object({ postId: z.int(), before: z.string(), after: z.string() })).optional(),
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
   balloons: z.array(z.int()).describe('Numbers of the balloons of computed[0] that the passage speaks of, most about first; empty without a computed answer.'),
+  /** Where the plans changed under the advice shown. */
+  planChanges: z.array(planChangeSchema),
 })
 export const searchResultSchema = z.object({
   query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(measurementSchema), didYouMean: z.string().optional() }),

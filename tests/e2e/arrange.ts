@@ -1,5 +1,6 @@
 // What a journey finds when it begins: entries and rows published through the API by those who write them, everything defaulted.
 import type { Page } from 'playwright-core'
+import { openPage, visit } from '../support/browser'
 import { must, type Who } from '../support/session'
 
 export interface Published { id: number; url: string; title: string }
@@ -7,14 +8,14 @@ let made = 0
 /** A word that stands in no other text, so that a search finds this test's entry alone. */
 export const unique = (): string => `zq${Date.now().toString(36)}${(++made).toString(36)}`
 
-interface EntryWords { title?: string; section?: string; kind?: 'question' | 'lesson'; text?: string; tasks?: string[] }
+interface EntryWords { title?: string; section?: string; kind?: 'question' | 'lesson'; text?: string; tasks?: string[]; plans?: { page: string; step?: string; revision?: string }[] }
 
 /** Section W-3 is on a critical system (wing ribs, JASC 5712); X-1 is on none. */
-export async function publish(who: Who, { title = `Rib 7 flange hole ${unique()}`, section = 'W-3', kind = 'question', text = 'Fitting rib 7 to the spar.', tasks = [] }: EntryWords = {}): Promise<Published> {
+export async function publish(who: Who, { title = `Rib 7 flange hole ${unique()}`, section = 'W-3', kind = 'question', text = 'Fitting rib 7 to the spar.', tasks = [], plans = [] }: EntryWords = {}): Promise<Published> {
   const place = { kit: 'whimbrel-2', sections: [section], tasks }
   const { cautions } = await must(who, 'POST', '/api/cautions/required', { title, body: text, ...place })
   const entry = await must(who, 'POST', '/api/entries', {
-    kind, title, ...place, parts: kind === 'question' ? { doing: text } : { happened: text }, acknowledgedCautions: cautions.map((c: { code: string }) => c.code),
+    kind, title, ...place, plans, parts: kind === 'question' ? { doing: text } : { happened: text }, acknowledgedCautions: cautions.map((c: { code: string }) => c.code),
   })
   return { id: entry.id, url: `/entries/${entry.id}`, title }
 }
@@ -53,4 +54,18 @@ export async function demoEntry(ref: string): Promise<Published & { entry: any }
     cursor = page.nextCursor
   }
   throw new Error(`The demo has no ${ref}`)
+}
+
+/** The steward enters a bulletin of the Whimbrel 2 through the form. */
+export async function enterBulletin({ number, steps, width }: { number: string; steps: string; width?: 1360 | 390 }): Promise<Page> {
+  const page = await openPage({ as: 'wren', ...(width === undefined ? {} : { width }) })
+  await visit(page, '/kits/whimbrel-2/bulletins')
+  await page.getByLabel('Number', { exact: true }).fill(number)
+  await page.getByLabel('Date printed on it').fill('2026-11-20')
+  await page.getByLabel('Serials').fill('all')
+  await page.getByLabel(/What it changes/).fill('The hole in this step is one size larger.')
+  await page.getByLabel('Pages and steps, one a line').fill(steps)
+  await page.getByRole('button', { name: 'Enter the bulletin' }).click()
+  await page.getByRole('heading', { name: `Bulletin ${number}` }).waitFor()
+  return page
 }

@@ -29,6 +29,8 @@ describe('JavaScript of reading pages', () => {
     ['/kits/[kit]/[section]/brief', () => '/kits/whimbrel-2/W-3/brief'],
     ['/kits', () => '/kits'],
     ['/kits/[kit]/limits', () => '/kits/whimbrel-2/limits'],
+    ['/kits/[kit]/[section]/plans', () => '/kits/whimbrel-2/W-4/plans'],
+    ['/kits/[kit]/bulletins', () => '/kits/whimbrel-2/bulletins'],
     ['/shop/[table]', () => '/shop/grommet?bore=3/8'],
   ])('%s loads at most 175 kB', async (name, address) => {
     const { bytes, texts } = await scriptsOf(await address())

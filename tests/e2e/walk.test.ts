@@ -6,7 +6,7 @@ import type { Page } from 'playwright-core'
 import { beforeAll, describe, expect, test } from 'vitest'
 import { openPage, visit } from '../support/browser'
 import { call, idOf, must, type Who } from '../support/session'
-import { acknowledgeAll, publish, say, stampIt, unique, type Published } from './arrange'
+import { acknowledgeAll, enterBulletin, publish, say, stampIt, unique, type Published } from './arrange'
 
 interface Caution { code: string; signalWord: string; title: string; short: string; text: string; topic: string }
 /** The words by which this test's texts are known wherever they turn up. `open` is an open question, `title` one with a stamped row. */
@@ -18,6 +18,8 @@ let question: Published
 let open: Published
 let lesson: Published
 let answer: number
+/** Of ife's, about a lesson whose title has the lesson's word: a bulletin changed its page. */
+let notice: number
 let cautions: Record<Word, Caution[]>
 const author: Who = 'marit'
 
@@ -32,6 +34,10 @@ beforeAll(async () => {
   lesson = await publish(author, { kind: 'lesson', title: `Belt order ${word.lesson}`, section, text: `Anchors first ${word.lessonText}.` })
   await stampIt('jory', answer)
   await stampIt('tobias', answer)
+  const followed = await publish(author, { kind: 'lesson', title: `Belt page ${word.lesson}`, section, text: 'Anchors first, by the page.', plans: [{ page: 'ZW-1', step: '1' }] })
+  for (const follower of ['odile', 'ife'] as const) await must(follower, 'PUT', `/api/posts/${followed.id}/reliance`, {})
+  await enterBulletin({ number: 'SB-walk', steps: 'ZW-1, 1, B' })
+  notice = (await must('ife', 'GET', '/api/notices')).items.find((n: { post: { id: number } }) => n.post.id === followed.id).id
   const entry = await must(null, 'GET', `/api/entries/${question.id}`)
   const ofOpen = (await must(null, 'GET', `/api/entries/${open.id}`)).cautions
   const ofLesson = (await must(null, 'GET', `/api/entries/${lesson.id}`)).cautions
@@ -81,6 +87,10 @@ const table: Record<string, readonly Check[]> = {
   '(site)/kits/[kit]/[section]/brief/page.tsx': [{ page: () => `/kits/whimbrel-2/${section}/brief`, shows: ['open', 'lesson', 'lessonText', 'title', 'answer'], within: 'block' }],
   '(site)/kits/[kit]/[section]/brief/print/page.tsx': [{ page: () => `/kits/whimbrel-2/${section}/brief/print`, shows: ['title', 'answer'], within: 'page' }],
   '(site)/kits/[kit]/[section]/feed.atom/route.ts': [{ feed: () => `/kits/whimbrel-2/${section}/feed.atom`, shows: ['title', 'open', 'lesson'] }],
+  '(site)/kits/[kit]/[section]/plans/page.tsx': [{ without: () => `/kits/whimbrel-2/${section}/plans`, why: 'pages, steps and tasks, no post' }],
+  '(site)/kits/[kit]/[section]/lists/page.tsx': [{ without: () => `/kits/whimbrel-2/${section}/lists`, why: 'hardware and closing items, no post' }],
+  '(site)/kits/[kit]/bulletins/page.tsx': [{ without: () => '/kits/whimbrel-2/bulletins', why: 'bulletins in one line each, no post' }],
+  '(account)/waiting/page.tsx': [{ page: () => '/waiting', as: 'odile', shows: ['lesson'], within: 'block' }],
   '(site)/shop/page.tsx': [{ without: () => '/shop', why: 'tables only' }],
   '(site)/shop/[table]/page.tsx': [{ without: () => '/shop/grommet?bore=3/8', why: 'numbers and the cautions of the table, no post' }],
   '(site)/shop/drills/chart/page.tsx': [{ without: () => '/shop/drills/chart', why: 'a chart' }],
@@ -134,6 +144,8 @@ const table: Record<string, readonly Check[]> = {
   'api/posts/[id]/reliance/route.ts': [{ api: () => must('dela', 'PUT', `/api/posts/${lesson.id}/reliance`, {}), shows: [] }],
   'api/cautions/required/route.ts': [{ api: () => must(null, 'POST', '/api/cautions/required', { body: word.openText, kit: 'whimbrel-2', sections: [section] }), shows: [] }],
   'api/preview/route.ts': [{ api: async () => { const { html } = await must(null, 'POST', '/api/preview', { body: 'Only what was sent.' }); return html }, shows: [] }],
+  'api/notices/route.ts': [{ api: () => must('odile', 'GET', '/api/notices'), shows: ['lesson'] }],
+  'api/notices/[id]/close/route.ts': [{ api: () => must('ife', 'POST', `/api/notices/${notice}/close`, {}), shows: ['lesson'] }],
   'api/kits/route.ts': [{ without: () => '/api/kits', why: 'kits only' }],
   'api/kits/[kit]/route.ts': [{ without: () => '/api/kits/whimbrel-2', why: 'sections only' }],
   'api/kits/[kit]/sections/[section]/brief/route.ts': [{ api: () => get(`/api/kits/whimbrel-2/sections/${section}/brief`), shows: ['open', 'lesson', 'lessonText', 'title', 'answer'] }],

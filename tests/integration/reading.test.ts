@@ -151,7 +151,7 @@ describe('GET /api/health', () => {
 describe('what is not there', () => {
   it('answers 404 as a problem, for every method', async () => {
     for (const method of ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const) {
-      const { status, headers } = await api(method, '/api/notices?limit=5')
+      const { status, headers } = await api(method, '/api/crates?limit=5')
       expect([status, headers.get('content-type')]).toEqual([404, 'application/problem+json'])
     }
     expect((await api('GET', '/api')).status).toBe(404)

@@ -38,11 +38,12 @@ export function railReason(fact: RailFact): RailReason | null {
   if (fact.isOwn || fact.isAskedFor || fact.isForOneSerial) return null
   if (fact.kind === 'question') return fact.answers === 0 ? 'open-question' : null
   if (fact.stampState === 'in-question') return 'in-question'
+  // Every stamp on it is from before a bulletin, this mentor's too.
+  if (fact.stampState === 'plans-changed') return 'plans-changed'
   if (fact.isStampedByMe) return null
   switch (fact.stampState) {
     case 'one-of-two': return 'second'
     case 'lapsed': return 'lapsed'
-    case 'plans-changed': return 'plans-changed'
     case 'none':
     case 'imported':
     case 'withdrawn': return 'first'

@@ -1,4 +1,5 @@
 // The state of a post's stamps, derived from what is stored: never a judgement of its own.
+import { findPlansChanges, type BulletinFact, type PlansChange, type PlansPlace } from './plans-change'
 
 export const stampStates = ['none', 'imported', 'one-of-two', 'stamped', 'lapsed', 'plans-changed', 'in-question', 'withdrawn'] as const
 export type StampState = (typeof stampStates)[number]
@@ -15,6 +16,8 @@ export interface StampFact {
   mentorId: number | null
   basis: Basis | 'imported'
   scope: ReplyScope | null
+  /** What it stands on; of a plans stamp, the page and step that were before the mentor. */
+  reference: string
   createdAt: number
   withdrawnAt: number | null
 }
@@ -30,6 +33,19 @@ export interface StampSubject {
   stamps: readonly StampFact[]
   /** Times of "did not work" reports on the current revision. */
   failuresAt: readonly number[]
+  /** When the current revision was written. */
+  revisedAt: number
+  /** Plans pages and steps that it is about; an answer's are its question's. */
+  plans: readonly PlansPlace[]
+  /** Bulletins of its kit, and of no other. */
+  bulletins: readonly BulletinFact[]
+}
+
+export interface Judgement {
+  state: StampState
+  missing: Missing
+  /** Places where the plans changed after it was written and after the last stamp that stands: what a reader has to be told. Newest first. */
+  changes: PlansChange[]
 }
 
 /** What still lacks before the post is stamped. */
@@ -45,21 +61,38 @@ export function isLive(stamp: StampFact, subject: Pick<StampSubject, 'currentRev
   return stamp.withdrawnAt === null && stamp.revision === subject.currentRevision && stamp.questionRevision === subject.questionRevision
 }
 
-/** State and what is missing, for one post. Total and deterministic; the order of the stamps does not matter. */
-export function judgeStamps(subject: StampSubject): { state: StampState; missing: Missing } {
-  const standing = subject.stamps.filter((s) => s.withdrawnAt === null)
-  const live = standing.filter((s) => isLive(s, subject) && s.mentorId !== null && !subject.authorIds.includes(s.mentorId))
-  const missing = missingStamp(live, subject.needsTwo)
-  if (subject.postState === 'withdrawn') return { state: 'withdrawn', missing }
-  if (live.length === 0) return { state: stateWithoutLive(subject, standing), missing }
-  const lastLookAt = Math.max(...live.map((s) => s.createdAt))
-  // Only critical systems need two stamps, and only there does one report put a stamp in question.
-  if (subject.needsTwo && subject.failuresAt.some((at) => at > lastLookAt)) return { state: 'in-question', missing }
-  return { state: missing === null ? 'stamped' : 'one-of-two', missing }
+/** Every bulletin that concerns the post: by its own plans references, or by those of the plans stamps that stand on it. */
+export function plansChanges(subject: Pick<StampSubject, 'plans' | 'bulletins' | 'stamps' | 'currentRevision' | 'questionRevision'>): PlansChange[] {
+  return findPlansChanges(subject.bulletins, subject.plans, subject.stamps.filter((s) => s.basis === 'plans' && isLive(s, subject)).map((s) => s.reference))
 }
 
-function stateWithoutLive(subject: StampSubject, standing: readonly StampFact[]): StampState {
-  if (standing.some((s) => s.mentorId === null && isLive(s, subject))) return 'imported'
+/** The newest bulletin that came after a stamp was pressed (or with it), or null while the stamp still knows the plans. */
+export function changeSince(pressedAt: number, changes: readonly PlansChange[]): PlansChange | null {
+  return changes.find((c) => c.enteredAt >= pressedAt) ?? null
+}
+
+/** State and what is missing, for one post. Total and deterministic; the order of the facts does not matter. */
+export function judgeStamps(subject: StampSubject): Judgement {
+  const concerning = plansChanges(subject)
+  const standing = subject.stamps.filter((s) => s.withdrawnAt === null)
+  const live = standing.filter((s) => isLive(s, subject) && s.mentorId !== null && !subject.authorIds.includes(s.mentorId))
+  // A stamp from before a bulletin says nothing about the step as it is now.
+  const fresh = live.filter((s) => changeSince(s.createdAt, concerning) === null)
+  const missing = missingStamp(fresh, subject.needsTwo)
+  const lastLookAt = Math.max(subject.revisedAt, ...live.map((s) => s.createdAt))
+  const changes = concerning.filter((c) => c.enteredAt >= lastLookAt)
+  if (subject.postState === 'withdrawn') return { state: 'withdrawn', missing, changes }
+  if (live.length === 0) return { state: stateWithoutLive(subject, standing, concerning), missing, changes }
+  // Only critical systems need two stamps, and only there does one report put a stamp in question.
+  if (subject.needsTwo && subject.failuresAt.some((at) => at > Math.max(...live.map((s) => s.createdAt)))) return { state: 'in-question', missing, changes }
+  if (fresh.length === 0) return { state: 'plans-changed', missing, changes }
+  return { state: missing === null ? 'stamped' : 'one-of-two', missing, changes }
+}
+
+function stateWithoutLive(subject: StampSubject, standing: readonly StampFact[], concerning: readonly PlansChange[]): StampState {
+  const imported = standing.filter((s) => s.mentorId === null && isLive(s, subject))
+  if (imported.some((s) => changeSince(s.createdAt, concerning) === null)) return 'imported'
+  if (imported.length > 0) return 'plans-changed'
   if (standing.length > 0) return 'lapsed'
   const withdrawnHere = subject.stamps.some((s) => s.withdrawnAt !== null && s.revision === subject.currentRevision)
   return withdrawnHere ? 'withdrawn' : 'none'

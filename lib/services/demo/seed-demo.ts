@@ -11,6 +11,7 @@ import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 import { seedEntry, type SeedPeople } from './seed-entry'
 import { seedLimits } from './seed-limits'
 import { seedPlanSteps } from './seed-plan-steps'
+import { seedPlans } from './seed-plans'
 import { seedPlaces } from './seed-places'
 
 const dayMs = 24 * 3600 * 1000
@@ -35,6 +36,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   await seedLimits(database, people, at)
   await seedPlanSteps(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
+  await seedPlans(database, people, at, at(joinedDaysAgo))
   await keepState(database, 'complete')
   return demoContent.entries.length
 }

@@ -32,9 +32,11 @@ export interface Known { id: number; number: number; contentHash: string }
 /** A post that was not there. Its judgement follows from what is about to be written, without reading it back. */
 export async function insertImported(tx: Transaction, text: ImportedText, now: number): Promise<{ id: number; number: number }> {
   const needsTwo = text.required.some((c) => c.twoStamps)
-  const imported = { revision: 1, questionRevision: text.questionRevision, mentorId: null, basis: 'imported' as const, scope: null, createdAt: now, withdrawnAt: null }
+  const imported = { revision: 1, questionRevision: text.questionRevision, mentorId: null, basis: 'imported' as const, scope: null, reference: '', createdAt: now, withdrawnAt: null }
   const { state: stampState } = judgeStamps({
     currentRevision: 1, questionRevision: text.questionRevision, needsTwo, postState: 'visible', authorIds: [], stamps: text.stamped ? [imported] : [], failuresAt: [],
+    // A bulletin that is here already came before the stamp.
+    revisedAt: text.createdAt, plans: [], bulletins: [],
   })
   const { kind, parentId, ref, createdAt } = text
   const id = await insertPost(tx, { kind, parentId, ref, authorName: text.author ?? unknownAuthor, stampState, needsTwo, createdAt })

@@ -5,7 +5,7 @@ import { getCautionedPost, type CautionedPost } from '@/db/queries/cautioned-pos
 import { setJudgement } from '@/db/mutations/posts'
 import type { Transaction } from '@/db/client'
 import { cautionTable } from '@/lib/content/caution-table'
-import { judgeStamps, type Missing, type StampState } from '@/lib/domain/stamps/stamp-state'
+import { judgeStamps, type Judgement } from '@/lib/domain/stamps/stamp-state'
 
 const needsTwoByCode = new Map(cautionTable.cautions.map((c) => [c.code, c.twoStamps]))
 
@@ -14,11 +14,11 @@ export function needsTwoStamps(found: CautionedPost): boolean {
   return found.cautions.some((c) => c.waivedAt === null && needsTwoByCode.get(c.code) === true)
 }
 
-/** State and what is missing, from the rows of a post and the current revision of its question (0 for an entry). */
-export function judge(found: CautionedPost, questionRevision: number): { state: StampState; missing: Missing } {
+/** State, what is missing and where the plans changed, from the rows of a post and the current revision of its question (0 for an entry). */
+export function judge(found: CautionedPost, questionRevision: number): Judgement {
   return judgeStamps({
     currentRevision: found.current.number, questionRevision, needsTwo: needsTwoStamps(found), postState: found.state,
-    authorIds: found.authorIds, stamps: found.stamps,
+    authorIds: found.authorIds, stamps: found.stamps, revisedAt: found.current.createdAt, plans: found.plans, bulletins: found.bulletins,
     failuresAt: found.outcomes.filter((o) => o.result === 'did-not-work' && o.revision === found.current.number).map((o) => o.createdAt),
   })
 }

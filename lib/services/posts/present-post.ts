@@ -8,10 +8,11 @@ import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { parserVersion } from '@/lib/domain/measurements/measurement'
-import { isLive } from '@/lib/domain/stamps/stamp-state'
+import { changeSince, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
+import type { PlansChange } from '@/lib/domain/stamps/plans-change'
 import { paths } from '@/lib/paths'
 import type { Measurement } from '@/lib/schemas/measurement'
-import type { Answer, Caution, Entry, Outcomes, Post, Remark, Stamp } from '@/lib/schemas/post'
+import type { Answer, Caution, Entry, Outcomes, PlanChange, Post, Remark, Stamp } from '@/lib/schemas/post'
 import { judge } from './judge-post'
 
 const definitions = new Map(cautionTable.cautions.map((c) => [c.code, c]))
@@ -37,15 +38,22 @@ export function cautionsOfWords(text: string): Caution[] {
   return requiredCautions(cautionTable, { text, operations: [], tasks: [], hardware: [], jasc: [] }).map((c) => ({ ...pick(c), because: c.because, origin: 'rule' as const }))
 }
 
+/** A place where the plans changed since, as it is told to readers. */
+export const presentChanges = (changes: readonly PlansChange[]): PlanChange[] =>
+  changes.map((c) => ({ bulletin: c.bulletin, page: c.page, ...(c.step !== null ? { step: c.step } : {}), ...(c.revision !== '' ? { revision: c.revision } : {}) }))
+
 export function presentStamps(found: CautionedPost, questionRevision: number): Stamp[] {
+  const now = { currentRevision: found.current.number, questionRevision }
+  const changes = plansChanges({ ...now, plans: found.plans, bulletins: found.bulletins, stamps: found.stamps })
   return found.stamps.flatMap((s): Stamp[] => {
     if (s.mentorId === null || s.basis === 'imported') return []
+    const change = isLive(s, now) ? changeSince(s.createdAt, changes) : null
     return [{
       id: s.id, revision: revisionLetter(s.revision), mentor: { id: s.mentorId, mark: s.mark }, basis: s.basis, reference: s.reference,
       ...(s.plansRevision !== null ? { plansRevision: s.plansRevision } : {}), ...(s.scope !== null ? { scope: s.scope } : {}),
       ...(s.conflictReason !== null ? { conflictReason: s.conflictReason } : {}), createdAt: iso(s.createdAt),
       ...(s.withdrawnAt !== null ? { withdrawn: { at: iso(s.withdrawnAt), reason: s.withdrawnReason ?? '' } } : {}),
-      live: isLive(s, { currentRevision: found.current.number, questionRevision }),
+      ...(change ? { bulletin: change.bulletin } : {}), live: isLive(s, now) && change === null,
     }]
   })
 }
@@ -82,12 +90,12 @@ const measurementsOf = (found: CautionedPost): Measurement[] =>
 
 /** The fields that questions, lessons and answers share. */
 export function presentPost(found: CautionedPost, questionRevision: number, remarks: RemarkRenderings): Post {
-  const { state, missing } = judge(found, questionRevision)
+  const { state, missing, changes } = judge(found, questionRevision)
   return {
     id: found.id, kind: found.kind, ...(found.parentId !== null ? { parentId: found.parentId } : {}), ...(found.ref !== null ? { ref: found.ref } : {}),
     revision: revisionLetter(found.current.number), author: person(found.author), createdAt: iso(found.createdAt), updatedAt: iso(found.updatedAt),
     html: wholeHtml(found), text: found.plain ?? '', measurements: measurementsOf(found),
-    cautions: presentCautions(found), stamp: state, missing, stamps: presentStamps(found, questionRevision), needsTwo: found.needsTwo,
+    cautions: presentCautions(found), planChanges: presentChanges(changes), stamp: state, missing, stamps: presentStamps(found, questionRevision), needsTwo: found.needsTwo,
     outcomes: presentOutcomes(found), goingByThis: found.goingByThis, remarks: presentRemarks(found, remarks),
     revisions: found.revisions.map((r) => ({ revision: revisionLetter(r.number), author: person(r.author), createdAt: iso(r.createdAt) })),
     state: found.state,

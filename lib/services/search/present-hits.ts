@@ -11,7 +11,8 @@ import { paths } from '@/lib/paths'
 import type { BalloonKeys } from '@/lib/domain/shop/key-balloons'
 import type { Hit } from '@/lib/schemas/search'
 import type { AdviceFound } from '@/lib/search/messages'
-import { presentCautions, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
+import { judge } from '@/lib/services/posts/judge-post'
+import { presentCautions, presentChanges, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
 
 interface Found { id: number; postId: number; score: number; terms: readonly string[]; advice?: readonly AdviceFound[] }
 
@@ -47,6 +48,7 @@ function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, 
   const advice = passage.kind === 'question' ? (answers.find((a) => a.stampState === 'stamped') ?? answers.find((a) => a.stampState !== 'none') ?? null) : passage
   const plain = plainText(passage)
   const ordered = orderAdviceOf(found, [entry, ...answers], tasks)
+  const told = advice ?? passage
   return {
     id: entry.id, kind: entry.kind === 'lesson' ? 'lesson' : 'question', ...(entry.ref !== null ? { ref: entry.ref } : {}), title: entry.current.title, url: paths.entry(entry.id, passage.id),
     passage: { postId: passage.id, kind: passage.kind, author: passage.author.id === null ? { name: passage.author.name } : { id: passage.author.id, name: passage.author.name }, revision: revisionLetter(passage.current.number) },
@@ -54,7 +56,7 @@ function presentHit(found: Found, entry: CautionedPost, passage: CautionedPost, 
     partTags: [...entry.sections.map((s) => ({ code: s.code, title: s.title })), ...entry.current.tasks.map((slug) => ({ title: tasks.get(slug) ?? slug }))],
     stamp: advice?.stampState ?? 'none', stamps: advice ? presentStamps(advice, advice.kind === 'answer' ? entry.current.number : 0).filter((s) => s.withdrawn === undefined) : [],
     ...(ordered.advice.length > 0 ? { orderAdvice: ordered.advice } : {}), needsTwo: passage.needsTwo || entry.needsTwo, open: entry.kind === 'question' && answers.length === 0, answers: answers.length,
-    outcomes: presentOutcomes(advice ?? passage), cautions: unionCautions([presentCautions(entry), presentCautions(passage), ...(advice ? [presentCautions(advice)] : []), ...ordered.posts.map(presentCautions)]),
+    outcomes: presentOutcomes(told), planChanges: presentChanges(judge(told, told.kind === 'answer' ? entry.current.number : 0).changes), cautions: unionCautions([presentCautions(entry), presentCautions(passage), ...(advice ? [presentCautions(advice)] : []), ...ordered.posts.map(presentCautions)]),
     balloons: keys?.(entry.current.title, plain) ?? [],
   }
 }

@@ -1,11 +1,11 @@
-// A mentor stamps a revision with a basis. A mentor who looks again while it is in question renews their own stamp.
+// A mentor stamps a revision with a basis. A mentor who looks again while it is in question, or after a bulletin, renews their own stamp.
 import 'server-only'
 import { and, eq, isNull } from 'drizzle-orm'
 import { askedFor, stamp } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { revisionLetter, revisionNumber } from '@/lib/domain/entries/revision-letter'
-import { isLive } from '@/lib/domain/stamps/stamp-state'
+import { changeSince, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
 import { AppError, refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
@@ -38,8 +38,11 @@ export async function pressStamp(context: AppContext, postId: number, input: New
       throw refuse.invalid('conflictReason', `“${conflict.claim}” differs from the shop table${conflict.expected ? ` (${conflict.expected})` : ''}. Write why it is right all the same, or ask its author.`)
     }
     const own = found.stamps.find((s) => s.mentorId === actor.id && isLive(s, { currentRevision: found.current.number, questionRevision }))
-    if (own && judge(found, questionRevision).state !== 'in-question') throw new AppError('conflict', 'Your stamp stands on this revision already.', { current: { id: postId, revision: input.revision } })
-    if (own) await tx.update(stamp).set({ withdrawnAt: now, withdrawnReason: 'Looked at again after a report that it did not work.' }).where(eq(stamp.id, own.id))
+    const changes = plansChanges({ currentRevision: found.current.number, questionRevision, plans: found.plans, bulletins: found.bulletins, stamps: found.stamps })
+    const change = own ? changeSince(own.createdAt, changes) : null
+    const isInQuestion = judge(found, questionRevision).state === 'in-question'
+    if (own && !change && !isInQuestion) throw new AppError('conflict', 'Your stamp stands on this revision already.', { current: { id: postId, revision: input.revision } })
+    if (own) await tx.update(stamp).set({ withdrawnAt: now, withdrawnReason: isInQuestion || !change ? 'Looked at again after a report that it did not work.' : `Looked at again after bulletin ${change.bulletin}.` }).where(eq(stamp.id, own.id))
     const [row] = await tx.insert(stamp).values({
       postId, revision: found.current.number, questionRevision, mentorId: actor.id, mark: actor.mark, basis: input.basis, reference: input.reference,
       plansRevision: input.plansRevision ?? null, scope: input.scope ?? null, conflictReason: input.conflictReason ?? null, createdAt: now,

@@ -174,6 +174,8 @@ const otherTable: readonly (readonly [Act, string, string, Ask])[] = [
   ['people.grant-mentorship', 'to somebody else', '......SX', (a) => can(a, 'people.grant-mentorship', { memberId: 99 })],
   ['people.grant-mentorship', 'to the steward of the table', '.......X', (a) => can(a, 'people.grant-mentorship', { memberId: 7 })],
   ['kit.set-limits', '', '......SX', (a) => can(a, 'kit.set-limits')],
+  ['kits.keep', '', '......SX', (a) => can(a, 'kits.keep')],
+  ['notice.close', 'of the mentor of the table', '...T....', (a) => can(a, 'notice.close', { memberId: 4 })],
   ['import', '', '......SX', (a) => can(a, 'import')],
   ['account.open', '', '.MATWOSX', (a) => can(a, 'account.open')],
 ]

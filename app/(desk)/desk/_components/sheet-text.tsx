@@ -2,6 +2,7 @@
 // went and every remark. Nothing is folded away: a stamp judges all of it.
 import { CautionLine } from '@/components/cautions/caution-line'
 import { HowItWent } from '@/components/entries/how-it-went'
+import { PlanChanges } from '@/components/entries/plan-changes'
 import { PlansReference } from '@/components/entries/plans-reference'
 import { Prose } from '@/components/prose/prose'
 import { NoticeLine } from '@/components/ui/notice-line'
@@ -34,6 +35,7 @@ export function Advice({ post }: { post: Shown }) {
   return (
     <section className="grid content-start gap-4 px-5 py-4" aria-label={post.kind === 'answer' ? 'What to do' : 'Text'}>
       <CautionLine cautions={standing(post)} wide />
+      <PlanChanges changes={post.planChanges} />
       <Prose html={post.html} />
       {post.kind === 'question' && 'plans' in post ? <Plans entry={post} /> : null}
       {now.items.length > 0 ? <HowItWent outcomes={now} critical={post.needsTwo} notes /> : null}

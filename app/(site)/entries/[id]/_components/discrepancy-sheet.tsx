@@ -3,6 +3,7 @@ import { randomUUID } from 'node:crypto'
 import { CautionLine } from '@/components/cautions/caution-line'
 import { AnswerForm } from '@/components/entries/answer-form'
 import { NumbersCheckSheet } from '@/components/entries/numbers-check-list'
+import { PlanChanges } from '@/components/entries/plan-changes'
 import { PlansReference } from '@/components/entries/plans-reference'
 import { Sheet, SheetHead, SheetParts } from '@/components/entries/sheet'
 import { RivetLine } from '@/components/layout/rivet-line'
@@ -26,7 +27,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
         <Sheet as="section" labelledBy="found" id={`post-${entry.id}`}>
           <SheetHead id="found" title="Found" note={`${entry.author.name} · ${formatDate(entry.updatedAt)} · Rev ${entry.revision}`} />
           {own ? <PostStateNotice post={entry} rights={own} /> : null}
-          <div className="sheet-cautions"><CautionLine cautions={entry.cautions.filter((c) => !c.waived)} wide /><WaivedCautions post={entry} /></div>
+          <div className="sheet-cautions"><CautionLine cautions={entry.cautions.filter((c) => !c.waived)} wide /><WaivedCautions post={entry} /><PlanChanges changes={entry.planChanges} kit={entry.kit} /></div>
           <SheetParts parts={parts.map((p) => ({ label: p.label || 'Found', content: p.name === 'plansSay' ? <><PlansLines page={page} /><Prose html={p.html} small /></> : <Prose html={p.html} small /> }))} />
           {own ? <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} similar={page.otherCases} /> : null}
         </Sheet>
@@ -37,7 +38,7 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
         {count === 0 ? <EmptyState title="Nobody has said what to do yet">Until somebody does: stop, measure, read the plans step again, and ask the kit maker.</EmptyState> : null}
         {entry.answers.map((answer, i) => {
           const right = rights.get(answer.id)
-          return right ? <AnswerRow key={answer.id} answer={answer} number={i + 1} rights={right} allCautions={allCautions} plans={entry.plans[0]} /> : null
+          return right ? <AnswerRow key={answer.id} answer={answer} kit={entry.kit} number={i + 1} rights={right} allCautions={allCautions} plans={entry.plans[0]} /> : null
         })}
         <section id="say" className="no-print" aria-label="Say what to do" tabIndex={-1}>
           {maySay ? <AnswerForm key={`say-${count}`} action={answerAction} question={{ id: entry.id, title: entry.title, text: entry.text, kit: entry.kit, sections: entry.sections, tasks: entry.tasks, hardware: entry.hardware }} initial={{ questionId: String(entry.id) }} submission={randomUUID()} memberId={memberId} />

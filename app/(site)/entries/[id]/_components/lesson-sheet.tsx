@@ -1,5 +1,6 @@
 // A lesson: its parts one below the other on one sheet, order advice, and the title block with its stamps.
 import { CautionLine } from '@/components/cautions/caution-line'
+import { PlanChanges } from '@/components/entries/plan-changes'
 import { NumbersCheckSheet } from '@/components/entries/numbers-check-list'
 import { Sheet } from '@/components/entries/sheet'
 import { Prose } from '@/components/prose/prose'
@@ -20,6 +21,7 @@ export function LessonSheet({ page, allCautions }: { page: EntryPage; allCaution
         <PostStateNotice post={entry} rights={own} />
         <CautionLine cautions={entry.cautions.filter((c) => !c.waived)} />
         <WaivedCautions post={entry} />
+        <PlanChanges changes={entry.planChanges} kit={entry.kit} />
         {parts.map((p) => (
           <section key={p.name} className="lesson-part">
             {p.label ? <h2>{p.label}</h2> : null}

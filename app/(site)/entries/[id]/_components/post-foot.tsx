@@ -32,6 +32,7 @@ type Shown = Entry | Answer
 function basisWords(post: Shown): ReactNode {
   const live = post.stamps.filter((s) => s.live && !s.withdrawn)
   if ('makerReply' in post && post.makerReply === 'one-serial') return 'Kit maker’s written reply · one serial only · cannot be stamped or gone by'
+  if (live.length === 0 && post.stamp === 'plans-changed') return 'Stamped before the plans changed. A mentor has to look again.'
   if (live.length === 0) return post.needsTwo ? 'None given. Needs two stamps, by two people who did not write it.' : 'None given.'
   return (
     <>

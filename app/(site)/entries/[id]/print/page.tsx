@@ -2,6 +2,7 @@
 import type { Metadata } from 'next'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { CautionLine } from '@/components/cautions/caution-line'
+import { PlanChanges } from '@/components/entries/plan-changes'
 import { PlansReference } from '@/components/entries/plans-reference'
 import { PageTitle } from '@/components/layout/page-title'
 import { PrintNote } from '@/components/layout/print-note'
@@ -32,6 +33,7 @@ export default async function PrintPage({ params }: PageProps<'/entries/[id]/pri
       <CautionPlate cautions={cautions} />
       {entry.plans.map((p) => <p key={p.page}><PlansReference {...p} /></p>)}
       <h2>{entry.kind === 'question' ? 'Found' : 'Lesson'}</h2>
+      <PlanChanges changes={entry.planChanges} />
       <Prose html={entry.html} />
       <Stamps post={entry} />
       {entry.answers.map((a, i) => (
@@ -39,6 +41,7 @@ export default async function PrintPage({ params }: PageProps<'/entries/[id]/pri
           <h2>What to do, row {i + 1}: {a.author.name}, Rev {a.revision}, {formatDate(a.updatedAt)}</h2>
           {a.state === 'visible' ? null : <p><b>{a.state === 'withdrawn' ? 'Withdrawn: do not go by this.' : 'Hidden.'}</b></p>}
           <CautionLine cautions={a.cautions.filter((c) => !c.waived)} />
+          <PlanChanges changes={a.planChanges} />
           <Prose html={a.html} />
           <Stamps post={a} />
         </section>
