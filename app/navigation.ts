@@ -10,13 +10,14 @@ export function navigationFor(actor: Actor): { rooms: NavItem[]; bar: BarItem[];
   const people: NavItem[] = can(actor, 'people.open') ? [{ href: paths.people(), label: 'People' }] : []
   const me: NavItem = actor ? { href: paths.account, label: 'Account' } : { href: paths.signIn(), label: 'Sign in' }
   const kits: NavItem = { href: paths.kits, label: 'Kits' }
+  const build: NavItem[] = can(actor, 'builds.keep') ? [{ href: paths.builds, label: 'My build' }] : []
   const shop: NavItem = { href: paths.shop, label: 'Shop tables' }
   return {
-    rooms: [{ href: paths.ask(), label: 'Ask' }, { href: paths.lesson(), label: 'Write a lesson' }, kits, shop, ...desk, ...people, me],
+    rooms: [{ href: paths.ask(), label: 'Ask' }, { href: paths.lesson(), label: 'Write a lesson' }, kits, shop, ...build, ...desk, ...people, me],
     bar: [
-      { href: paths.search(), label: 'Search', icon: 'search' }, { href: paths.ask(), label: 'Ask', icon: 'ask' }, { href: paths.lesson(), label: 'Lesson', icon: 'lesson' },
+      { href: paths.search(), label: 'Search', icon: 'search' }, { href: paths.ask(), label: 'Ask', icon: 'ask' }, ...(build[0] ? [{ ...build[0], icon: 'kits' as const }] : [{ href: paths.lesson(), label: 'Lesson', icon: 'lesson' as const }]),
       ...(desk[0] ? [{ ...desk[0], icon: 'desk' as const }] : [{ ...shop, icon: 'shop' as const }]), { ...me, icon: 'account' },
     ],
-    footer: [kits, shop, ...desk, ...people, { href: paths.guide('how-stamps-work'), label: 'How stamps work' }, { href: paths.guide('cautions-and-limits'), label: 'Cautions and limits' }, { href: paths.guide('privacy'), label: 'Privacy' }],
+    footer: [{ href: paths.lesson(), label: 'Write a lesson' }, kits, shop, ...build, ...desk, ...people, { href: paths.guide('how-stamps-work'), label: 'How stamps work' }, { href: paths.guide('cautions-and-limits'), label: 'Cautions and limits' }, { href: paths.guide('privacy'), label: 'Privacy' }],
   }
 }

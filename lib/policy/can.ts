@@ -33,6 +33,8 @@ export interface Acts {
   'people.grant-mentorship': { memberId: number }
   'import': undefined
   'account.open': undefined
+  'builds.keep': undefined
+  'build.open': { ownerId: number }
 }
 export type Act = keyof Acts
 
@@ -67,6 +69,9 @@ const rules: { [A in Act]: Rule<A> } = {
   'people.grant-mentorship': (actor, s) => isAtLeast(actor, 'steward') && actor?.id !== s.memberId,
   'import': (actor) => isAtLeast(actor, 'steward'),
   'account.open': (actor) => actor !== null,
+  'builds.keep': (actor) => actor !== null,
+  // Private whatever the role: neither moderators nor stewards look into somebody's garage.
+  'build.open': (actor, build) => actor !== null && actor.id === build.ownerId,
 }
 
 /** Whether `actor` may do `act` on `subject`. */

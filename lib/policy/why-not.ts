@@ -23,4 +23,6 @@ export const whyNot: Record<Act, string> = {
   'people.grant-mentorship': 'Mentorship is granted by a steward to somebody else.',
   'import': 'Stewards import.',
   'account.open': 'Sign in to see your account.',
+  'builds.keep': 'Sign in to keep a build.',
+  'build.open': 'A build is open to its owner alone.',
 }

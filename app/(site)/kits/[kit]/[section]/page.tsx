@@ -25,7 +25,7 @@ export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[se
   const here = { kit: page.kit.slug, section: page.code }
   return (
     <>
-      <PageTitle kicker={`${page.kit.name} · ${page.system}`} title={`${page.code} ${page.title}`} aside={<div className="button-row"><LinkButton href={paths.ask(here)} look="primary">Ask about it</LinkButton><LinkButton href={paths.lesson(here)}>Write a lesson</LinkButton></div>} />
+      <PageTitle kicker={`${page.kit.name} · ${page.system}`} title={`${page.code} ${page.title}`} aside={<div className="button-row"><LinkButton href={paths.ask(here)} look="primary">Ask about it</LinkButton><LinkButton href={paths.lesson(here)}>Write a lesson</LinkButton>{page.buildId === null ? null : <LinkButton href={paths.buildSection(page.buildId, page.code)}>My section</LinkButton>}</div>} />
       {page.hits.length === 0 ? <EmptyState title="Nothing yet about this section" action={<LinkButton href={paths.ask(here)} look="primary">Ask the first question</LinkButton>}>Whoever finishes it first can spare the others an evening.</EmptyState> : (
         <>
           <HitPlate hits={page.hits} />
