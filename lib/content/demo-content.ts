@@ -1,5 +1,6 @@
 // The demo scenario under content/demo: invented people, kits and posts. Times are days before the seed day.
 import 'server-only'
+import builds from '@/content/demo/builds.json'
 import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
 import kits from '@/content/demo/kits.json'
@@ -29,10 +30,17 @@ export interface DemoEntry extends DemoMarks, DemoText {
 }
 export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
 
+export interface DemoBuild {
+  member: string; kit: string; name: string; serial: string; day: number
+  sections: { code: string; state: 'in-work' | 'waiting' | 'done'; day: number }[]
+  log: { section: string; day: number; minutes: number; page: string; steps: string; helpers: string; line: string }[]
+  holds: { section: string; kind: 'hold' | 'left-open'; what: string; page: string; step: string; until?: string; notWaiting?: string; untilSection?: string; day: number; released?: { day: number; note: string } }[]
+}
+
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[],
+  kits, operations, builds: builds as unknown as DemoBuild[], members: members as DemoMember[],
   entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
 }

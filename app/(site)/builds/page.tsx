@@ -18,7 +18,7 @@ export const metadata: Metadata = { title: 'My build' }
 
 export default async function BuildsPage() {
   const context = await memberContext()
-  const [builds, kits] = await Promise.all([listBuilds(context), listKits(context)])
+  const [builds, { items: kits }] = await Promise.all([listBuilds(context), listKits(context)])
   return (
     <>
       <PageTitle title="My build" lead="Sections, hours, holds. Nobody sees it but you, whatever their role; a mentor or an inspector only by a link that you make." />

@@ -8,6 +8,7 @@ import { hashPassword } from '@/lib/auth/password'
 import { demoContent, demoPassword } from '@/lib/content/demo-content'
 import type { Renderer } from '@/lib/render/renderer'
 import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
+import { seedBuilds } from './seed-builds'
 import { seedEntry, type SeedPeople } from './seed-entry'
 import { seedPlaces } from './seed-places'
 
@@ -31,6 +32,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   const people = await seedPeople(database, at)
   await seedPlaces(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
+  await seedBuilds(database, people, at)
   await keepState(database, 'complete')
   return demoContent.entries.length
 }

@@ -1,12 +1,11 @@
 // One aeroplane: sections in plan order with their state, what is held, what is left open on purpose, what its owner goes by.
 import type { Metadata } from 'next'
-import { CautionPlate } from '@/components/cautions/caution-plate'
+import { ListPlate } from '@/components/cautions/list-plate'
 import { GoneByList } from '@/components/builds/gone-by-list'
 import { SectionRow } from '@/components/builds/section-row'
 import { PageTitle } from '@/components/layout/page-title'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { LinkButton } from '@/components/ui/link-button'
-import { unionCautions } from '@/lib/domain/cautions/group-cautions'
 import { formatHours } from '@/lib/format/hours'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { paths } from '@/lib/paths'
@@ -35,7 +34,7 @@ export default async function BuildPage({ params }: PageProps<'/builds/[id]'>) {
       {build.goingBy.length > 0 ? (
         <section className="grid gap-4" aria-labelledby="going-by">
           <RivetLine title="What I go by" id="going-by" />
-          <CautionPlate brief cautions={unionCautions(build.goingBy.map((g) => g.cautions)).filter((c) => !c.waived).map((c) => ({ ...c, text: c.short }))} />
+          <ListPlate items={build.goingBy.map((g) => ({ id: g.postId, cautions: g.cautions }))} />
           <GoneByList items={build.goingBy} />
         </section>
       ) : null}

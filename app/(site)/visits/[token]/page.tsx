@@ -14,8 +14,8 @@ import { getVisit, type VisitSheet as Sheet } from '@/lib/services/builds/get-vi
 import { ownContext } from '../../builds/own-context'
 import { addFindingAction } from '../../builds/visit-actions'
 
-// The address is the key: it must not travel on in a Referer, nor into an index.
-export const metadata: Metadata = { title: 'Visit sheet', robots: { index: false }, referrer: 'no-referrer' }
+// The address is the key. The policy of all pages (same-origin) keeps it out of Referers to elsewhere; a stricter one would take the Origin from the form.
+export const metadata: Metadata = { title: 'Visit sheet', robots: { index: false } }
 
 export default async function VisitPage({ params }: PageProps<'/visits/[token]'>) {
   const { token } = await params

@@ -1,6 +1,6 @@
 // One section of a member's own build: where the work stands, what is held, the log, what they go by, the closing list, visits.
 import type { Metadata } from 'next'
-import { CautionPlate } from '@/components/cautions/caution-plate'
+import { ListPlate } from '@/components/cautions/list-plate'
 import { ClosingLineForm } from '@/components/builds/closing-line-form'
 import { ClosingList } from '@/components/builds/closing-list'
 import { GoneByList } from '@/components/builds/gone-by-list'
@@ -8,7 +8,6 @@ import { SectionStateForm } from '@/components/builds/section-state-form'
 import { PageTitle } from '@/components/layout/page-title'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { LinkButton } from '@/components/ui/link-button'
-import { unionCautions } from '@/lib/domain/cautions/group-cautions'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { pathSegment } from '@/lib/http/path-segment'
 import { paths } from '@/lib/paths'
@@ -72,7 +71,7 @@ function GoingBy({ section: { goingBy } }: { section: BuildSection }) {
       <RivetLine title="What I go by" id="going-by" />
       {goingBy.length === 0 ? <p className="text-ink-soft">Nothing yet. Tap “I’m going by this” on advice about this section, and it stands here with its cautions.</p> : (
         <>
-          <CautionPlate brief cautions={unionCautions(goingBy.map((g) => g.cautions)).filter((c) => !c.waived).map((c) => ({ ...c, text: c.short }))} />
+          <ListPlate items={goingBy.map((g) => ({ id: g.postId, cautions: g.cautions }))} />
           <GoneByList items={goingBy} />
         </>
       )}
