@@ -1,10 +1,10 @@
 // A member's own build through the handlers: private to its owner, kept once, refused in sentences, gone with the account.
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { eq } from 'drizzle-orm'
-import { build, closingAnswer, closingItem, hold, section, visit, workSession } from '@/db/schema'
+import { build, closingAnswer, closingItem, hold, member, section, visit, workSession } from '@/db/schema'
 import { write } from '@/db/transaction'
 import { hashPassword } from '@/lib/auth/password'
-import { member } from '@/db/schema'
+import { ownOrigin } from '@/lib/http/own-origin'
 import type { Method } from '@/lib/http/route'
 import { addFinding } from '@/lib/services/builds/add-finding'
 import { getHoldTags } from '@/lib/services/builds/get-hold-tags'
@@ -36,6 +36,23 @@ const as = (method: Method, path: string, body?: unknown, by: Somebody | null = 
 const logLine = (over: object = {}) => ({ key: key(), day: '2026-03-09', minutes: 150, ...over })
 const aHold = (over: object = {}) => ({ key: key(), kind: 'hold', what: 'Rib 7, hole 3: do not rivet', page: 'W3-2', step: '6', until: 'the kit maker’s written reply', ...over })
 const sectionOf = async (code: string) => (await as('GET', `/api/builds/${id}/sections/${code}`)).body
+
+/** Whether each corner (top left, top right, bottom left, bottom right) has the finder pattern of ISO/IEC 18004, 5.3.3: a ring of 7, a gap, a block of 3. */
+function finderCorners({ size, path }: { size: number; path: string }): boolean[] {
+  const dark = new Set([...path.matchAll(/M(\d+) (\d+)h1v1h-1z/g)].map(([, x, y]) => `${x},${y}`))
+  const isFinder = (left: number, top: number) => Array.from({ length: 49 }, (_, i) => [i % 7, Math.floor(i / 7)] as const)
+    .every(([x, y]) => dark.has(`${left + x},${top + y}`) === (Math.max(Math.abs(x - 3), Math.abs(y - 3)) !== 2))
+  return [[0, 0], [size - 7, 0], [0, size - 7], [size - 7, size - 7]].map(([x = 0, y = 0]) => isFinder(x, y))
+}
+
+describe('an address on paper', () => {
+  it('begins where the request came to, and a host that is none does not count', () => {
+    expect(ownOrigin(new Headers({ host: '192.168.1.20:3000' }))).toBe('http://192.168.1.20:3000')
+    expect(ownOrigin(new Headers({ host: 'garage.example', 'x-forwarded-proto': 'https' }))).toBe('http://garage.example')
+    expect(ownOrigin(new Headers({ host: 'not a host' }))).toBe('http://localhost:3000')
+    expect(ownOrigin(new Headers())).toBe('http://localhost:3000')
+  })
+})
 
 describe('a build', () => {
   it('has the kit’s sections in plan order, none begun', async () => {
@@ -160,6 +177,7 @@ describe('a hold', () => {
     expect(tags).toHaveLength(1)
     expect(tags[0]!.address).toBe(`https://hangar.example${body.url}`)
     const code = body.url.split('/').at(-1)
+    expect(finderCorners(tags[0]!.code)).toEqual([true, true, true, false])
     expect(await openHold(await owner.context(), code)).toMatchObject({ hold: { id: body.id }, build: { id } })
     const moderator = await aMember({ role: 'moderator' })
     for (const context of [await contextFor(null), await moderator.context()]) expect(await openHold(context, code)).toBe('somebody’s')

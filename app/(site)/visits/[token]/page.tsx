@@ -34,7 +34,7 @@ export default async function VisitPage({ params }: PageProps<'/visits/[token]'>
           { name: 'text', label: 'What did you find, and where?', kind: 'area', maxLength: 500, help: 'The builder goes past it only when it is put right.' },
         ]} />
       </section>
-      <PlansWin maker={section.build.kit.maker} />
+      <div className="print-only"><PlansWin maker={section.build.kit.maker} /></div>
     </div>
   )
 }

@@ -18,7 +18,7 @@ export function SectionLog({ section, change, now }: { section: BuildSection; ch
   return (
     <section className="grid gap-4" aria-labelledby="log">
       <RivetLine title="Log" id="log" note={`${formatHours(section.minutes)} so far`} />
-      <Disclosure summary="Write in the log" look="primary" open={log.length === 0 || section.state === 'in-work'}>
+      <Disclosure summary="Write in the log" open={log.length === 0 || section.state === 'in-work'}>
         <LogForm action={addLogLineAction} id="log-line" button="Write it" hidden={{ ...hidden, key: randomUUID() }} initial={{ day: isoDate(now) }} />
       </Disclosure>
       {log.length > 0 ? <LogList lines={log} form={form} changeAt={(l) => paths.changeLogLine(build.id, code, l.id)} /> : null}

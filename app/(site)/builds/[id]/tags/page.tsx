@@ -29,7 +29,7 @@ export default async function HoldTagsPage({ params, searchParams }: PageProps<'
       {tags.length === 0 ? <EmptyState title="Nothing is held" action={<LinkButton href={paths.build(build.id)}>Back to the build</LinkButton>}>A tag is printed while its hold is open.</EmptyState> : (
         <div className={tags.length === 1 ? 'tag-sheet tag-sheet-one' : 'tag-sheet'}>{tags.map((tag) => <HoldTag key={tag.hold.id} {...tag} name={context.actor?.name ?? ''} />)}</div>
       )}
-      <PlansWin maker={kit.maker} />
+      <div className="print-only"><PlansWin maker={kit.maker} /></div>
     </div>
   )
 }

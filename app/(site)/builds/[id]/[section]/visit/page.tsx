@@ -28,7 +28,7 @@ export default async function PrintedVisitPage({ params }: PageProps<'/builds/[i
         <h2>Found</h2>
         <ol className="written-lines">{Array.from({ length: 10 }, (_, i) => <li key={i}>{i + 1}</li>)}</ol>
       </div>
-      <PlansWin maker={section.build.kit.maker} />
+      <div className="print-only"><PlansWin maker={section.build.kit.maker} /></div>
     </div>
   )
 }
