@@ -31,7 +31,7 @@ export function LogList({ lines, changeAt, form = null }: LogListProps) {
 }
 
 function LogWords({ line: { line, page, steps, helpers } }: { line: LogLine }) {
-  const place = [page, steps ? `steps ${steps}` : ''].filter(Boolean).join(' · ')
+  const place = [page, steps ? `${/^\d+$/.test(steps) ? 'step' : 'steps'} ${steps}` : ''].filter(Boolean).join(' · ')
   return (
     <>
       {line ? <p>{line}</p> : null}

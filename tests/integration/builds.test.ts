@@ -14,7 +14,8 @@ import { makeVisit } from '@/lib/services/builds/make-visit'
 import { openHold } from '@/lib/services/builds/open-hold'
 import { revokeVisit } from '@/lib/services/builds/revoke-visit'
 import { closeAccount } from '@/lib/services/people/close-account'
-import { contextFor } from '@/lib/context'
+import { contextFor, type AppContext } from '@/lib/context'
+import { getSectionPage } from '@/lib/services/kits/get-section-page'
 import { api } from '../support/api'
 import { openTestRuntime, type TestRuntime } from '../support/database'
 import { aMember, anEntry, type Somebody } from '../support/factories'
@@ -83,6 +84,16 @@ describe('a build', () => {
     expect((await as('PATCH', `/api/builds/${id}/sections/X-1`, { state: 'done' })).body.state).toBe('done')
     await as('POST', `/api/builds/${id}/sections/X-1/log`, logLine())
     expect((await sectionOf('X-1')).state).toBe('done')
+  })
+})
+
+describe('the page of a kit’s section', () => {
+  it('leads to one’s own section, and nobody to another’s', async () => {
+    const at = async (context: AppContext, kit = 'whimbrel-2', code = 'W-3') => (await getSectionPage(context, kit, code))?.buildId
+    expect(await at(await owner.context())).toBe(id)
+    expect(await at(await owner.context(), 'ouzel-3', '42')).toBeNull()
+    expect(await at(await (await aMember()).context())).toBeNull()
+    expect(await at(await contextFor(null))).toBeNull()
   })
 })
 
