@@ -12,6 +12,13 @@ WHEN NOT (OLD.redacted_reason IS NULL AND NEW.redacted_reason IS NOT NULL AND NE
           AND NEW.author_id IS OLD.author_id)
 BEGIN SELECT raise(ABORT, 'law: a revision never changes'); END;
 
+-- What was made of a text goes with it.
+CREATE TRIGGER redaction_takes_all AFTER UPDATE ON revision
+BEGIN
+  DELETE FROM rendering WHERE key = 'post:' || NEW.post_id || ':' || NEW.number;
+  DELETE FROM measurement WHERE post_id = NEW.post_id AND NEW.number = (SELECT current_revision FROM post WHERE id = NEW.post_id);
+END;
+
 CREATE TRIGGER revision_never_deleted BEFORE DELETE ON revision
 BEGIN SELECT raise(ABORT, 'law: a revision is never deleted'); END;
 
@@ -94,11 +101,22 @@ BEGIN SELECT raise(ABORT, 'law: the audit trail is append-only'); END;
 CREATE TRIGGER audit_never_deleted BEFORE DELETE ON audit
 BEGIN SELECT raise(ABORT, 'law: the audit trail is append-only'); END;
 
+CREATE TRIGGER limit_only_ended BEFORE UPDATE ON kit_limit
+WHEN NOT (OLD.ended_at IS NULL AND NEW.ended_at IS NOT NULL AND NEW.end_reason IS NOT NULL
+  AND NEW.kit_id = OLD.kit_id AND NEW.shop_table = OLD.shop_table AND NEW.result = OLD.result AND NEW.inputs = OLD.inputs AND NEW.value = OLD.value
+  AND NEW.unit = OLD.unit AND NEW.display = OLD.display AND NEW.reference = OLD.reference AND NEW.note = OLD.note AND NEW.created_at = OLD.created_at)
+BEGIN SELECT raise(ABORT, 'law: a limit can only be ended'); END;
+
+CREATE TRIGGER limit_never_deleted BEFORE DELETE ON kit_limit
+BEGIN SELECT raise(ABORT, 'law: a limit is ended, never deleted'); END;
+
 -- The change log. An answer's change is its question's: search shows one hit an entry.
 CREATE TRIGGER change_post_inserted AFTER INSERT ON post
 BEGIN INSERT INTO change (post_id) VALUES (coalesce(NEW.parent_id, NEW.id)); END;
 
-CREATE TRIGGER change_post_updated AFTER UPDATE ON post
+-- Every column but measured_by: finding a post's measurements anew is no change that others see.
+CREATE TRIGGER change_post_updated AFTER UPDATE OF
+  id, kind, parent_id, author_id, author_name, ref, state, state_reason, merged_into_id, state_by, state_at, current_revision, stamp_state, needs_two, created_at, updated_at ON post
 BEGIN INSERT INTO change (post_id) VALUES (coalesce(NEW.parent_id, NEW.id)); END;
 
 CREATE TRIGGER change_revision AFTER UPDATE ON revision

@@ -41,6 +41,8 @@ export async function migrateDatabase(database: Database): Promise<void> {
   const { laws } = expectedSchema()
   await database.client.executeMultiple(
     `BEGIN IMMEDIATE;\n${drops}\n${readFileSync(lawsFile, 'utf8')}\n` +
-    `INSERT INTO setting (key, value) VALUES ('laws', '${laws}') ON CONFLICT (key) DO UPDATE SET value = excluded.value;\nCOMMIT;`,
+    `INSERT INTO setting (key, value) VALUES ('laws', '${laws}') ON CONFLICT (key) DO UPDATE SET value = excluded.value;\n` +
+    // Which database this is: what was derived from another one must not be taken for its own.
+    `INSERT INTO setting (key, value) VALUES ('database', lower(hex(randomblob(16)))) ON CONFLICT (key) DO NOTHING;\nCOMMIT;`,
   )
 }

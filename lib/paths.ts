@@ -13,6 +13,7 @@ export interface SearchAddress { q?: string | undefined; kit?: string | undefine
 export const paths = {
   home: '/' as Route,
   search: (address: SearchAddress = {}) => `/search${query({ ...address })}` as Route,
+  explainSearch: (address: SearchAddress = {}) => `/search/explain${query({ ...address })}` as Route,
   entry: (id: number, anchor?: number) => `/entries/${id}${anchor && anchor !== id ? `#post-${anchor}` : ''}` as Route,
   remark: (entryId: number, remarkId: number) => `/entries/${entryId}#remark-${remarkId}` as Route,
   entryPrint: (id: number) => `/entries/${id}/print` as Route,
@@ -26,6 +27,7 @@ export const paths = {
   drillChart: '/shop/drills/chart' as Route,
   kits: '/kits' as Route,
   kit: (slug: string) => `/kits/${slug}` as Route,
+  kitLimits: (slug: string, address: { of?: string } = {}, anchor?: string) => `/kits/${slug}/limits${query(address)}${anchor ? `#${anchor}` : ''}` as Route,
   section: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}` as Route,
   sectionFeed: (kit: string, code: string) => `/kits/${kit}/${encodeURIComponent(code)}/feed.atom` as Route,
   feed: '/feed.atom' as Route,

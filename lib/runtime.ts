@@ -1,9 +1,10 @@
 // What one server process holds open: the database, the search door and the renderer. Opened once, at start.
 import 'server-only'
+import path from 'node:path'
 import { openDatabase, type Database } from '@/db/client'
 import { env } from './env'
 import { createRenderer, type Renderer } from './render/renderer'
-import { logError } from './log'
+import { logError, logInfo } from './log'
 import type { SearchDoor } from './search/messages'
 import { openSearch } from './search/open-search'
 import { workerFile } from './worker-file'
@@ -24,6 +25,9 @@ async function open(): Promise<Runtime> {
   return {
     database,
     renderer: createRenderer({ workerFile: workerFile('render') }),
-    search: openSearch({ database, workerFile: workerFile('search'), onError: (error) => logError('search', error) }),
+    search: openSearch({
+      database, workerFile: workerFile('search'), snapshots: { folder: path.join(env().dataDirectory, 'search') },
+      onError: (error) => logError('search', error), onEvent: (event, facts) => logInfo(`search.${event}`, facts),
+    }),
   }
 }

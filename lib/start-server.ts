@@ -11,6 +11,7 @@ import { systemClock } from './clock'
 import { logError, logInfo } from './log'
 import { runtime } from './runtime'
 import { noteRulesVersion, reapplyRules } from './services/cautions/reapply-rules'
+import { fillMeasurements } from './services/posts/fill-measurements'
 
 /** Checks settings and schema, then opens database, search and renderer. Exits with 1 when something does not fit. */
 export async function startServer(): Promise<void> {
@@ -27,8 +28,9 @@ export async function startServer(): Promise<void> {
   watchClientAddresses()
   // Compiles the rule table, once a process and not in the first builder's way.
   requiredCautions(cautionTable, { text: '', operations: [], tasks: [], hardware: [], jasc: [] })
-  const { database } = await runtime()
+  const { database, renderer } = await runtime()
   await noteRulesVersion(database)
   // Beside the first requests, not before them: what was judged by an older table warned already, by that table.
   reapplyRules(database, systemClock()).then((n) => { if (n > 0) logInfo('cautions.reapply', { entries: n }) }, (error: unknown) => logError('cautions.reapply', error))
+  fillMeasurements({ database, renderer }).then((n) => { if (n > 0) logInfo('measurements.fill', { posts: n }) }, (error: unknown) => logError('measurements.fill', error))
 }

@@ -17,6 +17,8 @@ import * as answers from './entries/[id]/answers/route'
 import * as entries from './entries/route'
 import * as health from './health/route'
 import * as importing from './import/route'
+import * as endLimit from './kits/[kit]/limits/[id]/end/route'
+import * as kitLimits from './kits/[kit]/limits/route'
 import * as kit from './kits/[kit]/route'
 import * as kits from './kits/route'
 import * as measurements from './measurements/route'
@@ -27,6 +29,7 @@ import * as reliance from './posts/[id]/reliance/route'
 import * as remarks from './posts/[id]/remarks/route'
 import * as stamps from './posts/[id]/stamps/route'
 import * as preview from './preview/route'
+import * as explainSearch from './search/explain/route'
 import * as search from './search/route'
 import * as shopTable from './shop/[table]/route'
 import * as shop from './shop/route'
@@ -36,6 +39,7 @@ import * as suggest from './suggest/route'
 
 export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/search': search,
+  '/api/search/explain': explainSearch,
   '/api/suggest': suggest,
   '/api/similar': similar,
   '/api/preview': preview,
@@ -60,6 +64,8 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/cautions/required': requiredCautions,
   '/api/kits': kits,
   '/api/kits/{kit}': kit,
+  '/api/kits/{kit}/limits': kitLimits,
+  '/api/kits/{kit}/limits/{id}/end': endLimit,
   '/api/operations': operations,
   '/api/measurements': measurements,
   '/api/numbers-check': numbersCheck,

@@ -2,13 +2,14 @@
 import type { SurvivalCurve } from '@/lib/domain/evidence/kaplan-meier'
 import { axisTicks } from '@/lib/domain/evidence/axis-ticks'
 
-interface Props { curve: SurvivalCurve; longestDays: number; label: string }
+/** `endDays`: where the axis ends; those that wait longer leave it at the right. */
+interface Props { curve: SurvivalCurve; endDays: number; label: string }
 
-const size = { width: 720, height: 340, left: 56, right: 20, top: 16, bottom: 52 }
+const size = { width: 520, height: 300, left: 72, right: 20, top: 16, bottom: 58 }
 const shares = [0, 0.25, 0.5, 0.75, 1]
 
-export function SurvivalCurveChart({ curve, longestDays, label }: Props) {
-  const ticks = axisTicks(longestDays)
+export function SurvivalCurveChart({ curve, endDays, label }: Props) {
+  const ticks = axisTicks(endDays)
   const end = ticks[ticks.length - 1] ?? 1
   const x = (days: number) => round(size.left + (days / end) * (size.width - size.left - size.right))
   const y = (share: number) => round(size.top + (1 - share) * (size.height - size.top - size.bottom))
@@ -30,7 +31,7 @@ export function SurvivalCurveChart({ curve, longestDays, label }: Props) {
       <text className="chart-label" x={(size.left + size.width - size.right) / 2} y={size.height - 6} textAnchor="middle">Days since asked</text>
       {curve.median === null ? null : <path className="chart-median" d={`M${size.left} ${y(0.5)}H${x(curve.median)}V${floor}`} />}
       <path className="chart-line" d={steps(curve, x, y)} />
-      {longestDays > 0 ? <path className="chart-line" d={`M${x(lastTime(curve))} ${y(lastShare(curve))}H${x(longestDays)}`} /> : null}
+      {lastShare(curve) > 0 ? <path className="chart-line" d={`M${x(lastTime(curve))} ${y(lastShare(curve))}H${x(end)}`} /> : null}
     </svg>
   )
 }

@@ -10,13 +10,19 @@ const marks = { agrees: '=', conflicts: '≠', 'cannot-tell': '?' } as const
 const words = { agrees: 'agrees with the table', conflicts: 'differs from the table', 'cannot-tell': 'the table cannot tell' } as const
 const basisWords: Record<string, string> = { memory: 'from memory, not checked against the standard', 'common-practice': 'common practice, no source', maker: 'the kit maker’s own limit' }
 
-/** On a sheet of its own; nothing when no number could be checked. */
-export function NumbersCheckSheet({ posts }: { posts: readonly CheckedPost[] }) {
-  if (posts.every((p) => p.checks.length === 0)) return null
-  return <Sheet as="section" labelledBy="numbers-check"><SheetHead title="Numbers check" id="numbers-check" /><NumbersCheckList posts={posts} /></Sheet>
+interface NumbersCheckProps {
+  posts: readonly CheckedPost[]
+  /** Slug of the kit they are about: a link to a table then shows its maker's own limits too. */
+  kit?: string | undefined
 }
 
-export function NumbersCheckList({ posts }: { posts: readonly CheckedPost[] }) {
+/** On a sheet of its own; nothing when no number could be checked. */
+export function NumbersCheckSheet({ posts, kit }: NumbersCheckProps) {
+  if (posts.every((p) => p.checks.length === 0)) return null
+  return <Sheet as="section" labelledBy="numbers-check"><SheetHead title="Numbers check" id="numbers-check" /><NumbersCheckList posts={posts} kit={kit} /></Sheet>
+}
+
+export function NumbersCheckList({ posts, kit }: NumbersCheckProps) {
   const rows = posts.flatMap(({ label, checks }) => checks.map((check) => ({ label, check })))
   if (rows.length === 0) return null
   return (
@@ -27,7 +33,7 @@ export function NumbersCheckList({ posts }: { posts: readonly CheckedPost[] }) {
           <span>
             <b>{[label, check.role === 'measured' ? 'measured' : ''].filter(Boolean).join(', ')}{label || check.role === 'measured' ? ' ' : ''}“{check.claim}”</b> {words[check.verdict]}{check.expected ? `: ${check.expected}` : ''}.
             {check.role === 'measured' ? ' A measurement: charged to nobody.' : ''}
-            <span className="block text-small text-ink-soft">{sourceWords(check)}{check.table ? <> <Link href={paths.shopTable(check.table)}>Shop table</Link></> : null}</span>
+            <span className="block text-small text-ink-soft">{sourceWords(check)}{check.table ? <> <Link href={paths.shopTable(check.table, kit ? { kit } : {})}>Shop table</Link></> : null}</span>
           </span>
         </li>
       ))}

@@ -31,7 +31,7 @@ function Aid({ text, shown, wantsSimilar, acknowledged, standing }: Props) {
     <>
       {wantsSimilar ? <Similar text={settled} /> : null}
       <Preview body={shown} />
-      <Numbers body={shown} hardware={settled.hardware} />
+      <Numbers body={shown} hardware={settled.hardware} kit={settled.kit} />
       <Acknowledge cautions={required} acknowledged={acknowledged} />
     </>
   )
@@ -61,11 +61,11 @@ function Similar({ text }: { text: WritingText }) {
 }
 
 /** Never in the way of posting: a table can be wrong for this part, and the author knows which part it is. */
-function Numbers({ body, hardware }: { body: string; hardware: readonly string[] }) {
+function Numbers({ body, hardware, kit }: { body: string; hardware: readonly string[]; kit: string | undefined }) {
   const rested = useRested(body, 600)
-  const { data } = useQuery({ ...checksOf(rested, hardware), placeholderData: keepPreviousData })
+  const { data } = useQuery({ ...checksOf(rested, hardware, kit), placeholderData: keepPreviousData })
   if (!data || data.checks.length === 0) return null
-  return <section className="aid" aria-live="polite"><h2>Numbers check</h2><NumbersCheckList posts={[{ label: '', checks: data.checks }]} /></section>
+  return <section className="aid" aria-live="polite"><h2>Numbers check</h2><NumbersCheckList posts={[{ label: '', checks: data.checks }]} kit={kit} /></section>
 }
 
 function Preview({ body }: { body: string }) {

@@ -22,9 +22,9 @@ function keep(shift: Shift): void {
 export function ShiftSwitch({ initial }: { initial: Shift }) {
   const [shift, setShift] = useState(initial)
   return (
-    <div className="shift-switch">
+    <div className="page-switch shift-switch">
       <span className="label" id="shift-label">Shift</span>
-      <div className="shift-switch-row" role="group" aria-labelledby="shift-label">
+      <div className="page-switch-row" role="group" aria-labelledby="shift-label">
         {choices.map((choice) => (
           <button key={choice.shift} type="button" aria-pressed={choice.shift === shift} onClick={() => { keep(choice.shift); setShift(choice.shift) }}>{choice.label}</button>
         ))}

@@ -1,4 +1,4 @@
-// The foot of every page: the plans win, every room as a link (the bottom bar of a phone holds only some), the shift switch.
+// The foot of every page: the plans win, every room as a link (the bottom bar of a phone holds only some), the switches of a page.
 import Link from 'next/link'
 import type { ReactNode } from 'react'
 import type { NavItem } from './nav-items'
@@ -7,7 +7,7 @@ import { PlansWin } from './plans-win'
 export interface SiteFooterProps {
   items: readonly NavItem[]
   maker?: string | undefined
-  /** The shift switch, and whatever else belongs at the very end. */
+  /** The switches for units and shift, and whatever else belongs at the very end. */
   end?: ReactNode
 }
 

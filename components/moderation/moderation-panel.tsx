@@ -3,19 +3,24 @@ import { FieldsForm, type FieldsFormProps, type FormField } from '@/components/u
 import type { Caution, Post } from '@/lib/schemas/post'
 
 type FormAction = FieldsFormProps['action']
+/** A title never stands without its worst caution. */
+export interface Duplicate { id: number; title: string; caution: { signalWord: string; title: string } | null }
 export interface ModerationPanelProps {
   postId: number
   state: Post['state']
   cautions: readonly Pick<Caution, 'code' | 'title' | 'signalWord' | 'because' | 'waived'>[]
   allCautions: readonly { code: string; title: string }[]
+  /** Entries of the same kind that may say the same; empty for an answer, and for a question whose answers would be lost. */
+  duplicates: readonly Duplicate[]
   addCautionAction: FormAction
   waiveCautionAction: FormAction
   setStateAction: FormAction
+  mergeAction: FormAction
 }
 
 const reasonField = (label: string, help?: string): FormField => ({ name: 'reason', label, kind: 'area', maxLength: 1000, ...(help ? { help } : {}) })
 
-export function ModerationPanel({ postId, state, cautions, allCautions, addCautionAction, waiveCautionAction, setStateAction }: ModerationPanelProps) {
+export function ModerationPanel({ postId, state, cautions, allCautions, duplicates, addCautionAction, waiveCautionAction, setStateAction, mergeAction }: ModerationPanelProps) {
   const standing = cautions.filter((c) => !c.waived)
   const missing = allCautions.filter((all) => !standing.some((c) => c.code === all.code))
   const isOpen = state === 'visible'
@@ -39,7 +44,16 @@ export function ModerationPanel({ postId, state, cautions, allCautions, addCauti
           ]} />
         </section>
       ) : null}
-      {isOpen || state === 'hidden' ? (
+      {isOpen && duplicates.length > 0 ? (
+        <section className="grid gap-3">
+          <h3 className="label">Merge a duplicate</h3>
+          <FieldsForm action={mergeAction} id={`merge-${postId}`} hidden={{ postId }} button="Merge it" fields={[
+            { name: 'into', label: 'Into which entry', kind: 'select', value: '', options: [{ value: '', label: 'Choose one' }, ...duplicates.map((d) => ({ value: String(d.id), label: `${d.caution ? `${d.caution.signalWord} ${d.caution.title}: ` : ''}${d.title} (${d.id})` }))] },
+            reasonField('Why', 'Its address will lead to the other entry. Nothing is deleted, and it can be restored.'),
+          ]} />
+        </section>
+      ) : null}
+      {isOpen || state === 'hidden' || state === 'merged' ? (
         <section className="grid gap-3">
           <h3 className="label">{isOpen ? 'Hide the post' : 'Restore the post'}</h3>
           <FieldsForm action={setStateAction} id={`state-${postId}`} hidden={{ postId, state: isOpen ? 'hidden' : 'visible' }} button={isOpen ? 'Hide it' : 'Restore it'}

@@ -1,77 +1,81 @@
 'use client'
-// Results while typing, under the search line: an ARIA combobox whose options are links. Loaded at the first focus.
+// Suggestions and results while typing, under the search line: an ARIA combobox whose options are links (use-combobox.ts), and on
+// phones the trade keys. Loaded at the first focus.
 import { QueryClient, QueryClientProvider, keepPreviousData, useQuery } from '@tanstack/react-query'
 import type { Route } from 'next'
 import Link from 'next/link'
 import { useRouter } from 'next/navigation'
-import { useEffect, useMemo, useState, useSyncExternalStore, type RefObject } from 'react'
-import { CautionWord, gravestWord } from '@/components/cautions/caution-word'
-import { MarkedSnippet } from '@/components/entries/marked-snippet'
-import { liveResults } from '@/lib/client/queries'
+import { useMemo, useState, useSyncExternalStore, type RefObject } from 'react'
+import { completionsOf, liveResults } from '@/lib/client/queries'
 import { useRested } from '@/lib/client/use-rested'
-import { hitKindLine } from '@/lib/format/kind-line'
-import type { Hit } from '@/lib/schemas/search'
+import { LiveOptions, type LiveOption } from './live-options'
+import { TradeKeys } from './trade-keys'
+import { useCombobox } from './use-combobox'
 
 interface Props { input: RefObject<HTMLInputElement | null>; shown: string; results: Route }
 const client = new QueryClient({ defaultOptions: { queries: { retry: 1, refetchOnWindowFocus: false } } })
-const listId = 'live-results'
+const [popupId, listId] = ['live-results', 'live-results-list']
+const mostSuggestions = 4
 
 export default function LiveSearch(props: Props) {
-  return <QueryClientProvider client={client}><Results {...props} /></QueryClientProvider>
+  return (
+    <QueryClientProvider client={client}>
+      <Results {...props} />
+      <TradeKeys input={props.input} />
+    </QueryClientProvider>
+  )
 }
 
 function Results({ input, shown, results }: Props) {
   const router = useRouter()
   const typed = useTyped(input)
-  // Closed for one text; typing on opens it again.
-  const [closedFor, setClosedFor] = useState<string | null>(null)
-  const close = () => setClosedFor(typed)
-  const [active, setActive] = useState(-1)
-  const words = useRested(typed, 150)
-  const { data, error, isFetching } = useQuery({ ...liveResults(words), placeholderData: keepPreviousData })
-  const hits = useMemo(() => (words.trim() === '' ? [] : (data?.results ?? [])), [words, data])
-  const isShown = closedFor !== typed && typed.trim() !== '' && typed !== shown
-
-  useEffect(() => {
-    const field = input.current
-    if (!field) return
-    const onInput = () => { setClosedFor(null); setActive(-1) }
-    const onKey = (event: KeyboardEvent) => {
-      if (event.key === 'Escape' && isShown) { event.preventDefault(); setClosedFor(field.value) }
-      if ((event.key === 'ArrowDown' || event.key === 'ArrowUp') && hits.length > 0) {
-        event.preventDefault()
-        setClosedFor(null)
-        setActive((now) => (now + (event.key === 'ArrowDown' ? 1 : hits.length + (now < 0 ? 1 : 0) - 1)) % hits.length)
-      }
-      const chosen = hits[active]
-      if (event.key === 'Enter' && isShown && chosen) { event.preventDefault(); setClosedFor(field.value); router.push(chosen.url as Route) }
-    }
-    const onBlur = (event: FocusEvent) => {
-      const next = event.relatedTarget
-      if (!(next instanceof Element) || !next.closest(`#${listId}`)) setClosedFor(field.value)
-    }
-    field.addEventListener('input', onInput)
-    field.addEventListener('keydown', onKey)
-    field.addEventListener('blur', onBlur)
-    return () => {
-      field.removeEventListener('input', onInput)
-      field.removeEventListener('keydown', onKey)
-      field.removeEventListener('blur', onBlur)
-    }
-  }, [input, hits, active, isShown, router])
-  useCombobox(input, isShown, hits[active] ? `live-${hits[active].id}` : null)
-
-  if (!isShown) return null
+  // Closed for one text; typing on opens it again. The words a results page was found by are closed to begin with.
+  const [closedFor, setClosedFor] = useState<string | null>(shown === '' ? null : shown)
+  const { options, error, isSettled } = useOptions(typed)
+  const isOpen = closedFor !== typed && typed.trim() !== ''
+  const close = () => setClosedFor(input.current?.value ?? typed)
+  const activeId = useCombobox({
+    input, listId, popupId, options, isOpen, close, open: () => setClosedFor(null),
+    choose: (index) => { const chosen = options[index]; if (chosen) router.push(chosen.url as Route) },
+  })
+  const nothing = isOpen && isSettled && options.length === 0
   return (
-    <div className="live-results" id={listId}>
-      {error ? <p className="live-note" role="status">{error.message}</p> : null}
-      {!error && !isFetching && data && hits.length === 0 ? <p className="live-note" role="status">Nothing yet. Press Enter, then “Ask this”.</p> : null}
-      <ul role="listbox" aria-label="Results" id={`${listId}-list`}>
-        {hits.map((hit, index) => <Option key={hit.id} hit={hit} isActive={index === active} onPick={close} />)}
-      </ul>
-      {hits.length > 0 ? <Link className="live-all" href={`${results}?${new URLSearchParams({ q: typed })}` as Route} onClick={close}>All results</Link> : null}
-    </div>
+    <>
+      <p className="sr-only" role="status">{isOpen && isSettled ? counted(options) : ''}</p>
+      {isOpen && (options.length > 0 || error || nothing) ? (
+        <div className="live-results" id={popupId}>
+          {error ? <p className="live-note" role="alert">{error.message}</p> : null}
+          {nothing && !error ? <p className="live-note">Nothing yet. Press Enter, then “Ask this”.</p> : null}
+          {options.length > 0 ? <LiveOptions listId={listId} options={options} activeId={activeId} onPick={close} /> : null}
+          {options.length > 0 ? <Link className="live-all" href={`${results}?${new URLSearchParams({ q: typed })}` as Route} onClick={close}>All results</Link> : null}
+        </div>
+      ) : null}
+    </>
   )
+}
+
+/** What a screen reader hears once typing has rested. */
+function counted(options: readonly LiveOption[]): string {
+  if (options.length === 0) return 'Nothing yet. Press Enter, then Ask this.'
+  const hits = options.filter((option) => 'hit' in option).length
+  const say = (count: number, one: string) => (count === 0 ? [] : [`${count} ${one}${count === 1 ? '' : 's'}`])
+  return `${[...say(options.length - hits, 'suggestion'), ...say(hits, 'result')].join(' and ')}. Down arrow to choose.`
+}
+
+/** Suggestions without the entries, which stand among the results with all that belongs to them. */
+function useOptions(typed: string): { options: readonly LiveOption[]; error: Error | null; isSettled: boolean } {
+  const words = useRested(typed, 150)
+  const completions = useQuery({ ...completionsOf(words), placeholderData: keepPreviousData })
+  const found = useQuery({ ...liveResults(words), placeholderData: keepPreviousData })
+  const options = useMemo((): LiveOption[] => {
+    if (words.trim() === '') return []
+    const suggestions = (completions.data?.items ?? []).filter(({ kind }) => kind !== 'question' && kind !== 'lesson').slice(0, mostSuggestions)
+    return [
+      ...suggestions.map((suggestion, index) => ({ id: `live-suggestion-${index}`, url: suggestion.url, suggestion })),
+      ...(found.data?.results ?? []).map((hit) => ({ id: `live-${hit.id}`, url: hit.url, hit })),
+    ]
+  }, [words, completions.data, found.data])
+  return { options, error: found.error, isSettled: words === typed && !found.isFetching && !completions.isFetching && found.data !== undefined }
 }
 
 /** What stands in the field. Letters typed while this was being loaded count too, also those between drawing and listening. */
@@ -81,32 +85,4 @@ function useTyped(input: Props['input']): string {
     field?.addEventListener('input', changed)
     return () => field?.removeEventListener('input', changed)
   }, () => input.current?.value ?? '', () => '')
-}
-
-function Option({ hit, isActive, onPick }: { hit: Hit; isActive: boolean; onPick: () => void }) {
-  const standing = hit.cautions.filter((c) => !c.waived)
-  return (
-    <li role="none">
-      <Link id={`live-${hit.id}`} role="option" aria-selected={isActive} href={hit.url as Route} tabIndex={-1} onClick={onPick}>
-        <span className="label">{hitKindLine(hit)}</span>
-        <b>{hit.title}</b>
-        {standing.length > 0 ? <span className="live-caution"><CautionWord word={gravestWord(standing.map((c) => c.signalWord))} /> {[...new Set(standing.map((c) => c.title))].join(', ')}</span> : null}
-        <span className="live-snippet"><MarkedSnippet text={hit.snippet} marks={hit.marks} /></span>
-      </Link>
-    </li>
-  )
-}
-
-/** The combobox attributes live on the field, which was there before this component. */
-function useCombobox(input: RefObject<HTMLInputElement | null>, isExpanded: boolean, activeId: string | null): void {
-  useEffect(() => {
-    const field = input.current
-    if (!field) return
-    field.setAttribute('role', 'combobox')
-    field.setAttribute('aria-autocomplete', 'list')
-    field.setAttribute('aria-expanded', String(isExpanded))
-    field.setAttribute('aria-controls', `${listId}-list`)
-    if (activeId) field.setAttribute('aria-activedescendant', activeId)
-    else field.removeAttribute('aria-activedescendant')
-  }, [input, isExpanded, activeId])
 }

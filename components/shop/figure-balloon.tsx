@@ -16,10 +16,10 @@ export function FigureBalloon({ balloon: { n, at, centre } }: { balloon: Balloon
   )
 }
 
-/** The number alone, to key a note to the figure. */
-export function BalloonNumber({ n }: { n: number }) {
+/** The number alone, to key a note or a post to the figure. `label` says it where the number alone would not. */
+export function BalloonNumber({ n, label = `Balloon ${n}` }: { n: number; label?: string }) {
   return (
-    <svg className="balloon-number" viewBox="0 0 32 32" width="32" height="32" role="img" aria-label={`Balloon ${n}`}>
+    <svg className="balloon-number" viewBox="0 0 32 32" width="32" height="32" role="img" aria-label={label}>
       <circle cx="16" cy="16" r="15" className="figure-balloon" />
       <text x="16" y="16" textAnchor="middle" dominantBaseline="central" className="figure-number">{n}</text>
     </svg>

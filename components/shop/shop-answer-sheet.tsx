@@ -6,7 +6,7 @@ import type { FirstSystem } from '@/lib/format/shop-words'
 import type { ShopAnswer } from '@/lib/schemas/shop'
 import { ShopAnswerView } from './shop-answer-view'
 import type { FigureEntry } from './shop-figures'
-import { shopFieldId, ShopForm } from './shop-form'
+import { shopFieldId, ShopForm, type ShopFormProps } from './shop-form'
 
 export interface ShopAnswerSheetProps {
   table: Pick<ShopTable, 'slug' | 'inputs'>
@@ -17,13 +17,16 @@ export interface ShopAnswerSheetProps {
   first: FirstSystem
   /** What the address says about units, kept by the form. */
   units?: string | undefined
+  /** Kits whose makers' limits can be chosen, and the chosen one. */
+  kits?: ShopFormProps['kits']
+  kit?: string | undefined
 }
 
-export function ShopAnswerSheet({ table, answer, values, errors, first, units }: ShopAnswerSheetProps) {
+export function ShopAnswerSheet({ table, answer, values, errors, first, units, kits, kit }: ShopAnswerSheetProps) {
   return (
     <Sheet as="section">
       {answer ? <ShopAnswerView answer={answer} first={first} entries={entriesOf(table, values)} /> : null}
-      <ShopForm slug={table.slug} inputs={table.inputs} values={values} errors={errors} units={units} />
+      <ShopForm slug={table.slug} inputs={table.inputs} values={values} errors={errors} units={units} kits={kits} kit={kit} />
     </Sheet>
   )
 }

@@ -5,7 +5,7 @@ import { leadResults } from '@/lib/domain/shop/lead-results'
 import type { FirstSystem } from '@/lib/format/shop-words'
 import type { ShopAnswer } from '@/lib/schemas/shop'
 import { AgainstList } from './against-list'
-import { BalloonNotes } from './balloon-notes'
+import { BalloonNotes, type BalloonNotesProps } from './balloon-notes'
 import { figureWidths, ShopFigures, type ShopFiguresProps } from './shop-figures'
 import { ShopLead } from './shop-lead'
 
@@ -14,9 +14,11 @@ export interface ShopAnswerViewProps {
   first: FirstSystem
   /** Boxes on the dimensions; absent where the figure only shows. */
   entries?: ShopFiguresProps['entries']
+  /** Posts on the same page that speak of a balloon. */
+  posts?: BalloonNotesProps['posts']
 }
 
-export function ShopAnswerView({ answer, first, entries }: ShopAnswerViewProps) {
+export function ShopAnswerView({ answer, first, entries, posts }: ShopAnswerViewProps) {
   const drawn = (width: number) => tableFigures(answer.table, answer.inputs, answer.results, width, first)
   const desk = drawn(figureWidths.desk)
   return (
@@ -26,7 +28,7 @@ export function ShopAnswerView({ answer, first, entries }: ShopAnswerViewProps) 
         <ShopLead results={leadResults(answer.table, answer.results)} first={first} />
         <AgainstList results={answer.results} />
       </div>
-      <BalloonNotes balloons={desk.flatMap(({ balloons }) => balloons)} />
+      <BalloonNotes balloons={desk.flatMap(({ balloons }) => balloons)} posts={posts} />
       <p className="print-only"><b>Worked out for:</b> {answer.readAs}</p>
     </div>
   )

@@ -20,16 +20,19 @@ export interface ShopFormProps {
   errors: readonly InputError[]
   /** Travels along, so that a change of inputs keeps the reader's units. */
   units?: string | undefined
+  /** Kits whose makers' limits can be chosen: with none there is nothing to choose. */
+  kits?: readonly { slug: string; name: string; maker: string }[] | undefined
+  kit?: string | undefined
 }
 
-export function ShopForm({ slug, inputs, values, errors, units }: ShopFormProps) {
+export function ShopForm({ slug, inputs, values, errors, units, kits = [], kit }: ShopFormProps) {
   const [needed, others] = [inputs.filter((input) => input.default !== null), inputs.filter((input) => input.default === null)]
   const isOpen = others.some(({ name }) => (values[name] ?? '') !== '' || errors.some(({ path }) => path === name))
   const field = (input: ShopInput) => <ShopField key={input.name} input={input} value={values[input.name] ?? ''} error={errors.find(({ path }) => path === input.name)?.message} />
   return (
     <Form action={paths.shopTable(slug)} scroll={false} id={formId} className="shop-form no-print" aria-label="What you have" noValidate>
       {units ? <input type="hidden" name="units" value={units} /> : null}
-      <div className="shop-fields">{needed.map(field)}</div>
+      <div className="shop-fields">{needed.map(field)}{kits.length > 0 ? <KitField kits={kits} kit={kit} /> : null}</div>
       {others.length > 0 ? (
         <details className="shop-more" open={isOpen}>
           <summary>More you can give: {others.map(({ label }) => label.split(/[:,]/)[0]?.toLowerCase()).join(', ')}</summary>
@@ -37,8 +40,17 @@ export function ShopForm({ slug, inputs, values, errors, units }: ShopFormProps)
         </details>
       ) : null}
       <div className="button-row without-script"><Button type="submit" look="primary">Work it out</Button></div>
-      <ShopFormScript formId={formId} values={values} />
+      <ShopFormScript formId={formId} values={{ ...values, kit: kit ?? '' }} />
     </Form>
+  )
+}
+
+function KitField({ kits, kit }: { kits: NonNullable<ShopFormProps['kits']>; kit: string | undefined }) {
+  return (
+    <Select id={shopFieldId('kit')} name="kit" label="Kit" help="Its maker’s own limits come before the handbook’s." defaultValue={kit ?? ''}>
+      <option value="">handbooks only</option>
+      {kits.map(({ slug, name, maker }) => <option key={slug} value={slug}>{name}, {maker}</option>)}
+    </Select>
   )
 }
 

@@ -14,7 +14,7 @@ export function ShopLead({ results, first }: { results: readonly ShopAnswerResul
   const differ = readings.length > 1
   return (
     <div className="shop-lead">
-      <p className="label">{label}{differ ? ': the sources differ' : ''}</p>
+      <p className="label">{label}{differ ? (results[0]?.basis === 'maker' ? ': the kit maker’s own limit wins' : ': the sources differ') : ''}</p>
       <div className={differ ? 'shop-readings shop-readings-several' : 'shop-readings'}>
         {readings.map((reading, index) => <Reading key={index} results={reading} first={first} isAlone={!differ} />)}
       </div>

@@ -3,7 +3,7 @@
 import 'server-only'
 import { asc, eq, sql } from 'drizzle-orm'
 import type { ReaderOrTransaction } from '../client'
-import { post, remark, revision, type outcome, type postCaution, type rendering, type stamp } from '../schema'
+import { measurement, post, remark, revision, type MeasurementJson, type outcome, type postCaution, type rendering, type stamp } from '../schema'
 import { oneOf } from './one-of'
 import { listPlainTexts, listRenderings } from './renderings'
 
@@ -43,6 +43,10 @@ export interface CautionedPost {
   plain: string | null
   /** The HTML too; null while it is missing, and where it was not asked for. */
   rendering: Row<typeof rendering> | null
+  /** Version of the parser that found `measurements`; 0 = none yet. */
+  measuredBy: number
+  /** Of the plain text, in its order; none where only the plain text was asked for. */
+  measurements: MeasurementJson[]
 }
 
 /** The one predicate of what may stand as advice in a list. */
@@ -52,7 +56,7 @@ export const isVisible = eq(post.state, 'visible')
 export const renderingKey = (postId: number, number: number) => `post:${postId}:${number}`
 export const remarkRenderingKey = (remarkId: number) => `remark:${remarkId}`
 
-/** HTML is several times the text: what only searches or lists posts asks for the plain text alone. */
+/** HTML is several times the text, and measurements half as much again: what only searches or lists posts asks for the plain text alone. */
 type Wanted = 'html' | 'plain'
 
 /** Posts by id with everything that hangs on them, in the order of `ids`; unknown ids are left out. */
@@ -77,6 +81,9 @@ export async function listAnswerIds(reader: ReaderOrTransaction, questionIds: re
 /** A name, the plain name kept from an import, or neither: then the account is gone. */
 const person = (id: number | null, account: { name: string } | null, plainName: string | null): PersonName => ({ id, name: account?.name ?? plainName ?? 'former member' })
 
+/** As SQLite has it. */
+const noLimit = -1
+
 /** One statement for everything but the renderings: all of one moment, and built once a reader, because building it costs as much as running it. */
 function prepareLoad(reader: ReaderOrTransaction) {
   const name = { columns: { name: true } } as const
@@ -88,6 +95,7 @@ function prepareLoad(reader: ReaderOrTransaction) {
       revisions: { columns: { number: true, authorId: true, authorName: true, createdAt: true }, with: { author: name } },
       cautions: true, stamps: true, outcomes: { with: { member: name } }, reliances: { columns: { memberId: true } },
       remarks: { columns: { id: true, authorId: true, authorName: true, body: true, createdAt: true }, where: eq(remark.state, 'visible'), with: { author: name } },
+      measurements: { columns: { found: true }, orderBy: asc(measurement.position), limit: sql.placeholder('mostMeasurements') },
     },
   }).prepare()
 }
@@ -103,7 +111,7 @@ function preparedLoad(reader: ReaderOrTransaction): ReturnType<typeof prepareLoa
 
 async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTransaction, ids: readonly number[], wanted: Wanted): Promise<void> {
   if (ids.length === 0) return
-  const loaded = await preparedLoad(reader).execute({ ids: JSON.stringify(ids) })
+  const loaded = await preparedLoad(reader).execute({ ids: JSON.stringify(ids), mostMeasurements: wanted === 'html' ? noLimit : 0 })
   // A rendering belongs to one revision and never changes, so it may be read a moment later.
   const keys = loaded.map((row) => renderingKey(row.id, row.currentRevision))
   const renderings = wanted === 'html' ? await listRenderings(reader, keys) : []
@@ -117,8 +125,8 @@ async function loadInto(found: Map<number, CautionedPost>, reader: ReaderOrTrans
 
 /** Gives the brand: the one place that may. */
 function caution(row: Loaded, plain: string | null, kept: Row<typeof rendering> | null): CautionedPost {
-  const { author, authorName, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, ...own } = row
-  const { id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt } = own
+  const { author, authorName, current: { kit: ofKit, ...current }, placed, revisions, stamps, outcomes, reliances, remarks, cautions, measurements, ...own } = row
+  const { id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt, measuredBy } = own
   const history = [...revisions].sort((a, b) => a.number - b.number)
   return {
     id, kind, parentId, ref, state, stateReason, stampState, needsTwo, createdAt, updatedAt, author: person(row.authorId, author, authorName),
@@ -129,7 +137,7 @@ function caution(row: Loaded, plain: string | null, kept: Row<typeof rendering> 
     outcomes: [...outcomes].sort((a, b) => a.createdAt - b.createdAt).map(({ member: teller, memberId, revision: number, result, note, createdAt: at }) => ({ memberId, author: teller.name, revision: number, result, note, createdAt: at })),
     goingByThis: reliances.length,
     remarks: [...remarks].sort(byId).map((r) => ({ id: r.id, author: person(r.authorId, r.author, r.authorName), body: r.body, createdAt: r.createdAt })),
-    plain, rendering: kept,
+    plain, rendering: kept, measuredBy, measurements: measurements.map((m) => m.found),
   } as unknown as CautionedPost
 }
 

@@ -43,3 +43,9 @@ export async function countEntries(reader: ReaderOrTransaction, filters: EntryFi
   const [row] = await reader.select({ n: count() }).from(post).where(matching(reader, filters))
   return row?.n ?? 0
 }
+
+/** The entry that a merged one leads to, or null. */
+export async function findMergedInto(reader: ReaderOrTransaction, id: number): Promise<number | null> {
+  const [row] = await reader.select({ into: post.mergedIntoId }).from(post).where(and(eq(post.id, id), eq(post.state, 'merged')))
+  return row?.into ?? null
+}

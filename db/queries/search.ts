@@ -1,8 +1,8 @@
 // What search reads: the change log and the ids of entries. Text comes through cautioned-post.ts like everywhere else.
 import 'server-only'
-import { and, asc, eq, gt, isNull, max, sql } from 'drizzle-orm'
+import { and, asc, desc, eq, gt, isNull, max, sql } from 'drizzle-orm'
 import type { ReaderOrTransaction } from '../client'
-import { change, post } from '../schema'
+import { audit, change, post, setting } from '../schema'
 
 /** The newest sequence of the change log, 0 when nothing was ever written. */
 export async function currentSequence(reader: ReaderOrTransaction): Promise<number> {
@@ -33,4 +33,23 @@ export async function listEntryIdsFrom(reader: ReaderOrTransaction, afterId: num
 export async function countVisibleEntries(reader: ReaderOrTransaction): Promise<number> {
   const [row] = await reader.select({ n: sql<number>`count(*)` }).from(post).where(and(isNull(post.parentId), eq(post.state, 'visible')))
   return row?.n ?? 0
+}
+
+/** Which database this is, copies of it included; empty in one that was last migrated before it was given. */
+export async function databaseIdentity(reader: ReaderOrTransaction): Promise<string> {
+  const [row] = await reader.select({ value: setting.value }).from(setting).where(eq(setting.key, 'database'))
+  return row?.value ?? ''
+}
+
+/** The newest row of the audit chain; its hash stands for all that was recorded before. */
+export async function auditHead(reader: ReaderOrTransaction): Promise<{ sequence: number; hash: string }> {
+  const [row] = await reader.select({ sequence: audit.sequence, hash: audit.hash }).from(audit).orderBy(desc(audit.sequence)).limit(1)
+  return row ?? { sequence: 0, hash: '' }
+}
+
+/** Whether this database has been where the chain had that row: false in a copy from before, and in one that took another way since. */
+export async function hasAuditRow(reader: ReaderOrTransaction, { sequence, hash }: { sequence: number; hash: string }): Promise<boolean> {
+  if (sequence === 0) return true
+  const [row] = await reader.select({ hash: audit.hash }).from(audit).where(eq(audit.sequence, sequence))
+  return row?.hash === hash
 }

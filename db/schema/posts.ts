@@ -28,6 +28,8 @@ export const post = sqliteTable('post', {
   ref: text(),
   state: text({ enum: ['visible', 'hidden', 'merged', 'withdrawn'] }).notNull().default('visible'),
   stateReason: text(),
+  /** The entry that a merged one leads to. */
+  mergedIntoId: integer().references((): AnySQLiteColumn => post.id),
   stateBy: integer().references(() => member.id),
   stateAt: moment(),
   currentRevision: integer().notNull(),

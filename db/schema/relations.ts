@@ -4,7 +4,7 @@ import { relations } from 'drizzle-orm'
 import { postCaution } from './cautions'
 import { kit, section } from './kits'
 import { member } from './people'
-import { outcome, post, postSection, reliance, remark, revision } from './posts'
+import { measurement, outcome, post, postSection, reliance, remark, revision } from './posts'
 import { stamp } from './stamps'
 
 export const postRelations = relations(post, ({ one, many }) => ({
@@ -17,6 +17,7 @@ export const postRelations = relations(post, ({ one, many }) => ({
   outcomes: many(outcome),
   reliances: many(reliance),
   remarks: many(remark),
+  measurements: many(measurement),
 }))
 export const revisionRelations = relations(revision, ({ one }) => ({
   post: one(post, { relationName: 'history', fields: [revision.postId], references: [post.id] }),
@@ -43,4 +44,7 @@ export const relianceRelations = relations(reliance, ({ one }) => ({
 export const remarkRelations = relations(remark, ({ one }) => ({
   post: one(post, { fields: [remark.postId], references: [post.id] }),
   author: one(member, { fields: [remark.authorId], references: [member.id] }),
+}))
+export const measurementRelations = relations(measurement, ({ one }) => ({
+  post: one(post, { fields: [measurement.postId], references: [post.id] }),
 }))

@@ -2,7 +2,7 @@
 import { queryOptions } from '@tanstack/react-query'
 import type { Caution } from '@/lib/schemas/post'
 import type { NumbersCheckItem } from '@/lib/schemas/numbers-check'
-import type { Hit, SearchResult } from '@/lib/schemas/search'
+import type { Hit, SearchResult, Suggestion } from '@/lib/schemas/search'
 
 async function readJson<T>(url: string, signal: AbortSignal, body?: unknown): Promise<T> {
   const response = await fetch(url, {
@@ -23,6 +23,12 @@ export const liveResults = (words: string) => queryOptions({
   queryFn: ({ signal }) => readJson<SearchResult>(`/api/search?${new URLSearchParams({ q: words, limit: '6' })}`, signal),
 })
 
+/** What completes the words: shop tables, sections, operations, entries. */
+export const completionsOf = (words: string) => queryOptions({
+  queryKey: ['suggest', words], enabled: words.trim() !== '', staleTime: 10_000,
+  queryFn: ({ signal }) => readJson<{ items: Suggestion[] }>(`/api/suggest?${new URLSearchParams({ q: words })}`, signal),
+})
+
 /** Posts that may already answer a question being written. */
 export const similarTo = (text: WritingText) => queryOptions({
   queryKey: ['similar', text.title, text.body, text.kit], enabled: text.title.trim().length >= 8, staleTime: 30_000,
@@ -36,10 +42,10 @@ export const requiredOf = (text: WritingText) => queryOptions({
     text.answerTo ?? { title: text.title.slice(0, 160), body: text.body, tasks: text.tasks, sections: text.sections, hardware: text.hardware, ...(text.kit ? { kit: text.kit } : {}) }),
 })
 
-/** The numbers of a text against the shop tables. */
-export const checksOf = (body: string, hardware: readonly string[]) => queryOptions({
-  queryKey: ['numbers-check', body, hardware], enabled: body.trim() !== '', staleTime: 30_000,
-  queryFn: ({ signal }) => readJson<{ checks: NumbersCheckItem[] }>('/api/numbers-check', signal, { text: body, hardware }),
+/** The numbers of a text against the shop tables and the limits of the kit it is about. */
+export const checksOf = (body: string, hardware: readonly string[], kit: string | undefined) => queryOptions({
+  queryKey: ['numbers-check', body, hardware, kit], enabled: body.trim() !== '', staleTime: 30_000,
+  queryFn: ({ signal }) => readJson<{ checks: NumbersCheckItem[] }>('/api/numbers-check', signal, { text: body, hardware, ...(kit ? { kit } : {}) }),
 })
 
 /** Markdown as it will look. */

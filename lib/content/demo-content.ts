@@ -4,6 +4,7 @@ import builds from '@/content/demo/builds.json'
 import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
 import kits from '@/content/demo/kits.json'
+import limits from '@/content/demo/limits.json'
 import members from '@/content/demo/members.json'
 import operations from '@/content/operations.json'
 import type { Basis, ReplyScope } from '@/lib/domain/stamps/stamp-state'
@@ -36,11 +37,12 @@ export interface DemoBuild {
   log: { section: string; day: number; minutes: number; page: string; steps: string; helpers: string; line: string }[]
   holds: { section: string; kind: 'hold' | 'left-open'; what: string; page: string; step: string; until?: string; notWaiting?: string; untilSection?: string; day: number; released?: { day: number; note: string } }[]
 }
+export interface DemoLimit { kit: string; by: string; day: number; table: string; result: string; inputs: Record<string, string>; value: { number?: string; min?: string; max?: string; words?: string }; unit: string; reference: { title: string; section: string; year: string }; note: string }
 
 /** The password of every demo member. The demo says so when it starts. */
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, builds: builds as unknown as DemoBuild[], members: members as DemoMember[],
+  kits, operations, members: members as DemoMember[], builds: builds as unknown as DemoBuild[], limits: limits as unknown as DemoLimit[],
   entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[])],
 }

@@ -3,7 +3,9 @@ import 'server-only'
 import { z } from 'zod'
 import * as post from '@/lib/schemas/post'
 import { problemSchema } from '@/lib/schemas/problem'
+import { measurementSchema } from '@/lib/schemas/measurement'
 import { hitSchema, suggestionSchema } from '@/lib/schemas/search'
+import { shopAnswerSchema, shopResultSchema, sourceSchema } from '@/lib/schemas/shop'
 import { declarationOf, methodNames, type Endpoint, type Handler, type Method } from './route'
 
 type Json = Record<string, unknown>
@@ -18,7 +20,8 @@ export const openApiSchema = z.object({
 /** Shapes that many answers share, by the name they have in the description. */
 const shared: Record<string, z.ZodType> = {
   Caution: post.cautionSchema, Stamp: post.stampSchema, Outcomes: post.outcomesSchema, Remark: post.remarkSchema,
-  Answer: post.answerSchema, Entry: post.entrySchema, Hit: hitSchema, Suggestion: suggestionSchema, Problem: problemSchema,
+  Answer: post.answerSchema, Entry: post.entrySchema, Hit: hitSchema, Suggestion: suggestionSchema,
+  ShopAnswer: shopAnswerSchema, ShopResult: shopResultSchema, Source: sourceSchema, Measurement: measurementSchema, Problem: problemSchema,
 }
 
 /** The whole document for these addresses. Pure but for the schemas it reads. */

@@ -26,11 +26,13 @@ export interface Acts {
   'post.hide': PostSubject
   'stamp.withdraw': { mentorId: number | null }
   'desk.open': undefined
+  'search.explain': undefined
   'evidence.open': undefined
   'people.open': undefined
   'people.set-role': { memberId: number }
   'people.set-state': { memberId: number; role: Role }
   'people.grant-mentorship': { memberId: number }
+  'kit.set-limits': undefined
   'import': undefined
   'account.open': undefined
   'builds.keep': undefined
@@ -61,12 +63,14 @@ const rules: { [A in Act]: Rule<A> } = {
   'post.hide': (actor) => isAtLeast(actor, 'moderator'),
   'stamp.withdraw': (actor, stamp) => actor !== null && stamp.mentorId === actor.id,
   'desk.open': (actor) => actor?.mark != null,
+  'search.explain': (actor) => isAtLeast(actor, 'steward'),
   'evidence.open': (actor) => actor?.mark != null || isAtLeast(actor, 'steward'),
   'people.open': (actor) => isAtLeast(actor, 'steward'),
   'people.set-role': (actor) => isAtLeast(actor, 'steward'),
   // A moderator suspends builders; only a steward suspends those who moderate. Nobody suspends themselves.
   'people.set-state': (actor, s) => actor !== null && actor.id !== s.memberId && (isAtLeast(actor, 'steward') || (isAtLeast(actor, 'moderator') && s.role === 'member')),
   'people.grant-mentorship': (actor, s) => isAtLeast(actor, 'steward') && actor?.id !== s.memberId,
+  'kit.set-limits': (actor) => isAtLeast(actor, 'steward'),
   'import': (actor) => isAtLeast(actor, 'steward'),
   'account.open': (actor) => actor !== null,
   'builds.keep': (actor) => actor !== null,

@@ -8,11 +8,12 @@ import remarkParse from 'remark-parse'
 import remarkRehype from 'remark-rehype'
 import { unified } from 'unified'
 import { dressForPage } from './dress-for-page'
+import { dressMeasurements } from './dress-measurements'
 import { keepAsText } from './keep-as-text'
 import { sanitizeSchema } from './sanitize-schema'
 
 /** Raise it when the same text gives other HTML: kept HTML of another version is rendered anew. */
-export const rendererVersion = 1
+export const rendererVersion = 2
 
 export interface RenderedText {
   /** Sanitised HTML without a wrapping element. */
@@ -24,10 +25,11 @@ export interface RenderedText {
 /** Renders with headings as h4 to h6 and what the page needs. `text` is as `normalizeText` gives it. */
 export function markdownToHtml(text: string): RenderedText {
   const tree = pageTree.runSync(pageTree.parse(text))
-  // The plain text is read before dressing: labels for screen readers are not the member's words.
+  // The plain text is read before dressing: labels for screen readers and conversions are not the member's words.
   // A line after a hard break or a checkbox comes out one space in.
   const plain = toText(tree).replace(/^ (?=\S)/gm, '').trim()
   dressForPage(tree)
+  dressMeasurements(tree)
   return { html: stringify.stringify(tree), plain }
 }
 

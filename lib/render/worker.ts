@@ -3,7 +3,7 @@ import { parentPort } from 'node:worker_threads'
 import { markdownToHtml } from './markdown-to-html'
 import type { RenderReport, RenderRequest } from './messages'
 
-const warmUp = '# a\n\n> - *b* **c** `d` [e](https://example.org) ~~f~~\n\n| g | h |\n| - | - |\n| i | j |\n\n```\nk\n```\n'
+const warmUp = '# a\n\n> - *b* **c** `d` [e](https://example.org) ~~f~~\n\n#30 for 3/16 in, 20-25 in-lb\n\n| g | h |\n| - | - |\n| i | j |\n\n```\nk\n```\n'
 
 function answer(request: RenderRequest): void {
   const html: Record<string, string> = {}

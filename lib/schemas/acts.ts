@@ -1,7 +1,7 @@
 // What members, mentors, moderators and stewards do to posts and people.
 import { z } from 'zod'
 import { basisSchema, replyScopeSchema, resultSchema } from './post'
-import { cautionCode, letter, limits, line, optionalParagraph, paragraph } from './text'
+import { cautionCode, letter, limits, line, optionalParagraph, paragraph, idText } from './text'
 
 export const newRemarkSchema = z.strictObject({ body: paragraph(limits.remark, 'the remark') })
 
@@ -27,6 +27,7 @@ export const askForSchema = z.strictObject({ what: z.enum(['photo-with-scale', '
 export const addCautionSchema = z.strictObject({ code: cautionCode, because: line(200, 'why') })
 export const waiveCautionSchema = z.strictObject({ code: cautionCode, reason: paragraph(limits.reason, 'the reason') })
 export const setStateSchema = z.strictObject({ state: z.enum(['visible', 'hidden']), reason: paragraph(limits.reason, 'the reason') })
+export const mergeEntrySchema = z.strictObject({ into: idText, reason: paragraph(limits.reason, 'the reason') })
 export const setRoleSchema = z.strictObject({ role: z.enum(['member', 'moderator', 'steward']) })
 export const setMemberStateSchema = z.strictObject({ state: z.enum(['active', 'suspended']), reason: paragraph(limits.reason, 'the reason') })
 export const grantMentorshipSchema = z.strictObject({

@@ -1,6 +1,7 @@
 // The numbers check of a text, as the API gives it.
 import { z } from 'zod'
 import { BASES } from '@/lib/domain/shop/shop-table'
+import { sourceSchema } from './shop'
 import { limits, slug } from './text'
 
 const longest = 4 * limits.body
@@ -11,7 +12,7 @@ export const numbersCheckInputSchema = z.strictObject({
 export const numbersCheckSchema = z.object({
   claim: z.string(), start: z.int(), end: z.int(), role: z.enum(['advised', 'measured']), verdict: z.enum(['agrees', 'conflicts', 'cannot-tell']),
   expected: z.string().optional(), table: z.string().optional(),
-  source: z.object({ title: z.string(), section: z.string(), year: z.string() }).nullable().optional(), basis: z.enum(BASES).optional(),
+  source: sourceSchema.nullable().optional(), basis: z.enum(BASES).optional(),
 })
 export const numbersCheckResultSchema = z.object({ checks: z.array(numbersCheckSchema) })
 

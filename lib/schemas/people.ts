@@ -2,6 +2,7 @@
 // What stewards do to members stands in acts.ts.
 import type { Route } from 'next'
 import { z } from 'zod'
+import { unitsChoices } from '@/lib/format/units-choice'
 import { idText, limits, line, optionalParagraph } from './text'
 
 /** Lower-cased, since the same address in another case is the same person. 254 is the most RFC 5321 lets through. */
@@ -28,6 +29,7 @@ export const signInSchema = z.strictObject({
   email: z.string().trim().min(1, 'Write your e-mail address.').max(1000, 'At most 1,000 characters.'), password: presentPassword, from: returnPath,
 })
 export const profileSchema = z.strictObject({ name: line(limits.name, 'your name'), bio: optionalParagraph(limits.note) })
+export const unitsSchema = z.strictObject({ units: z.enum(unitsChoices.map((choice) => choice.value), 'Choose one of the three.') })
 export const changePasswordSchema = z.strictObject({ currentPassword: presentPassword, newPassword })
 export const newTokenSchema = z.strictObject({ name: line(limits.name, 'a name, such as the program that will use it') })
 export const revokeTokenSchema = z.strictObject({ tokenId: idText })
@@ -35,4 +37,5 @@ export const closeAccountSchema = z.strictObject({ currentPassword: presentPassw
 
 export type SignUp = z.infer<typeof signUpSchema>
 export type Profile = z.infer<typeof profileSchema>
+export type Units = z.infer<typeof unitsSchema>
 export type ChangePassword = z.infer<typeof changePasswordSchema>

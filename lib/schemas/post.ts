@@ -2,13 +2,14 @@
 import { z } from 'zod'
 import { CAUTION_TOPICS } from '@/lib/domain/cautions/rule-table'
 import { stampStates, bases, replyScopes } from '@/lib/domain/stamps/stamp-state'
+import { measurementSchema } from './measurement'
 
 export const stampStateSchema = z.enum(stampStates)
 export const basisSchema = z.enum(bases)
 export const replyScopeSchema = z.enum(replyScopes)
 export const resultSchema = z.enum(['as-written', 'with-change', 'did-not-work'])
-const isoMoment = z.iso.datetime()
-const person = z.object({ id: z.int().optional(), name: z.string() })
+export const isoMoment = z.iso.datetime()
+export const person = z.object({ id: z.int().optional(), name: z.string() })
 
 export const cautionSchema = z.object({
   code: z.string(), signalWord: z.enum(['WARNING', 'CAUTION', 'NOTICE']), topic: z.enum(CAUTION_TOPICS), title: z.string(), text: z.string(),
@@ -30,7 +31,7 @@ export const orderAdviceSchema = z.object({ before: z.string(), after: z.string(
 
 const postShape = {
   id: z.int(), kind: z.enum(['question', 'lesson', 'answer']), parentId: z.int().optional(), ref: z.string().optional(), revision: z.string(), author: person,
-  createdAt: isoMoment, updatedAt: isoMoment, html: z.string(), text: z.string(), measurements: z.array(z.never()),
+  createdAt: isoMoment, updatedAt: isoMoment, html: z.string(), text: z.string(), measurements: z.array(measurementSchema),
   cautions: z.array(cautionSchema), stamp: stampStateSchema, missing: z.enum(['first', 'second', 'firm-basis']).nullable(), stamps: z.array(stampSchema), needsTwo: z.boolean(),
   outcomes: outcomesSchema, goingByThis: z.int(), remarks: z.array(remarkSchema),
   revisions: z.array(z.object({ revision: z.string(), author: person, createdAt: isoMoment })),

@@ -42,7 +42,10 @@ export const hitSchema = z.object({
   /** Sections and tasks as they are printed on part tags. */
   partTags: z.array(z.object({ code: z.string().optional(), title: z.string() })),
   stamp: stampStateSchema, stamps: z.array(stampSchema), needsTwo: z.boolean(),
+  /** Its order advice about the two tasks a question asks the order of, by title; contrary advice stands in other hits, or beside it. */
+  orderAdvice: z.array(z.object({ postId: z.int(), before: z.string(), after: z.string() })).optional(),
   open: z.boolean(), answers: z.int(), outcomes: outcomesSchema, cautions: z.array(cautionSchema),
+  balloons: z.array(z.int()).describe('Numbers of the balloons of computed[0] that the passage speaks of, most about first; empty without a computed answer.'),
 })
 export const searchResultSchema = z.object({
   query: z.object({ text: z.string(), ignored: z.array(z.string()), measurements: z.array(measurementSchema), didYouMean: z.string().optional() }),
@@ -50,11 +53,11 @@ export const searchResultSchema = z.object({
   computed: z.array(shopAnswerSchema), results: z.array(hitSchema), total: z.int(), tookMs: z.number(),
 })
 export const suggestionSchema = z.object({
-  text: z.string(), kind: z.enum(['question', 'lesson', 'section', 'operation']), id: z.int().optional(), url: z.string(),
+  text: z.string(), kind: z.enum(['question', 'lesson', 'section', 'operation', 'shop']), id: z.int().optional(), url: z.string(),
   cautions: z.array(z.object({ signalWord: z.enum(['WARNING', 'CAUTION', 'NOTICE']), topic: z.enum(CAUTION_TOPICS) })),
 })
 export const requiredCautionsResultSchema = z.object({ cautions: z.array(cautionSchema) })
-export const previewResultSchema = z.object({ html: z.string(), measurements: z.array(z.never()) })
+export const previewResultSchema = z.object({ html: z.string(), measurements: z.array(measurementSchema) })
 
 export type Hit = z.infer<typeof hitSchema>
 export type SearchQuery = z.infer<typeof searchQuerySchema>

@@ -21,12 +21,15 @@ export const shopListSchema = z.object({
   })),
 })
 
+/** Whose a value is. */
+export const sourceSchema = z.object({ title: z.string(), section: z.string(), year: z.string() })
+
 export const shopResultSchema = z.object({
   name: z.string(), label: z.string(),
   /** A number, a range, words, or nothing where the table has no value. */
   value: z.object({ number: z.number().optional(), min: z.number().optional(), max: z.number().optional(), label: z.string().optional() }),
   unit: z.string(), display: z.object({ inch: z.string(), metric: z.string() }),
-  source: z.object({ title: z.string(), section: z.string(), year: z.string() }).nullable(), basis: z.enum(BASES),
+  source: sourceSchema.nullable(), basis: z.enum(BASES),
   note: z.string().optional(), how: z.string().optional(),
   /** In what the caller's own measure doesn't meet this result. */
   against: z.string().optional(),
@@ -35,6 +38,7 @@ export const shopAnswerSchema = z.object({
   table: z.string(), inputs: z.record(z.string(), z.union([z.string(), z.number()])), readAs: z.string(),
   alternatives: z.array(z.object({ label: z.string(), url: z.string() })), results: z.array(shopResultSchema),
   cautions: z.array(cautionSchema), url: z.string(),
+  balloons: z.array(z.object({ n: z.int(), label: z.string(), note: z.string() })).describe('The numbered balloons of the drawing: what feature each points at. Hits of a search carry these numbers.'),
 })
 
 /** Names and limits are the table's; they are checked by it. */

@@ -1,6 +1,8 @@
-// Which terms an entry is indexed under: title three times, labels once, its passages, and the synonym groups they stand in.
+// Which terms an entry is indexed under: title several times, labels once, its passages, the synonym groups they stand in,
+// and the values of their measurements.
 import 'server-only'
 import { analyseText } from '@/lib/domain/search/analyse-text'
+import { findValues } from '@/lib/domain/search/number-terms'
 import type { Synonyms } from '@/lib/domain/search/synonyms'
 import type { SearchDocument } from './messages'
 
@@ -11,11 +13,11 @@ export interface DocumentTerms {
   words: Set<string>
 }
 
-/** Weight by repetition, because one joined field ranks better than several (measured). */
-const titleRepeats = 3
-
-/** Terms of an entry; the same document always gives the same terms, so that it can be counted out again. */
-export function termsOfDocument(document: SearchDocument, synonyms: Synonyms): DocumentTerms {
+/**
+ * Terms of an entry; the same document always gives the same terms, so that it can be counted out again.
+ * The title weighs by repetition, because one joined field ranks better than several (measured).
+ */
+export function termsOfDocument(document: SearchDocument, synonyms: Synonyms, titleRepeats: number): DocumentTerms {
   const result: DocumentTerms = { all: [], words: new Set() }
   const title = readPart(document.title, synonyms, result)
   for (let repeat = 1; repeat < titleRepeats; repeat++) result.all.push(...title)
@@ -32,15 +34,14 @@ function readPart(text: string, synonyms: Synonyms, result: DocumentTerms): stri
     if (token.word.length > 2) result.words.add(token.word)
   }
   for (const match of synonyms.labelText(tokens)) terms.push(...match.terms)
+  for (const value of findValues(text)) terms.push(...value.terms)
   for (const term of terms) result.all.push(term)
   return terms
 }
 
-/** Adds or takes away one entry's different terms from the counts of entries a term. */
-export function countTerms(frequencies: Map<string, number>, terms: readonly string[], by: 1 | -1): void {
-  for (const term of new Set(terms)) {
-    const count = (frequencies.get(term) ?? 0) + by
-    if (count > 0) frequencies.set(term, count)
-    else frequencies.delete(term)
-  }
+/** How often each term stands there. */
+export function countTerms(terms: readonly string[]): Map<string, number> {
+  const counts = new Map<string, number>()
+  for (const term of terms) counts.set(term, (counts.get(term) ?? 0) + 1)
+  return counts
 }

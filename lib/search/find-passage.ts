@@ -5,13 +5,20 @@ import type { PlacedTermsOfTexts } from './placed-terms'
 import type { Question } from './question'
 
 const mostTerms = 40
+/** More than any coverage × evidence. */
+const preferredWorth = 2
 
-/** The passage with most of the question × its evidence; the entry itself when nothing decides. `terms` also holds the title's words. */
-export function findPassage(document: SearchDocument, question: Question, texts: PlacedTermsOfTexts): { postId: number; terms: string[] } {
+const never: ReadonlySet<number> = new Set()
+
+/**
+ * The passage with most of the question × its evidence; the entry itself when nothing decides. `terms` also holds the title's words.
+ * @param preferred posts that answer the question beyond their words, and so come first
+ */
+export function findPassage(document: SearchDocument, question: Question, texts: PlacedTermsOfTexts, preferred = never): { postId: number; terms: string[] } {
   let best = { postId: document.id, worth: 0, words: new Set<string>() }
   for (const { postId, text, weight } of document.passages) {
     const held = readMatches(text, question, texts)
-    const worth = question.coverage((term) => held.terms.has(term)) * weight
+    const worth = question.coverage((term) => held.terms.has(term)) * weight + (preferred.has(postId) ? preferredWorth : 0)
     if (worth > best.worth) best = { postId, worth, words: held.words }
   }
   const inTitle = readMatches(document.title, question, texts).words

@@ -8,9 +8,9 @@ export class HeldTerms {
   private readonly bits: Int32Array
   private slot = 0
 
-  constructor(terms: number, slots: number) {
+  constructor(terms: number, readonly size: number) {
     this.width = Math.max(1, Math.ceil(terms / 32))
-    this.bits = new Int32Array(this.width * slots)
+    this.bits = new Int32Array(this.width * size)
   }
 
   note(slot: number, term: number): void {

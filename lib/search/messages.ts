@@ -1,4 +1,9 @@
 // What passes through the search door, as plain messages: the index lives in a worker thread. Shared by both sides; no I/O.
+import type { TaskName } from '@/lib/domain/search/task-names'
+import type { SearchExplanation } from './explanation'
+
+/** Advice of one post: this task before that one. */
+export interface OrderAdvice { postId: number; before: TaskName; after: TaskName }
 
 /** One entry as the index sees it. Built in lib/search/build-document.ts from CautionedPosts. */
 export interface SearchDocument {
@@ -18,6 +23,8 @@ export interface SearchDocument {
   labels: string
   /** The entry itself first, then its visible answers; `weight` is the evidence factor from lib/domain/search. */
   passages: { postId: number; text: string; weight: number }[]
+  /** Order advice of the entry and of its visible answers. */
+  orderAdvice?: OrderAdvice[]
 }
 
 export interface SearchFilters {
@@ -30,8 +37,21 @@ export interface SearchFilters {
 
 export interface SearchRequest { text: string; filters: SearchFilters; limit: number; offset: number }
 
+/** Advice about the two tasks a question asks the order of, by task slug. */
+export interface AdviceFound { postId: number; before: string; after: string }
+
+export interface SearchHit {
+  id: number
+  postId: number
+  score: number
+  /** Words as they stand in the text, for marking. */
+  terms: string[]
+  /** Its order advice about the pair in question; absent when the question is none of order or it has none. */
+  advice?: AdviceFound[]
+}
+
 export interface SearchAnswer {
-  hits: { id: number; postId: number; score: number; /** words as they stand in the text, for marking */ terms: string[] }[]
+  hits: SearchHit[]
   total: number
   /** Query words that were not searched (too many, or stop words only). */
   ignored: string[]
@@ -40,7 +60,19 @@ export interface SearchAnswer {
   sequence: number
 }
 
-export interface SearchHealth { state: 'loading' | 'ready'; documents: number; sequence: number }
+export interface SearchHealth {
+  state: 'loading' | 'ready'
+  documents: number
+  sequence: number
+  /** What the search thread has, heap and buffers, now and at most since it started; megabytes of 10⁶ bytes. */
+  memoryMB: number
+  highestMemoryMB: number
+  /** What the index was filled from, and why not from a snapshot when it was not. Absent while that is not known. */
+  startedFrom?: 'snapshot' | 'tables'
+  because?: string
+  /** The newest snapshot that this process saved or started from. */
+  snapshot?: { sequence: number; savedAt: number; MB: number; seconds?: number; highestMemoryMB?: number }
+}
 
 export type WhenOrdered = (entryIds: number[]) => void
 
@@ -52,6 +84,8 @@ export interface SearchDoor {
   similar(text: string, filters: SearchFilters, limit: number): Promise<SearchAnswer['hits']>
   /** Titles that complete what is being typed. */
   suggest(text: string, limit: number): Promise<{ id: number; title: string }[]>
+  /** Why the hits of a search stand where they stand, said by what ranks them. */
+  explain(request: SearchRequest): Promise<SearchExplanation>
   health(): SearchHealth
   /** Reads the change log now and resolves when everything committed before the call can be found. */
   catchUp(): Promise<void>

@@ -3,10 +3,12 @@
 import 'server-only'
 import type { Database } from '@/db/client'
 import { currentSequence, listChangesAfter, listVisibleEntryIds } from '@/db/queries/search'
+import type { SearchExplanation } from './explanation'
 import { SearchLoadingError, type SearchAnswer, type SearchDoor, type SearchFilters, type SearchHealth, type SearchRequest, type WhenOrdered } from './messages'
 import { DocumentReader, readTitles } from './read-documents'
 import { SearchThread } from './search-thread'
-import type { Changes } from './worker-messages'
+import { SnapshotKeeper, type SnapshotSettings, type Tell } from './snapshot/snapshot-keeper'
+import type { Changes, Filled } from './worker-messages'
 
 export interface SearchSettings {
   database: Database
@@ -14,6 +16,10 @@ export interface SearchSettings {
   workerFile: string
   /** How often the change log is read for what other processes wrote. */
   pollMs?: number
+  /** Where the index is kept between two starts; absent = nowhere, and every start reads the tables. */
+  snapshots?: SnapshotSettings
+  /** Hears what the index was filled from, and of snapshots. */
+  onEvent?: Tell
   /** Hears of a thread that ended and of a log that could not be read; both are tried again. */
   onError?: (error: unknown) => void
 }
@@ -21,6 +27,7 @@ export interface SearchSettings {
 const callTimeoutMs = 5_000
 const applyTimeoutMs = 60_000
 const longestWaitMs = 30_000
+const memoryEveryMs = 2_000
 const idsARead = 400
 const changesARead = 500
 
@@ -33,19 +40,22 @@ class Search implements SearchDoor {
   private thread: SearchThread | null = null
   private ready = false
   private closed = false
-  private documents = 0
+  private filled: Filled = { documents: 0, memoryMB: 0 }
+  private highestMemoryMB = 0
+  private startedFrom: Pick<SearchHealth, 'startedFrom' | 'because'> = {}
   private sequence = 0
+  private memoryAskedAt = performance.now()
   private following: Promise<void> | null = null
   private readonly whenReady = new Set<() => void>()
   private readonly whenFurther = new Set<() => void>()
   private readonly timer: NodeJS.Timeout
   private readonly onError: (error: unknown) => void
+  private readonly keeper: SnapshotKeeper | null
 
   constructor(private readonly settings: SearchSettings) {
     this.onError = settings.onError ?? (() => undefined)
-    this.timer = setInterval(() => {
-      if (this.ready) this.follow().catch(this.onError)
-    }, settings.pollMs ?? 250)
+    this.keeper = settings.snapshots ? new SnapshotKeeper(settings.database.reader, settings.snapshots, settings.onEvent ?? (() => undefined)) : null
+    this.timer = setInterval(() => this.poll(), settings.pollMs ?? 250)
     this.timer.unref()
     void this.keepRunning()
   }
@@ -59,8 +69,15 @@ class Search implements SearchDoor {
   suggest = async (text: string, limit: number): Promise<{ id: number; title: string }[]> =>
     this.readyThread().call('suggest', { text, limit }, callTimeoutMs)
 
+  explain = async (request: SearchRequest): Promise<SearchExplanation> =>
+    this.readyThread().call('explain', request, callTimeoutMs)
+
   health(): SearchHealth {
-    return { state: this.ready ? 'ready' : 'loading', documents: this.documents, sequence: this.sequence }
+    const { latest } = this.keeper ?? {}
+    return {
+      state: this.ready ? 'ready' : 'loading', documents: this.filled.documents, sequence: this.sequence,
+      memoryMB: this.filled.memoryMB, highestMemoryMB: this.highestMemoryMB, ...this.startedFrom, ...(latest ? { snapshot: latest } : {}),
+    }
   }
 
   async catchUp(): Promise<void> {
@@ -80,6 +97,17 @@ class Search implements SearchDoor {
     clearInterval(this.timer)
     this.wakeWaiting()
     await this.thread?.end(new Error('search was closed'))
+    await this.keeper?.abandon()
+  }
+
+  private poll(): void {
+    const { thread } = this
+    if (!this.ready || !thread) return
+    this.follow().catch(this.onError)
+    this.keeper?.saveWhenDue(thread, this.sequence, this.onError)
+    if (performance.now() < this.memoryAskedAt + memoryEveryMs) return
+    this.memoryAskedAt = performance.now()
+    thread.call('memory', null, callTimeoutMs).then((filled) => this.note(filled), () => undefined)
   }
 
   /** One thread after the other until closed: each is filled, serves, and is followed by the next when it is lost. */
@@ -103,10 +131,32 @@ class Search implements SearchDoor {
     }
   }
 
-  /** Fills an empty thread. The sequence is read first: what is written during the walk is read again from the log. */
+  /** Fills an empty thread, from a snapshot when there is one to trust, and brings it up to what stands in the log. */
   private async load(thread: SearchThread): Promise<void> {
+    const begun = performance.now()
+    this.filled = { documents: 0, memoryMB: 0 }
+    this.highestMemoryMB = 0
+    this.startedFrom = {}
+    const restored = await this.keeper?.restore(thread) ?? { because: 'no snapshots are kept' }
+    if ('because' in restored) {
+      this.startedFrom = { startedFrom: 'tables', because: restored.because }
+      await this.build(thread)
+    } else {
+      this.startedFrom = { startedFrom: 'snapshot' }
+      this.sequence = restored.sequence
+      this.note(restored.filled)
+    }
+    const filledAt = this.sequence
+    // Up to what stands there now, and no further: while somebody goes on writing the log has no end, and search would stay shut.
+    await this.followWith(thread, await currentSequence(this.settings.database.reader))
+    this.settings.onEvent?.('ready', {
+      ...this.startedFrom, seconds: Math.round((performance.now() - begun) / 100) / 10, documents: this.filled.documents, changes: this.sequence - filledAt, memoryMB: this.filled.memoryMB,
+    })
+  }
+
+  /** Walks over all entries. The sequence is read first: what is written during the walk is read again from the log. */
+  private async build(thread: SearchThread): Promise<void> {
     const { database } = this.settings
-    this.documents = 0
     this.sequence = await currentSequence(database.reader)
     const documents = new DocumentReader(database, await readTitles(database.reader))
     let pending: Promise<unknown> = Promise.resolve()
@@ -123,8 +173,6 @@ class Search implements SearchDoor {
       }
     }
     await pending
-    // Up to what stands there now, and no further: while somebody goes on writing the log has no end, and search would stay shut.
-    await this.followWith(thread, await currentSequence(database.reader))
   }
 
   /** Reads the log once to its end; calls that come meanwhile share the run. */
@@ -155,8 +203,12 @@ class Search implements SearchDoor {
   }
 
   private async apply(thread: SearchThread, changes: Changes): Promise<void> {
-    const { documents } = await thread.call('apply', changes, applyTimeoutMs)
-    this.documents = documents
+    this.note(await thread.call('apply', changes, applyTimeoutMs))
+  }
+
+  private note(filled: Filled): void {
+    this.filled = filled
+    this.highestMemoryMB = Math.max(this.highestMemoryMB, filled.memoryMB)
   }
 
   private readyThread(): SearchThread {

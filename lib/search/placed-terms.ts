@@ -1,9 +1,10 @@
 // Which terms stand where in a text: what marks a hit. Kept for the texts read last, because the same entries are found again and again.
 import 'server-only'
 import { analyseText } from '@/lib/domain/search/analyse-text'
+import { findValues } from '@/lib/domain/search/number-terms'
 import type { Synonyms } from '@/lib/domain/search/synonyms'
 
-/** The n-th term (a synonym group is one too) stands at [starts[n], ends[n]), UTF-16. Three lists and no objects, because a text has hundreds. */
+/** The n-th term (a synonym group or a measurement's value is one too) stands at [starts[n], ends[n]), UTF-16. Three lists and no objects, because a text has hundreds. */
 export interface PlacedTerms { terms: readonly string[]; starts: readonly number[]; ends: readonly number[] }
 
 /** Some ten kilobytes each. */
@@ -44,5 +45,6 @@ function placeTerms(text: string, synonyms: Synonyms): PlacedTerms {
   for (const { first, last, terms: groups } of synonyms.labelText(tokens)) {
     for (const group of groups) place(group, tokens[first]?.start ?? 0, tokens[last]?.end ?? 0)
   }
+  for (const value of findValues(text)) for (const term of value.terms) place(term, value.start, value.end)
   return { terms, starts, ends }
 }

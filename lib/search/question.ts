@@ -2,8 +2,8 @@
 import 'server-only'
 import type { Concept, Route } from '@/lib/domain/search/understand-query'
 
-interface NumberedRoute { first: number; others: readonly number[]; weight: number; strength: number }
-interface NumberedConcept { mass: number; routes: readonly NumberedRoute[] }
+interface NumberedRoute { route: Route; first: number; others: readonly number[]; weight: number; strength: number; unless: number | undefined }
+interface NumberedConcept { concept: Concept; mass: number; routes: readonly NumberedRoute[] }
 
 /** Which of a question's terms something holds. */
 export type Holds = (term: number) => boolean
@@ -18,9 +18,10 @@ export class Question {
 
   constructor(concepts: readonly Concept[]) {
     // Strongest first, so that coverage can stop at the first route that holds.
-    this.concepts = concepts.map(({ mass, routes }) => ({
-      mass,
-      routes: [...routes].sort((a, b) => b.strength - a.strength).map((route) => this.numbered(route)),
+    this.concepts = concepts.map((concept) => ({
+      concept,
+      mass: concept.mass,
+      routes: [...concept.routes].sort((a, b) => b.strength - a.strength).map((route) => this.numbered(route)),
     }))
     this.terms = [...this.numbers.keys()]
     this.mass = concepts.reduce((sum, { mass }) => sum + mass, 0)
@@ -48,19 +49,28 @@ export class Question {
     return covered / this.mass
   }
 
+  /** Each concept with the route that `coverage` counts, null where none holds. */
+  covering(holds: Holds): { concept: Concept; route: Route | null }[] {
+    return this.concepts.map(({ concept, routes }) => ({
+      concept, route: routes.find(({ first, others }) => holds(first) && holdsAll(others, holds))?.route ?? null,
+    }))
+  }
+
   /** Factor of a term's text score: the sum of the routes it completes. */
   weight(term: number, holds: Holds): number {
     let sum = 0
-    for (const { first, others, weight } of this.routesOf[term] ?? []) {
+    for (const { first, others, weight, unless } of this.routesOf[term] ?? []) {
+      if (unless !== undefined && holds(unless)) continue
       if (others.length === 0) sum += weight
       else if (holds(first) && holdsAll(others, holds)) sum += weight / (1 + others.length)
     }
     return sum
   }
 
-  private numbered({ terms, weight, strength }: Route): NumberedRoute {
+  private numbered(route: Route): NumberedRoute {
+    const { terms, weight, strength, unless } = route
     const [first = 0, ...others] = terms.map((term) => this.numberOf(term))
-    return { first, others, weight, strength }
+    return { route, first, others, weight, strength, unless: unless === undefined ? undefined : this.numberOf(unless) }
   }
 
   private numberOf(term: string): number {

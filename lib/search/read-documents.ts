@@ -19,6 +19,7 @@ export async function readTitles(reader: Reader): Promise<SearchTitles> {
   return {
     operations: new Map(operations.map(({ slug, title }) => [slug, title])),
     tasks: new Map(operations.flatMap(({ tasks }) => tasks.map(({ slug, title }) => [slug, title] as const))),
+    operationOfTask: new Map(operations.flatMap(({ title, tasks }) => tasks.map(({ slug }) => [slug, title] as const))),
   }
 }
 

@@ -1,92 +1,135 @@
-// The index itself: postings, titles and the words of the corpus side by side, and the order of what they find.
+// The index itself: postings, titles and the words of the corpus side by side. The order of what they find is ranking.ts.
 // Lives in the worker thread; knows entries only as SearchDocuments.
 import 'server-only'
 import { leastCoverage } from '@/lib/domain/search/least-coverage'
-import { understandQuery, type Concept, type Corpus } from '@/lib/domain/search/understand-query'
+import { understandQuery, type Concept, type Corpus, type UnderstoodQuery } from '@/lib/domain/search/understand-query'
 import { Synonyms, type SynonymList } from '@/lib/domain/search/synonyms'
 import { Vocabulary } from '@/lib/domain/search/vocabulary'
+import { searchWeights, type SearchWeights } from '@/lib/domain/search/weights'
 import { entryWeight } from '@/lib/domain/search/entry-weight'
-import { countTerms, termsOfDocument, type DocumentTerms } from './document-terms'
+import { TaskNames } from '@/lib/domain/search/task-names'
+import { AskedDirectly } from './asked-directly'
+import { countTerms, termsOfDocument } from './document-terms'
+import { feedbackQuestion } from './feedback-question'
+import { explainHits } from './explain-hits'
+import type { SearchExplanation } from './explanation'
 import { findPassage } from './find-passage'
-import type { HeldTerms } from './held-terms'
 import type { SearchAnswer, SearchDocument, SearchFilters, SearchRequest, WhenOrdered } from './messages'
+import { packDocument, unpackDocument, type PackedDocument } from './packed-document'
+import type { PostingList } from './posting-list'
 import { Postings } from './postings'
 import { Question } from './question'
+import { mostScored, Ranking, type Asked, type Kept, type Ranked, type Scored } from './ranking'
 import { PlacedTermsOfTexts } from './placed-terms'
 import { TitleIndex } from './title-index'
 
 const mostConcepts = 24
 const mostConceptsOfSimilar = 12
 const leastCoverageOfSimilar = 0.25
-/** Entries far below the best one only share a common word with the question. */
-const leastShareOfBest = 0.25
-/** Of more entries than this only those that hold most of the question are scored, of equals those with the best evidence; the rest follow by what they hold. */
-const mostScored = 1_000
 /** A whole title holds so many terms that few entries share the same part of it: fewer are enough to find the nearest. */
 const mostScoredOfSimilar = 300
 /** Postings read for one question; the commonest words are left out beyond it, so that no text takes long. */
 const mostPostings = 120_000
 
-/** The postings know an entry by its slot, a small number used again after the entry is gone: bits are kept by it. */
-interface Kept { slot: number; document: SearchDocument; weight: number }
-interface Scored { kept: Kept; coverage: number; score: number }
-interface Wanted { least: number; mostScored: number; wanted: number }
+interface Looked extends Asked { understood: UnderstoodQuery; tooCommon: string[]; least: number; ranked: Ranked }
+/** What a snapshot keeps of an entry. */
+export interface IndexRecord { document: PackedDocument; terms: ReadonlyMap<string, number>; words: ReadonlySet<string> }
 type Found = Pick<SearchAnswer, 'hits' | 'total' | 'ignored' | 'didYouMean'>
 
 export class SearchIndex {
-  private readonly postings = new Postings()
+  private readonly postings: Postings
   private readonly kept = new Map<number, Kept>()
   private readonly slots: (Kept | undefined)[] = []
   private readonly freeSlots: number[] = []
-  private readonly frequencies = new Map<string, number>()
   private readonly vocabulary = new Vocabulary()
   private readonly titles = new TitleIndex()
   private readonly synonyms: Synonyms
   private readonly placed: PlacedTermsOfTexts
+  private readonly tasks: TaskNames
+  private readonly ranking: Ranking
 
-  constructor(synonyms: SynonymList) {
+  constructor(synonyms: SynonymList, private readonly weights: SearchWeights = searchWeights) {
+    this.postings = new Postings(weights.bm25)
+    this.ranking = new Ranking(this.postings, this.slots)
     this.synonyms = new Synonyms(synonyms)
     this.placed = new PlacedTermsOfTexts(this.synonyms)
+    this.tasks = new TaskNames(this.synonyms)
   }
 
   get documents(): number {
     return this.kept.size
   }
 
+  /** Bytes kept outside the heap, nearly. */
+  get bytes(): number {
+    let sum = this.postings.bytes
+    for (const { document } of this.kept.values()) sum += document.texts.byteLength
+    return sum
+  }
+
   /** Adds an entry or puts its new text in place of the old. */
   put(document: SearchDocument): void {
     this.remove(document.id)
-    const terms = termsOfDocument(document, this.synonyms)
-    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
-    this.postings.add(kept.slot, terms.all)
-    this.titles.put(document.id, document.title)
-    this.count(terms, 1)
-    this.kept.set(document.id, kept)
-    this.slots[kept.slot] = kept
+    const { all, words } = termsOfDocument(document, this.synonyms, this.weights.titleRepeats)
+    const { slot } = this.keep(packDocument(document))
+    this.postings.add(slot, countTerms(all))
+    for (const word of words) this.vocabulary.add(word)
   }
 
   /** Takes an entry out; nothing happens when it is not in. */
   remove(id: number): void {
     const old = this.kept.get(id)
     if (!old) return
-    const terms = termsOfDocument(old.document, this.synonyms)
-    this.count(terms, -1)
-    this.postings.remove(old.slot, terms.all)
+    const { all, words } = termsOfDocument(unpackDocument(old.document), this.synonyms, this.weights.titleRepeats)
+    for (const word of words) this.vocabulary.remove(word)
+    this.postings.remove(old.slot, new Set(all))
     this.slots[old.slot] = undefined
     this.freeSlots.push(old.slot)
     this.titles.remove(id)
     this.kept.delete(id)
+    for (const { before, after } of old.document.orderAdvice ?? []) for (const { slug } of [before, after]) this.tasks.remove(slug)
   }
 
-  search({ text, filters, limit, offset }: SearchRequest, whenOrdered?: WhenOrdered): Found {
-    const { concepts, ignored, didYouMean } = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
-    const { affordable, tooCommon } = this.afford(concepts)
-    const question = new Question(affordable)
-    const found = this.rank(question, filters, { least: leastCoverage(affordable.length), mostScored, wanted: offset + limit })
-    const page = found.slice(offset, offset + limit)
+  /** Ids of all entries, in the order in which a snapshot keeps them. */
+  ids(): number[] {
+    return [...this.kept.keys()]
+  }
+
+  /** An entry with its terms, as a snapshot keeps it; null when it is not in. */
+  record(id: number): IndexRecord | null {
+    const kept = this.kept.get(id)
+    if (!kept) return null
+    const { all, words } = termsOfDocument(unpackDocument(kept.document), this.synonyms, this.weights.titleRepeats)
+    return { document: kept.document, terms: countTerms(all), words }
+  }
+
+  /** Puts in an entry whose terms are known; `terms` holds a list and a count each. Only for an index that is being filled, once an entry. */
+  restore(document: PackedDocument, terms: Iterable<readonly [PostingList, number]>): void {
+    const { slot } = this.keep(document)
+    let different = 0
+    for (const [list, count] of terms) {
+      list.put(slot, count)
+      different++
+    }
+    this.postings.noteLength(slot, different)
+  }
+
+  /** The list of `term`, to restore with. */
+  listOf(term: string): PostingList {
+    return this.postings.listOf(term)
+  }
+
+  restoreWord(word: string, documents: number): void {
+    this.vocabulary.add(word, documents)
+  }
+
+  search(request: SearchRequest, whenOrdered?: WhenOrdered): Found {
+    const looked = this.look(request)
+    const { understood: { ignored, didYouMean }, ranked: { found }, tooCommon } = looked
+    const page = found.slice(request.offset, request.offset + request.limit)
     whenOrdered?.(page.map(({ kept }) => kept.document.id))
     return {
-      hits: page.map((scored) => this.hit(scored, question)),
+      hits: page.map((scored) => this.hit(scored, looked)),
       total: found.length,
       ignored: [...ignored, ...tooCommon],
       // A spelling under which nothing is found either helps nobody.
@@ -94,10 +137,21 @@ export class SearchIndex {
     }
   }
 
+  /** The same search, told instead of shown. */
+  explain(request: SearchRequest): SearchExplanation {
+    const { understood, tooCommon, ...looked } = this.look(request)
+    const page = looked.ranked.found.slice(request.offset, request.offset + request.limit)
+    return {
+      ...explainHits(page.map((hit) => ({ ...hit, kept: { ...hit.kept, document: unpackDocument(hit.kept.document) } })), { ...looked, ...looked.ranked, postings: this.postings, placed: this.placed, synonyms: this.synonyms, frequency: this.corpus().frequency }),
+      documents: this.kept.size, ignored: [...understood.ignored, ...tooCommon], didYouMean: understood.didYouMean, places: understood.places,
+    }
+  }
+
   similar(text: string, filters: SearchFilters, limit: number): SearchAnswer['hits'] {
     const { concepts } = understandQuery(text, this.corpus(), { mostConcepts: mostConceptsOfSimilar, completeLast: false, correct: false })
     const question = new Question(this.afford(concepts.filter((concept) => concept.routes.length > 0)).affordable)
-    return this.rank(question, filters, { least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar, wanted: limit }).slice(0, limit).map((scored) => this.hit(scored, question))
+    const asked = { question, direct: new AskedDirectly(question, [], null) }
+    return this.ranking.rank(asked, { filters, least: leastCoverageOfSimilar, mostScored: mostScoredOfSimilar, wanted: limit }).found.slice(0, limit).map((scored) => this.hit(scored, asked))
   }
 
   suggest(text: string, limit: number): { id: number; title: string }[] {
@@ -107,16 +161,39 @@ export class SearchIndex {
     })
   }
 
-  private corpus(): Corpus {
-    return { documents: this.kept.size, frequency: (term) => this.frequencies.get(term) ?? 0, vocabulary: this.vocabulary, synonyms: this.synonyms }
+  /** Orders the best anew by what the first of them share, when they share anything. */
+  private orderByFeedback(found: Scored[], question: Question): Scored[] {
+    const { feedback } = this.weights
+    const first = found.slice(0, feedback.entries).map(({ kept, score }) => ({ score, terms: termsOfDocument(unpackDocument(kept.document), this.synonyms, 1).all }))
+    const further = feedbackQuestion(first, question, this.corpus(), feedback)
+    return further ? this.ranking.orderByShared(found, further) : found
   }
 
-  private count(terms: DocumentTerms, by: 1 | -1): void {
-    countTerms(this.frequencies, terms.all, by)
-    for (const word of terms.words) {
-      if (by === 1) this.vocabulary.add(word)
-      else this.vocabulary.remove(word)
-    }
+  /** What both `search` and `explain` see. */
+  private look({ text, filters, limit, offset }: SearchRequest): Looked {
+    const understood = understandQuery(text, this.corpus(), { mostConcepts, completeLast: true, correct: true })
+    const { affordable, tooCommon } = this.afford(understood.concepts)
+    const question = new Question(affordable)
+    const order = this.tasks.read(understood.didYouMean ?? text)
+    const direct = new AskedDirectly(question, understood.places, order)
+    const least = leastCoverage(affordable.length, this.weights.coverage)
+    const ranked = this.ranking.rank({ question, direct }, { filters, least, mostScored, wanted: offset + limit })
+    // A question that names its step or its two tasks says what it means; what hits share would blur it.
+    if (affordable.length >= this.weights.feedback.concepts && !direct.matters) ranked.found = this.orderByFeedback(ranked.found, question)
+    return { understood, tooCommon, question, direct, least, ranked }
+  }
+
+  private corpus(): Corpus {
+    return { documents: this.kept.size, frequency: (term) => this.postings.frequency(term), vocabulary: this.vocabulary, synonyms: this.synonyms, factor: this.weights.factor }
+  }
+
+  private keep(document: PackedDocument): Kept {
+    const kept = { slot: this.freeSlots.pop() ?? this.slots.length, document, weight: entryWeight(document) }
+    this.kept.set(document.id, kept)
+    this.slots[kept.slot] = kept
+    this.titles.put(document.id, document.title)
+    for (const { before, after } of document.orderAdvice ?? []) for (const task of [before, after]) this.tasks.add(task)
+    return kept
   }
 
   /** Keeps the rarest concepts whose postings can be read in time. */
@@ -124,86 +201,15 @@ export class SearchIndex {
     const affordable = new Set<Concept>()
     let postings = 0
     for (const concept of [...concepts].sort((a, b) => b.mass - a.mass)) {
-      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + (this.frequencies.get(term) ?? 0), 0), 0)
+      postings += concept.routes.reduce((sum, r) => sum + r.terms.reduce((n, term) => n + this.postings.frequency(term), 0), 0)
       if (affordable.size === 0 || postings <= mostPostings) affordable.add(concept)
     }
     return { affordable: concepts.filter((c) => affordable.has(c)), tooCommon: concepts.filter((c) => !affordable.has(c)).map((c) => c.word) }
   }
 
-  /** All that is found, the first `wanted` in order: best first, newest of equals first. Empty when even the best holds less than `least` of the question. */
-  private rank(question: Question, filters: SearchFilters, { least, mostScored: most, wanted }: Wanted): Scored[] {
-    if (question.terms.length === 0) return []
-    const held = this.postings.findHeld(question, this.slots.length)
-    const coverageAt = this.coverages(question, held)
-    const found: Scored[] = []
-    let best = 0
-    for (const slot of held.slots) {
-      const kept = this.slots[slot]
-      if (!kept || kept.weight === 0 || !passes(kept.document, filters)) continue
-      const coverage = coverageAt(slot)
-      if (coverage > best) best = coverage
-      if (coverage >= best * leastShareOfBest) found.push({ kept, coverage, score: 0 })
-    }
-    if (best < least) return []
-    return this.order(found.filter(({ coverage }) => coverage >= best * leastShareOfBest), question, held, { most, wanted })
+  private hit({ kept: { document }, score }: Scored, { question, direct }: Asked): SearchAnswer['hits'][number] {
+    const advice = direct.advice(document)
+    const preferred = new Set(advice.map(({ postId }) => postId))
+    return { id: document.id, score, ...findPassage(unpackDocument(document), question, this.placed, preferred), ...(advice.length > 0 ? { advice } : {}) }
   }
-
-  /** Thousands of entries hold the same few terms of a question: each set of terms is weighed once. */
-  private coverages(question: Question, held: HeldTerms): (slot: number) => number {
-    const known = new Map<number, number>()
-    return (slot) => {
-      const pattern = held.pattern(slot)
-      if (pattern === null) return question.coverage(held.at(slot))
-      const seen = known.get(pattern)
-      if (seen !== undefined) return seen
-      const coverage = question.coverage(held.at(slot))
-      known.set(pattern, coverage)
-      return coverage
-    }
-  }
-
-  /** Score = BM25 × weight of the entry's evidence. */
-  private order(found: readonly Scored[], question: Question, held: HeldTerms, { most, wanted }: { most: number; wanted: number }): Scored[] {
-    const scores = this.postings.score(question, held, this.choose(found, most))
-    const [scored, others]: [Scored[], Scored[]] = [[], []]
-    let lowest = Infinity
-    for (const entry of found) {
-      entry.score = (scores[entry.kept.slot] ?? 0) * entry.kept.weight
-      if (entry.score > 0 && entry.score < lowest) lowest = entry.score
-      ;(entry.score > 0 ? scored : others).push(entry)
-    }
-    for (const entry of others) entry.score = lowest * entry.coverage
-    scored.sort(byScore)
-    // Those that were not scored stand behind all that were; sorting thousands of them is only worth it for who turns that far.
-    return scored.concat(wanted > scored.length ? others.sort(byScore) : others)
-  }
-
-  /** Marks the slots of at most `most` entries. */
-  private choose(found: readonly Scored[], most: number): Uint8Array {
-    const chosen = new Uint8Array(this.slots.length)
-    // Evidence decides only between equals: weights are small numbers, coverages differ by far more than a millionth.
-    const promise = ({ coverage, kept }: Scored) => coverage + kept.weight * 1e-6
-    const cut = found.length <= most ? -1 : nthLargest(found.map(promise), most)
-    let room = most
-    for (const entry of found) if (promise(entry) > cut) { chosen[entry.kept.slot] = 1; room-- }
-    for (const entry of found) if (room > 0 && promise(entry) === cut) { chosen[entry.kept.slot] = 1; room-- }
-    return chosen
-  }
-
-  private hit({ kept: { document }, score }: Scored, question: Question): SearchAnswer['hits'][number] {
-    return { id: document.id, score, ...findPassage(document, question, this.placed) }
-  }
-}
-
-const byScore = (a: Scored, b: Scored): number =>
-  b.score - a.score || b.kept.document.createdAt - a.kept.document.createdAt || a.kept.document.id - b.kept.document.id
-
-const nthLargest = (values: readonly number[], n: number): number => Float64Array.from(values).sort()[Math.max(0, values.length - n)] ?? 0
-
-function passes(document: SearchDocument, filters: SearchFilters): boolean {
-  return (filters.kit === undefined || document.kit === filters.kit)
-    && (filters.section === undefined || document.sections.includes(filters.section))
-    && (filters.operation === undefined || document.operations.includes(filters.operation))
-    && (filters.kind === undefined || document.kind === filters.kind)
-    && (filters.stamped === undefined || document.stamped === filters.stamped)
 }

@@ -7,6 +7,9 @@ import type { CallName, WorkerCalls, WorkerReply, WorkerRequest } from './worker
 type Answered = Exclude<WorkerReply, { ordered: number[] }>
 interface Waiting { resolve(given: Answered): void; reject(error: Error): void; timer: NodeJS.Timeout; whenOrdered: WhenOrdered | undefined }
 
+/** 100,000 entries take some 250 MB of it, and as much again outside; a thread that wants more than this is running away, and is replaced. */
+const mostHeapMB = 640
+
 export class SearchThread {
   /** Resolves with the reason when the thread has ended, for whatever reason. */
   readonly lost: Promise<Error>
@@ -19,7 +22,7 @@ export class SearchThread {
   constructor(workerFile: string) {
     this.lost = new Promise((resolve) => { this.tellLost = resolve })
     // No environment and no flags of the parent: the thread sees no secrets and starts the same under tsx.
-    this.worker = new Worker(/* turbopackIgnore: true */ workerFile, { env: {}, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: 1024 } })
+    this.worker = new Worker(/* turbopackIgnore: true */ workerFile, { env: {}, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: mostHeapMB } })
     // The thread alone does not keep a process alive; a call that waits does.
     this.worker.unref()
     this.worker.on('message', (reply: WorkerReply) => this.receive(reply))

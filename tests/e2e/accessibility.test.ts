@@ -32,6 +32,9 @@ const looks: readonly Look[] = [
   { name: 'a print sheet', address: () => `${rib.url}/print` },
   { name: 'revisions', address: () => `/posts/${lesson.id}/revisions?from=A&to=B` },
   { name: 'kits', address: () => '/kits' },
+  { name: 'the maker’s limits', address: () => '/kits/whimbrel-2/limits' },
+  { name: 'a limit being entered', as: 'wren', address: () => '/kits/whimbrel-2/limits?of=rivet/edge-centre' },
+  { name: 'the rivet table with the maker’s limits', address: () => '/shop/rivet?kit=whimbrel-2' },
   { name: 'shop tables', address: () => '/shop' },
   { name: 'the grommet table', address: () => '/shop/grommet?bore=3/8' },
   { name: 'the rivet table', address: () => '/shop/rivet' },
@@ -62,6 +65,7 @@ const looks: readonly Look[] = [
   { name: 'time to an answer', as: 'jory', address: () => '/desk/evidence' },
   { name: 'an open sheet', as: 'tobias', address: () => `/desk?open=${answer}` },
   { name: 'a question for a moderator', as: 'kofi', address: () => rib.url },
+  { name: 'why this order', as: 'wren', address: () => '/search/explain?q=flute+or+deburr+first' },
   { name: 'people', as: 'wren', address: () => '/people?open=2' },
 ]
 

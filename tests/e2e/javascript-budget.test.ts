@@ -27,6 +27,7 @@ describe('JavaScript of reading pages', () => {
     ['/entries/[id]', async () => (await demoEntry('demo-rib-7-edge')).url],
     ['/kits/[kit]/[section]', () => '/kits/whimbrel-2/W-3'],
     ['/kits', () => '/kits'],
+    ['/kits/[kit]/limits', () => '/kits/whimbrel-2/limits'],
     ['/shop/[table]', () => '/shop/grommet?bore=3/8'],
   ])('%s loads at most 175 kB', async (name, address) => {
     const { bytes, texts } = await scriptsOf(await address())

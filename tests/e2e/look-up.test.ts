@@ -12,7 +12,7 @@ describe.each(widths)('at %i px', (width) => {
     const line = page.getByLabel('Search', { exact: true })
     expect(await line.evaluate((e) => e === document.activeElement)).toBe(true)
     await page.keyboard.type('grommet hole size')
-    const list = page.getByRole('listbox', { name: 'Results' })
+    const list = page.getByRole('listbox', { name: 'Suggestions and results' })
     const hit = list.getByRole('option').filter({ hasText: grommet })
     await hit.waitFor()
     const options = list.getByRole('option')

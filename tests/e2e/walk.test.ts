@@ -51,6 +51,9 @@ type Check =
 const get = (address: string, as: Who | null = null) => must(as, 'GET', address)
 const codesOf = (list: Caution[]) => list.map((c) => c.code)
 
+/** Asked in other words than those of the texts: the page says what it looked up. */
+const explained = `/search/explain?kit=whimbrel-2&section=${section}&q=belt+anchor`
+
 const table: Record<string, readonly Check[]> = {
   '(site)/page.tsx': [{ page: () => '/', shows: ['title', 'open'], within: 'block' }],
   '(site)/search/page.tsx': [
@@ -82,6 +85,7 @@ const table: Record<string, readonly Check[]> = {
   'feed.atom/route.ts': [{ feed: () => '/feed.atom', shows: ['title', 'open', 'lesson'] }],
   '(site)/kits/page.tsx': [{ without: () => '/kits', why: 'kits and sections only' }],
   '(site)/kits/[kit]/page.tsx': [{ without: () => '/kits/whimbrel-2', why: 'leads to the kits' }],
+  '(site)/kits/[kit]/limits/page.tsx': [{ without: () => '/kits/whimbrel-2/limits', as: 'wren', why: 'the maker’s values, no post' }],
   '(site)/ask/page.tsx': [{ without: () => '/ask', as: author, why: 'an empty form; what may already answer it has a test of its own below' }],
   '(site)/lesson/page.tsx': [{ without: () => '/lesson', as: author, why: 'an empty form' }],
   '(site)/guide/[slug]/page.tsx': [{ without: () => '/guide/how-stamps-work', why: 'prose of the house' }],
@@ -97,6 +101,7 @@ const table: Record<string, readonly Check[]> = {
     { page: () => `/desk?open=${open.id}`, as: 'ansel', shows: ['open', 'openText'], within: 'block' },
     { page: () => `/desk?open=${lesson.id}`, as: 'ansel', shows: ['lesson', 'lessonText'], within: 'block' },
   ],
+  '(admin)/search/explain/page.tsx': [{ page: () => explained, as: 'wren', shows: ['title'], within: 'block' }],
   '(desk)/desk/evidence/page.tsx': [{ without: () => '/desk/evidence', as: 'wren', why: 'counts and times only' }],
   '(admin)/people/[id]/page.tsx': [
     { page: () => `/people/${authorId}`, shows: ['title', 'open', 'lesson'], within: 'block' },
@@ -114,6 +119,7 @@ const table: Record<string, readonly Check[]> = {
   'forbidden.tsx': [{ without: () => '/people', as: author, why: 'a sentence' }],
   'robots.ts': [{ without: () => '/robots.txt', why: 'addresses only' }],
   'api/search/route.ts': [{ api: () => get(`/api/search?q=${word.title}`), shows: ['title'] }, { api: () => get(`/api/search?q=${word.answer}`), shows: ['answer'] }],
+  'api/search/explain/route.ts': [{ api: () => must('wren', 'GET', `/api${explained}`), shows: ['title'] }],
   'api/suggest/route.ts': [{ api: () => get(`/api/suggest?q=${word.title.slice(0, -1)}`), shows: ['title'] }],
   'api/similar/route.ts': [{ api: () => must(null, 'POST', '/api/similar', { title: `Belt anchor ${word.title}`, kit: 'whimbrel-2' }), shows: ['title'] }],
   'api/entries/route.ts': [
@@ -151,6 +157,11 @@ const table: Record<string, readonly Check[]> = {
   'api/kits/route.ts': [{ without: () => '/api/kits', why: 'kits only' }],
   'api/kits/[kit]/route.ts': [{ without: () => '/api/kits/whimbrel-2', why: 'sections only' }],
   'api/operations/route.ts': [{ without: () => '/api/operations', why: 'operations and tasks only' }],
+  'api/kits/[kit]/limits/route.ts': [{ without: () => '/api/kits/whimbrel-2/limits', why: 'the maker’s values, no post' }],
+  'api/kits/[kit]/limits/[id]/end/route.ts': [{ api: async () => {
+    const made = await must('wren', 'POST', '/api/kits/whimbrel-2/limits', { table: 'tube', result: 'hand-bend', value: { words: 'none by hand' }, reference: { title: 'Bulletin SB-11', section: 'page 1', year: '2026' } })
+    return must('wren', 'POST', `/api/kits/whimbrel-2/limits/${made.id}/end`, { reason: 'Replaced.' })
+  }, shows: [] }],
   'api/shop/route.ts': [{ without: () => '/api/shop', why: 'tables only' }],
   'api/shop/[table]/route.ts': [{ without: () => '/api/shop/grommet?bore=3/8', why: 'numbers and the cautions of the table, no post' }],
   'api/measurements/route.ts': [{ api: async () => JSON.stringify(await must(null, 'POST', '/api/measurements', { text: '#30 in 0.032' })), shows: [] }],
@@ -280,7 +291,7 @@ describe('what is loaded into a page later', () => {
     const page = await openPage()
     await visit(page, '/kits')
     await page.getByLabel('Search', { exact: true }).fill(word.title)
-    const option = page.getByRole('listbox', { name: 'Results' }).getByRole('option').filter({ hasText: word.title })
+    const option = page.getByRole('listbox', { name: 'Suggestions and results' }).getByRole('option').filter({ hasText: word.title })
     await option.waitFor()
     expect(isCovered((await option.textContent()) ?? '', 'title')).toBe(true)
   })

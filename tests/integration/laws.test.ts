@@ -22,6 +22,7 @@ beforeAll(async () => {
   await put(builder, 'outcome', { result: 'as-written' })
   await put(builder, 'reliance', {})
   await sql(`insert into post_caution (post_id, code, origin, because, created_at) values (${answer.id}, 'eyes', 'moderator', 'x', 1)`)
+  await sql(`insert into kit_limit (kit_id, shop_table, result, inputs, value, unit, display, reference, created_at) values (1, 'rivet', 'edge-centre', '{}', '{"min":2}', 'D', '{}', '{}', 1)`)
   await sql(`insert into mentorship (member_id, number, fields, reason, granted_by, created_at) values (${answer.by.id}, 'OW 001', 'x', 'x', ${steward.id}, 1)`)
   // Only one steward may be left for the law about the last one.
   await sql(`update member set role = 'member' where role = 'steward' and id <> ${steward.id}`)
@@ -55,6 +56,10 @@ const broken: Record<string, { says: string; by: () => string[] }> = {
   stamp_only_by_a_mentor: { says: 'mentorship was granted', by: () => [aStamp(ids.answer, { mentor: ids.builder }), aStamp(ids.answer, { mark: 'XX 999' })] },
   stamp_not_for_one_serial: { says: 'one serial cannot be stamped', by: () => [aStamp(ids.oneSerial), aStamp(ids.answer, { basis: 'maker-reply', scope: "'one-serial'" })] },
   stamp_names_the_questions_revision: { says: 'names the revision of its question', by: () => [aStamp(ids.answer, { questionRevision: 9 }), aStamp(ids.answer, { questionRevision: 0 })] },
+  limit_only_ended: { says: 'only be ended', by: () => [
+    `update kit_limit set value = '{}'`, `update kit_limit set ended_at = 1`, `update kit_limit set ended_at = 1, end_reason = 'x', unit = 'in'`,
+  ] },
+  limit_never_deleted: { says: 'ended, never deleted', by: () => ['delete from kit_limit'] },
   stamp_only_withdrawn: { says: 'only be withdrawn', by: () => [
     `update stamp set basis = 'plans' where id = ${ids.stamp}`, `update stamp set revision = 2 where id = ${ids.stamp}`, `update stamp set withdrawn_at = 1 where id = ${ids.stamp}`,
     `update stamp set withdrawn_at = 1, withdrawn_reason = 'x', mark = 'XX 999' where id = ${ids.stamp}`,
@@ -93,7 +98,7 @@ const triggers = async () => (await sql("select name from sqlite_master where ty
 
 describe('the laws of the data', () => {
   it('are all there, and each is tried below', async () => {
-    expect(await triggers()).toEqual([...Object.keys(broken), ...Object.keys(seen)].sort())
+    expect(await triggers()).toEqual([...Object.keys(broken), ...Object.keys(seen), 'redaction_takes_all'].sort())
   })
 
   it.each(Object.entries(broken))('%s refuses', async (_, { says, by }) => {
@@ -105,6 +110,22 @@ describe('the laws of the data', () => {
     await sql(by())
     const rows = (await sql(`select post_id from change where sequence > ${Number(before)}`)).rows
     expect(rows.map((r) => r['post_id'])).toContain(entry())
+  })
+
+  it('every column of a post but the parser that measured it is a change that others see', async () => {
+    const columns = (await sql("select name from pragma_table_info('post')")).rows.map((r) => String(r['name'])).filter((name) => name !== 'measured_by')
+    const law = String((await sql("select sql from sqlite_master where name = 'change_post_updated'")).rows[0]?.['sql'])
+    expect(law.match(/UPDATE OF([\w\s,]+) ON post/)?.[1]?.split(',').map((c) => c.trim()).sort()).toEqual(columns.sort())
+  })
+
+  it('a redaction takes what was made of the text with it', async () => {
+    const { id } = await anAnswer({ body: 'Drill it #30.' })
+    const kept = async () => [
+      (await sql(`select 1 from measurement where post_id = ${id}`)).rows.length, (await sql(`select 1 from rendering where key = 'post:${id}:1'`)).rows.length,
+    ]
+    expect(await kept()).toEqual([1, 1])
+    await sql(`update revision set body = '', redacted_reason = 'a name in it' where post_id = ${id}`)
+    expect(await kept()).toEqual([0, 0])
   })
 
   it('a stamp names a revision of its own post', async () => {

@@ -1,9 +1,11 @@
 // Members on a real database: signing up and leaving, roles and mentorships, and that a change holds from the next request on.
-import { count } from 'drizzle-orm'
+import { count, desc } from 'drizzle-orm'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { getActiveMember, getMember } from '@/db/queries/people'
 import { audit } from '@/db/schema'
+import { readerUnits } from '@/lib/auth/reader-units'
 import { authenticate } from '@/lib/services/people/authenticate'
+import { chooseUnits } from '@/lib/services/people/choose-units'
 import { changePassword } from '@/lib/services/people/change-password'
 import { closeAccount } from '@/lib/services/people/close-account'
 import { endMentorship } from '@/lib/services/people/end-mentorship'
@@ -16,6 +18,7 @@ import { setRole } from '@/lib/services/people/set-role'
 import { signUp } from '@/lib/services/people/sign-up'
 import { contextFor } from '@/lib/context'
 import { api } from '../support/api'
+import { inRequest, sessionCookie } from '../support/as-session'
 import { openTestRuntime, type TestRuntime } from '../support/database'
 import { aMember, aMentor, anAnswer, anEntry, critical, type Somebody } from '../support/factories'
 
@@ -130,6 +133,33 @@ describe('mentorship', () => {
     const [moderator, builder] = [await aMember({ role: 'moderator' }), await aMember()]
     await expect(grantMentorship(await steward.context(), steward.id, { ...granted, number: 'QX 103' })).rejects.toMatchObject({ code: 'forbidden' })
     await expect(grantMentorship(await moderator.context(), builder.id, { ...granted, number: 'QX 104' })).rejects.toMatchObject({ code: 'forbidden' })
+  })
+})
+
+describe('the units that stand first', () => {
+  it('are kept in the account with an audit row, hold from the next request on, and go back to as written', async () => {
+    const member = await aMember()
+    const seen = async (extra = '') => inRequest(`${await sessionCookie(member)}${extra}`, readerUnits)
+    expect([(await getAccount(await member.context())).units, await seen()]).toEqual(['written', 'written'])
+    await chooseUnits(await member.context(), { units: 'metric' })
+    expect([(await getAccount(await member.context())).units, await seen()]).toEqual(['metric', 'metric'])
+    const [last] = await reader().select().from(audit).orderBy(desc(audit.sequence)).limit(1)
+    expect(last).toMatchObject({ actorId: member.id, verb: 'member.choose-units', subject: `member:${member.id}` })
+    await chooseUnits(await member.context(), { units: 'written' })
+    expect(await seen()).toBe('written')
+  })
+
+  it('are this device’s where it has a choice of its own, also to take a text as written', async () => {
+    const member = await aMember()
+    await chooseUnits(await member.context(), { units: 'metric' })
+    const seen = async (cookie: string) => inRequest(`${await sessionCookie(member)}; units=${cookie}`, readerUnits)
+    expect([await seen('inch'), await seen('written'), await seen('furlong'), await seen('')]).toEqual(['inch', 'written', 'metric', 'metric'])
+    expect(await inRequest('units=metric', readerUnits)).toBe('metric')
+  })
+
+  it('are nobody’s for a visitor', async () => {
+    await expect(visitor().then((context) => chooseUnits(context, { units: 'inch' }))).rejects.toMatchObject({ code: 'unauthenticated' })
+    expect(await inRequest('', readerUnits)).toBe('written')
   })
 })
 

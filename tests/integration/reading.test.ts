@@ -6,6 +6,13 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { allRoutes } from '@/app/api/all-routes'
 import type { Hit, SearchResult } from '@/lib/schemas/search'
 import type { Entry } from '@/lib/schemas/post'
+import { eq } from 'drizzle-orm'
+import { renderingKey } from '@/db/queries/cautioned-post'
+import { rendering } from '@/db/schema'
+import { writeQuietly } from '@/db/transaction'
+import { contextFor } from '@/lib/context'
+import { rendererVersion } from '@/lib/render/markdown-to-html'
+import { atomFeed } from '@/lib/services/feeds/atom-feed'
 import { api } from '../support/api'
 import { openTestRuntime, type TestRuntime } from '../support/database'
 import { aMember, anAnswer, anEntry, critical } from '../support/factories'
@@ -62,6 +69,18 @@ describe('lists and small reads', () => {
     const { body } = await api<{ items: { id?: number; cautions: { topic: string }[] }[] }>('GET', '/api/suggest?q=ribs%20mix')
     expect(body.items.find((s) => s.id === spar.id)?.cautions.map((c) => c.topic)).toContain('structure')
     expect(body.items.length).toBeLessThanOrEqual(8)
+  })
+
+  it('GET /api/suggest gives what a shop table works out before everything else, and tables by their names', async () => {
+    const items = async (q: string) => (await api<{ items: { kind: string; url: string; text: string }[] }>('GET', `/api/suggest?q=${encodeURIComponent(q)}`)).body.items
+    expect((await items('grommet hole 3/8')).slice(0, 2).map((s) => [s.kind, s.url])).toEqual([['shop', '/shop/grommet?bore=3%2F8'], ['shop', '/shop/grommet?hole=3%2F8']])
+    // No grommet of the list goes in a 3/8 hole: no other number stands in its place.
+    expect((await items('grommet hole 3/8'))[1]?.text).toBe('a 3/8 hole that takes a grommet')
+    // The torque of an AN3 stands in a source that was seen; a grommet's hole is recalled and says so.
+    expect((await items('AN3 torque'))[0]?.text).not.toContain('memory')
+    expect((await items('grommet hole 3/8'))[0]?.text).toContain('from memory, not checked')
+    expect((await items('torq')).map((s) => s.url)).toContain('/shop/torque')
+    expect((await items('ribs mix')).map((s) => s.kind)).not.toContain('shop')
   })
 
   it('POST /api/similar finds what may already answer it, for a visitor', async () => {
@@ -163,6 +182,15 @@ describe('GET /api/openapi.json', () => {
     expect(validator.version).toBe('3.1')
   })
 
+  it('names the shapes that answers share, so that a client has them once', async () => {
+    const { body } = await api<{ components: { schemas: Record<string, { properties?: Record<string, unknown> }> } }>('GET', '/api/openapi.json')
+    const { ShopAnswer, ShopResult, Hit } = body.components.schemas
+    expect(Object.keys(body.components.schemas)).toEqual(expect.arrayContaining(['ShopAnswer', 'ShopResult', 'Measurement', 'Source', 'Hit', 'Entry', 'Caution']))
+    expect(ShopAnswer?.properties?.results).toMatchObject({ items: { $ref: '#/components/schemas/ShopResult' } })
+    expect(JSON.stringify(ShopResult?.properties?.source)).toContain('#/components/schemas/Source')
+    expect(Hit?.properties?.balloons).toMatchObject({ type: 'array', items: { type: 'integer' } })
+  })
+
   it('describes every route there is', async () => {
     const folder = path.join(process.cwd(), 'app', 'api')
     const files = readdirSync(folder, { recursive: true, encoding: 'utf8' }).filter((f) => path.basename(f) === 'route.ts' && !f.startsWith('auth') && !f.startsWith('[[...path]]'))
@@ -170,5 +198,25 @@ describe('GET /api/openapi.json', () => {
     const { body } = await api<{ paths: object }>('GET', '/api/openapi.json')
     expect(Object.keys(body.paths).sort()).toEqual(addresses)
     expect(Object.keys(allRoutes).length).toBe(addresses.length - 1)
+  })
+})
+
+describe('a text that an older renderer laid out', () => {
+  it('is laid out anew when it is read, with its sizes dressed, and kept', async () => {
+    const lesson = await anEntry({ kind: 'lesson', title: 'Pilot holes', parts: { happened: 'Drilled 7/32 from the edge.' } })
+    const kept = () => runtime.database.reader.select().from(rendering).where(eq(rendering.key, renderingKey(lesson.id, 1)))
+    const [first] = await kept()
+    await writeQuietly(runtime.database, (tx) => tx.update(rendering).set({ renderer: rendererVersion - 1, html: { happened: '<p>old</p>' } }).where(eq(rendering.key, first!.key)))
+    const { body } = await api<Entry>('GET', `/api/entries/${lesson.id}`)
+    expect(body.html).toMatch(/<span class="measure [^>]*>.*7\/32.*5\.56\u00a0mm/)
+    expect(body.text).toContain('Drilled 7/32 from the edge.')
+    expect((await kept())[0]).toMatchObject({ renderer: rendererVersion, html: { happened: first!.html['happened'] } })
+  })
+
+  it('goes into a feed without the form that only our pages show', async () => {
+    await anEntry({ kind: 'lesson', title: 'Last hole', parts: { happened: 'Open it to 7/32.' } })
+    const xml = await atomFeed(await contextFor(null), {}, { title: 't', page: 'http://a.example', self: 'http://a.example/feed.atom', baseUrl: 'http://a.example' })
+    expect(xml).toContain('7/32')
+    expect(xml).not.toContain('measure-lead')
   })
 })

@@ -2,12 +2,14 @@
 // Form actions of a member on their own account.
 import type { FormState } from '@/lib/form-state'
 import { refresh } from 'next/cache'
+import { forgetUnits } from '@/lib/auth/reader-units'
 import { endSession, startSession } from '@/lib/auth/session-cookie'
 import { refuse } from '@/lib/errors'
 import { carryOut, field } from '@/lib/http/action'
 import { paths } from '@/lib/paths'
-import { changePasswordSchema, closeAccountSchema, newTokenSchema, profileSchema, revokeTokenSchema } from '@/lib/schemas/people'
+import { changePasswordSchema, closeAccountSchema, newTokenSchema, profileSchema, revokeTokenSchema, unitsSchema } from '@/lib/schemas/people'
 import { changePassword } from '@/lib/services/people/change-password'
+import { chooseUnits } from '@/lib/services/people/choose-units'
 import { closeAccount } from '@/lib/services/people/close-account'
 import { createToken } from '@/lib/services/people/create-token'
 import { editProfile } from '@/lib/services/people/edit-profile'
@@ -18,6 +20,18 @@ export async function editProfileAction(_before: FormState, form: FormData): Pro
     form, schema: profileSchema, read: (f) => ({ name: field(f, 'name'), bio: field(f, 'bio') }), done: 'Saved. It stands beside everything you wrote.',
     run: async (context, input) => {
       await editProfile(context, input)
+      refresh()
+      return null
+    },
+  })
+}
+
+export async function chooseUnitsAction(_before: FormState, form: FormData): Promise<FormState> {
+  return carryOut({
+    form, schema: unitsSchema, read: (f) => ({ units: field(f, 'units') }), done: 'Saved. It holds wherever you sign in.',
+    run: async (context, input) => {
+      await chooseUnits(context, input)
+      await forgetUnits()
       refresh()
       return null
     },

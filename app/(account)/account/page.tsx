@@ -1,9 +1,10 @@
-// A member's own account: name and words about themselves, password, personal tokens, leaving.
+// A member's own account: name and words about themselves, units, password, personal tokens, leaving.
 import type { Metadata } from 'next'
 import Link from 'next/link'
 import { PageTitle } from '@/components/layout/page-title'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { SignOutForm } from '@/components/people/sign-out-form'
+import { UnitsForm } from '@/components/people/units-form'
 import { TokenForm } from '@/components/people/token-form'
 import { Disclosure } from '@/components/ui/disclosure'
 import { FieldsForm } from '@/components/ui/fields-form'
@@ -12,7 +13,7 @@ import { memberContext } from '@/lib/auth/guards'
 import { formatDate } from '@/lib/format/date'
 import { paths } from '@/lib/paths'
 import { getAccount, type Account } from '@/lib/services/people/get-account'
-import { changePasswordAction, closeAccountAction, createTokenAction, editProfileAction, revokeTokenAction } from './actions'
+import { changePasswordAction, chooseUnitsAction, closeAccountAction, createTokenAction, editProfileAction, revokeTokenAction } from './actions'
 
 export const metadata: Metadata = { title: 'Account' }
 
@@ -28,6 +29,10 @@ export default async function AccountPage() {
           { name: 'name', label: 'Name', autoComplete: 'name', maxLength: 80, value: account.name },
           { name: 'bio', label: 'What others should know', kind: 'area', maxLength: 1000, value: account.bio, optional: true, help: 'Your kit, how far you are, what you do for a living. It stands on your sheet.' },
         ]} />
+      </section>
+      <section className="grid gap-4" aria-labelledby="units">
+        <RivetLine title="Measurements" id="units" />
+        <UnitsForm action={chooseUnitsAction} units={account.units} />
       </section>
       <section className="grid gap-4" aria-labelledby="password">
         <RivetLine title="Password" id="password" />

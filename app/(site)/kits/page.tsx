@@ -1,5 +1,6 @@
 // The kits of this group and their sections in plan order.
 import type { Metadata } from 'next'
+import Link from 'next/link'
 import { Sheet, SheetHead } from '@/components/entries/sheet'
 import { PartTag } from '@/components/entries/part-tag'
 import { PageTitle } from '@/components/layout/page-title'
@@ -21,6 +22,7 @@ export default async function KitsPage() {
           <ul className="sheet-body part-tags">
             {kit.sections.map((s) => <li key={s.code}><PartTag code={s.code} title={s.title} href={paths.section(kit.slug, s.code)} /></li>)}
           </ul>
+          <p className="sheet-foot"><Link href={paths.kitLimits(kit.slug)}>{kit.maker}’s own limits<span className="sr-only"> for the {kit.name}</span></Link></p>
         </Sheet>
       ))}
     </>

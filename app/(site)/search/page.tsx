@@ -1,7 +1,8 @@
 // The results page: works without JavaScript. Filters stand in the address; hits are grouped stamped, not stamped, open.
 import type { Metadata, Route } from 'next'
 import Link from 'next/link'
-import { HitList, HitPlate } from '@/components/entries/hit-list'
+import { readSearchAddress } from '@/app/search-address'
+import { HitList, HitPlate, hitAnchor } from '@/components/entries/hit-list'
 import { RivetLine } from '@/components/layout/rivet-line'
 import { CautionPlate } from '@/components/cautions/caution-plate'
 import { ComputedAnswer } from '@/components/shop/computed-answer'
@@ -10,10 +11,14 @@ import { EmptyState } from '@/components/ui/empty-state'
 import { LinkButton } from '@/components/ui/link-button'
 import { NoticeLine } from '@/components/ui/notice-line'
 import { pageContext } from '@/lib/auth/guards'
+import { findContrary } from '@/lib/format/order-words'
+import { readerUnits } from '@/lib/auth/reader-units'
+import { firstSystem } from '@/lib/format/units-choice'
 import { paths, type SearchAddress } from '@/lib/paths'
 import { SearchLoadingError } from '@/lib/search/messages'
 import { searchQuerySchema, type Hit, type SearchResult } from '@/lib/schemas/search'
 import { listPlaces } from '@/lib/services/kits/list-places'
+import { can } from '@/lib/policy/can'
 import { searchEntries } from '@/lib/services/search/search-entries'
 
 export async function generateMetadata({ searchParams }: PageProps<'/search'>): Promise<Metadata> {
@@ -26,7 +31,7 @@ const pageSize = 20
 export default async function SearchPage({ searchParams }: PageProps<'/search'>) {
   const context = await pageContext()
   const given = await searchParams
-  const address = readAddress(given)
+  const address = readSearchAddress(given)
   const parsed = searchQuerySchema.safeParse({ ...address, ...(address.offset !== undefined ? { offset: String(address.offset) } : {}), limit: String(pageSize) })
   const places = await listPlaces(context)
   const filters = <SearchFilters address={address} places={places} />
@@ -36,10 +41,17 @@ export default async function SearchPage({ searchParams }: PageProps<'/search'>)
     throw error
   })
   if (!result) return <>{filters}<NoticeLine boxed live>Search is loading: the index is being built. Everything else works; reload in a few seconds.</NoticeLine></>
-  return <>{filters}<Results result={result} address={address} /></>
+  const first = firstSystem(await readerUnits())
+  return (
+    <>
+      {filters}
+      <Results result={result} address={address} first={first} />
+      {address.q?.trim() && can(context.actor, 'search.explain') ? <p className="text-small"><Link href={paths.explainSearch(address)}>Why these results stand in this order</Link></p> : null}
+    </>
+  )
 }
 
-function Results({ result, address }: { result: SearchResult; address: SearchAddress }) {
+function Results({ result, address, first }: { result: SearchResult; address: SearchAddress; first: 'inch' | 'metric' }) {
   const { results, query, total } = result
   const groups = [
     { title: 'Stamped', hits: results.filter((h) => h.stamp === 'stamped') },
@@ -47,14 +59,18 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
     { title: 'Open questions', hits: results.filter((h) => h.open) },
   ].filter((g) => g.hits.length > 0)
   const words = address.q?.trim() ?? ''
+  const contrary = findContrary(results.flatMap((hit) => hit.orderAdvice ?? []))
   const ask = paths.ask({ title: words.slice(0, 160), ...(address.kit ? { kit: address.kit } : {}), ...(address.section ? { section: address.section } : {}) })
   const offset = address.offset ?? 0
+  const balloons = result.computed.flatMap((answer) => answer.balloons)
+  const posts = groups.flatMap((group) => group.hits).map((hit) => ({ balloons: hit.balloons, title: hit.title, anchor: hitAnchor(hit) }))
   return (
     <>
       <h1 className="sr-only">{words ? `Results for ${words}` : 'All entries'}</h1>
       {query.didYouMean ? <NoticeLine icon="search">Did you mean <Link href={paths.search({ ...address, q: query.didYouMean, offset: undefined })}>{query.didYouMean}</Link>?</NoticeLine> : null}
+      {contrary ? <NoticeLine boxed>Builders disagree here: some advise {contrary.one} before {contrary.other}, some the other way round. Both are below, each with what speaks for it. The plans decide.</NoticeLine> : null}
       {query.ignored.length > 0 ? <NoticeLine>Too many words: left out {query.ignored.join(', ')}.</NoticeLine> : null}
-      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} />)}
+      {result.computed.map((answer) => <ComputedAnswer key={answer.url} answer={answer} first={first} posts={posts} />)}
       {result.computed.length > 0 && results.length === 0 ? <CautionPlate cautions={result.computed.flatMap((a) => a.cautions)} /> : null}
       {results.length === 0 ? <NothingFound words={words} ask={ask} address={address} /> : (
         <>
@@ -62,7 +78,7 @@ function Results({ result, address }: { result: SearchResult; address: SearchAdd
           {groups.map((group) => (
             <section key={group.title} aria-labelledby={`group-${group.title}`} className="page-body">
               <RivetLine title={group.title} id={`group-${group.title}`} />
-              <HitList hits={group.hits} actionFor={sayWhatToDo} />
+              <HitList hits={group.hits} balloons={balloons} actionFor={sayWhatToDo} />
             </section>
           ))}
           <Pager address={address} offset={offset} total={total} />
@@ -94,16 +110,4 @@ function Pager({ address, offset, total }: { address: SearchAddress; offset: num
       <span className="text-small">{offset + 1} to {Math.min(offset + pageSize, total)} of {total}</span>
     </nav>
   )
-}
-
-/** What the address says; a key given twice counts once, blanks count as absent. */
-function readAddress(given: Record<string, string | string[] | undefined>): SearchAddress {
-  const one = (name: string) => { const v = given[name]; return (Array.isArray(v) ? v[0] : v) || undefined }
-  // The section filter's option names its kit too, so that a form without script sends a pair that fits.
-  const place = one('place')?.split('/')
-  const offset = Number(one('offset') ?? 0)
-  return {
-    q: one('q'), kit: place?.[0] || one('kit'), section: place ? place[1] || undefined : one('section'), operation: one('operation'), kind: one('kind'),
-    stamped: one('stamped') === '1' ? '1' : undefined, offset: Number.isInteger(offset) && offset > 0 ? Math.min(offset, 10_000) : undefined,
-  }
 }

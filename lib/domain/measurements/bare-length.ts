@@ -6,6 +6,7 @@ import { bareValueWords, dateWords, determiners, fractionLabels, otherQuantities
 /** `from` and `next` bound what is judged as a whole: the number itself, or the range it ends. */
 export function isBareLength(passage: Passage, number: NumberRead, from = number.from, next = number.next): boolean {
   if (isOther(passage, from, next)) return false
+  if (number.form === 'whole') return isBesideDimension(passage, number, from, next)
   if (number.form === 'decimal') return isBareDecimal(passage, number, from, next)
   if (number.form === 'fraction' || number.form === 'mixed') return isBareFraction(passage, number, from, next)
   return number.form === 'words' && isSpokenFraction(passage, number, next)
@@ -15,7 +16,9 @@ export function isBareLength(passage: Passage, number: NumberRead, from = number
 function isOther(passage: Passage, from: number, next: number): boolean {
   const after = wordBehind(passage, next)
   // 13/64s are drills, 5 A are amperes.
-  if (otherQuantities.has(after) && !(after === 's' && isAttached(passage, next))) return true
+  // 5/16 min behind an edge or a hole is a least, and no minute.
+  const isLeast = after === 'min' && hasWordBefore(passage, from, 4, partNouns)
+  if (otherQuantities.has(after) && !isLeast && !(after === 's' && isAttached(passage, next))) return true
   const lexeme = passage.lexemes[next]
   if (lexeme?.type === 'word' && passage.text.slice(lexeme.start, lexeme.end) === 'A') return true
   if ('%$€£Ω°'.includes(signAt(passage, next) || ' ')) return true
@@ -34,6 +37,7 @@ function isBareFraction(passage: Passage, number: NumberRead, from: number, next
   if (!binary.has(d) || n >= d || n === 0 || (n % 2 === 0 && !part)) return false
   // 8/32 screws are 8-32 screws.
   if (n % 2 === 0 && d === 32 && (screwNouns.has(wordBehind(passage, next)) || screwNouns.has(wordAt(passage, next + 1)))) return false
+  if (isHalfAndHalf(passage, number, from, next)) return false
   const before = wordBefore(passage, from)
   if (fractionLabels.has(before) || (before === 'of' && fractionLabels.has(wordBefore(passage, from - 1)))) return false
   const after = wordBehind(passage, next)
@@ -41,6 +45,10 @@ function isBareFraction(passage: Passage, number: NumberRead, from: number, next
   // On 3/8 we closed the tank; on 3/8 tube there's a nick.
   return !(number.form === 'fraction' && dateWords.has(before) && n <= 12 && d <= 31 && !partNouns.has(after))
 }
+
+/** 1/2 and 1/2 is a mix. */
+const isHalfAndHalf = (passage: Passage, { text }: NumberRead, from: number, next: number): boolean =>
+  text === '1/2' && ((wordAt(passage, next) === 'and' && passage.lexemes[next + 1]?.text === text) || (wordAt(passage, from - 1) === 'and' && passage.lexemes[from - 2]?.text === text))
 
 function isBareDecimal(passage: Passage, number: NumberRead, from: number, next: number): boolean {
   const value = number.n / number.d
@@ -54,6 +62,19 @@ function isBareDecimal(passage: Passage, number: NumberRead, from: number, next:
 function isSpokenFraction(passage: Passage, number: NumberRead, next: number): boolean {
   const denominator = number.text.split('/')[1]
   return denominator !== undefined && Number(denominator) >= 8 && number.next - number.from > 1 && wordBehind(passage, next) !== 'of'
+}
+
+const dimensionWords = new Set(['tall', 'wide', 'deep', 'long', 'high', 'across', 'apart'])
+/** Behind a dimension word these end what was measured; a noun would be what is counted: 12 long bolts. */
+const afterDimension = new Set(['and', 'by', 'or', 'at', 'in', 'on', 'with', 'to', 'for', 'so', 'but', 'from', 'is', 'x', 'as', 'when', 'if', 'not', 'inside', 'outside', 'overall', 'the'])
+const stacked = new Set(['stacked', 'stack', 'rows', 'row', 'piled', 'parked', 'layers'])
+const leastBare = 4
+
+/** 36 tall: nobody stands three deep in inches, so small counts are left alone. */
+function isBesideDimension(passage: Passage, { n, text }: NumberRead, from: number, next: number): boolean {
+  if (n < leastBare || text.startsWith('0') || !dimensionWords.has(wordAt(passage, next)) || hasWordBefore(passage, from, 3, stacked)) return false
+  const behind = passage.lexemes[next + 1]
+  return !behind || behind.gap === 2 || behind.type === 'sign' || afterDimension.has(behind.text)
 }
 
 function isBesidePart(passage: Passage, from: number, next: number): boolean {

@@ -4,7 +4,7 @@ import { wireGauge } from './make-measurement'
 import type { Measurement } from './measurement'
 import { isAttached, numberAt, passageOf, signAt, wordAt, type Passage } from './passage'
 import { readDesignation } from './read-designation'
-import { readLetterWord, readLoneLetter, readNumberSign, readNumberWord } from './read-drill'
+import { readLetterWord, readLoneLetter, readNumberSign, readNumberWord, readQuotedLetter } from './read-drill'
 import { readMetricFastener } from './read-metric-fastener'
 import { readAnInch, readQuantity } from './read-quantity'
 
@@ -28,10 +28,15 @@ function readAt(passage: Passage, at: number): Finding | undefined {
   switch (lexeme?.type) {
     case 'whole': case 'decimal': return readQuantity(passage, at)
     case 'fraction': return readGaugeFraction(passage, at) ?? readQuantity(passage, at)
-    case 'sign': return lexeme.text === '#' ? readNumberSign(passage, at) : '-−–'.includes(lexeme.text) ? readNegative(passage, at) : undefined
+    case 'sign': return readSignAt(passage, at, lexeme.text)
     case 'word': return readWordAt(passage, at, lexeme.text)
     default: return undefined
   }
+}
+
+function readSignAt(passage: Passage, at: number, sign: string): Finding | undefined {
+  if (sign === '#' || sign === '№') return readNumberSign(passage, at)
+  return '-−–'.includes(sign) ? readNegative(passage, at) : '"“‘\''.includes(sign) ? readQuotedLetter(passage, at) : undefined
 }
 
 function readWordAt(passage: Passage, at: number, word: string): Finding | undefined {

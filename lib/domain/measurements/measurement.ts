@@ -1,7 +1,7 @@
 // What a measurement found in a text is, as stored, shown and sent. Finding them is find-measurements.ts.
 
 /** Raised whenever the same text may give another answer: stored rows of an older version are found anew. */
-export const parserVersion = 1
+export const parserVersion = 2
 
 export type MeasurementKind = 'length' | 'drill' | 'torque' | 'pressure' | 'angle' | 'temperature' | 'rivet' | 'bolt' | 'thread' | 'gauge'
 export type SiUnit = 'm' | 'N·m' | 'Pa' | 'rad' | 'K'

@@ -32,11 +32,13 @@ export const isNumber = ({ type }: Lexeme): boolean => type === 'whole' || type 
 /** No white between this lexeme and the one before. */
 export const isAttached = (passage: Passage, at: number): boolean => at > 0 && passage.lexemes[at]?.gap === 0
 
+const abbreviations = new Set(['dist', 'dia', 'diam', 'approx', 'min', 'max', 'rad', 'thk', 'alum', 'ctr', 'ctrs', 'no'])
+
 /** The nearest word in front of a place within a few lexemes of the same sentence that passes. */
 export function hasWordBefore(passage: Passage, at: number, within: number, accepted: ReadonlySet<string>): boolean {
   for (let place = at - 1; place >= 0 && place >= at - within; place -= 1) {
     const sign = signAt(passage, place)
-    if (sign === '.' || sign === ';' || sign === '?' || sign === '!') return false
+    if ((sign === '.' && !abbreviations.has(wordAt(passage, place - 1))) || sign === ';' || sign === '?' || sign === '!') return false
     if (accepted.has(wordAt(passage, place))) return true
   }
   return false

@@ -4,11 +4,11 @@ import { placeAfter, type Passage } from './passage'
 import type { Ratio } from './units'
 
 // Rivets, NAVEDTRA 14018 ch. 13 numbering: diameter in 32nds, length in 16ths of an inch. The pieces may stand apart: AN 470 AD 4-6.
-const rivetNumber = /(?:AN[ -]?(?:426|430|442|455|456|470)|MS[ -]?(?:20426|20430|20442|20455|20456|20470)|NAS[ -]?(?:1097))[ -]?(AD|DD|[A-E]|KE|M)?[ -]?(\d{1,2})(?:[ ]?-(\d{1,2})(\.5|-5)?)?(?![\p{L}\p{N}])/iuy
+const rivetNumber = /(?:AN[ -]?(?:426|430|442|455|456|470)|MS[ -]?(?:20426|20430|20442|20455|20456|20470)|NAS[ -]?(?:1097))[ -]?(AD|DD|[A-E]|KE|M)?[ -]?(\d{1,2})(?:[ ]?-(\d{1,2})(\.5|-5)?)?(?=s?(?![\p{L}\p{N}]))/iuy
 /** The alloy and dashes alone, as said at the bench: AD4-6. */
 const shortRivet = /(AD|DD)(\d{1,2})-(\d{1,2})(\.5)?(?![\p{L}\p{N}]|[.-]\d)/iuy
 // Bolts: AN, sixteenths, C or DD for the metal, H for a drilled head, the length dash, A for a shank without a hole.
-const boltNumber = /AN ?(\d{1,2})(?:-?(?:C|DD))?(?:-?H)?(?:(?<=[CDH])-?|-)(\d{1,2})A?(?![\p{L}\p{N}]|[.-]\d)/iuy
+const boltNumber = /AN ?(\d{1,2})(?:-?(?:C|DD))?(?:-?H)?(?:(?<=[CDH])-?|-)(\d{1,2})A?(?=s?(?![\p{L}\p{N}]|[.-]\d))/iuy
 const boltAlone = /AN(\d{1,2})(?:C|DD)?H?(?=s?(?![\p{L}\p{N}]|-[\p{L}\p{N}]))/iuy
 
 /** The designation that begins with the word at a place; undefined if it is none of these. */

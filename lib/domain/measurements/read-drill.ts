@@ -2,7 +2,7 @@
 import { drillNamed, numberDrill } from './drill-sizes'
 import { nothing, sized, wireGauge, type Finding } from './make-measurement'
 import { hasWordBefore, isAttached, numberAt, signAt, wordAt, type Passage } from './passage'
-import { readWholeWords } from './read-number'
+import { readWholeWords, type NumberRead } from './read-number'
 import { readThread } from './read-thread'
 import { labelBefore } from './stands-free'
 import { drillNouns, drillVerbs, labels, otherQuantities, placeNouns, screwAdjectives, screwNouns, wireNouns } from './surroundings'
@@ -58,7 +58,20 @@ function isLikely(passage: Passage, { from, number, next, sure }: Naming): boole
   const after = wordBehind(passage, next)
   const beside = drillNouns.has(after) || hasWordBefore(passage, from, 6, drillVerbs)
   if (number < 10 || sure === 'no') return beside && !otherQuantities.has(after) && !(sure === 'no' && /[^s]s$/.test(after) && !drillNouns.has(after))
-  return !otherQuantities.has(after)
+  return !otherQuantities.has(after) || (after === 's' && isAttached(passage, next))
+}
+
+const drillCompounds = new Set(['press', 'presses', 'bit', 'bits', 'bushing', 'bushings', 'stop', 'stops', 'guide', 'guides', 'motor', 'motors', 'chuck', 'chucks', 'block', 'blocks', 'set', 'sets'])
+const dataWidths = new Set([8, 12, 16, 24, 32, 64])
+
+/** A 30 drill, the 21 bit: in the singular the number names the tool. "Two 30 drills" and "12 drills" are counted. */
+export function readUnsignedDrill(passage: Passage, { form, n, from, next, text }: NumberRead): Finding | undefined {
+  const place = signAt(passage, next) === '-' && isAttached(passage, next) ? next + 1 : next
+  const noun = wordAt(passage, place)
+  if (form !== 'whole' || n < 10 || text.startsWith('0') || passage.lexemes[place]?.gap === 2) return undefined
+  if (!(noun === 'drill' || noun === 'reamer' || (noun === 'bit' && !dataWidths.has(n))) || drillCompounds.has(wordAt(passage, place + 1))) return undefined
+  const drill = numberDrill(n)
+  return drill && { measurements: [sized(passage, from, place + 1, 'drill', drill, drill.name)], next: place + 1 }
 }
 
 const screwSizes = new Set([0, 2, 4, 5, 6, 8, 10, 12, 14])
@@ -76,16 +89,26 @@ function namesScrewOrPlace(passage: Passage, next: number, number: number): bool
   return false
 }
 
+const quotes = new Set(['"', '“', '”', "'", '‘', '’'])
+
+/** An "F" drill. */
+export function readQuotedLetter(passage: Passage, at: number): Finding | undefined {
+  const drill = quotes.has(signAt(passage, at + 2)) && isAttached(passage, at + 1) && isAttached(passage, at + 2) ? drillNamed(capitalAt(passage, at + 1)) : undefined
+  const noun = drill ? nounBehind(passage, at + 3) : 0
+  return drill && noun > 0 ? { measurements: [sized(passage, at, noun, 'drill', drill, drill.name)], next: noun } : undefined
+}
+
 /** What "letter" or "size" begins, the noun behind included: letter F drill, size F. */
 export function readLetterWord(passage: Passage, at: number): Finding | undefined {
   const word = wordAt(passage, at)
-  const place = signAt(passage, at + 1) === '-' && isAttached(passage, at + 1) ? at + 2 : at + 1
+  const place = quotes.has(signAt(passage, at + 1)) || (signAt(passage, at + 1) === '-' && isAttached(passage, at + 1)) ? at + 2 : at + 1
+  const behind = quotes.has(signAt(passage, place + 1)) && isAttached(passage, place + 1) && quotes.has(signAt(passage, place - 1)) ? place + 2 : place + 1
   const letter = capitalAt(passage, place)
-  const noun = nounBehind(passage, place + 1)
+  const noun = nounBehind(passage, behind)
   const drill = letter === '' ? (noun > 0 ? drillNamed(lowerLetter(passage, place)) : undefined) : drillNamed(letter)
   if (!drill) return undefined
-  if (noun === 0 && !isDrillLetter(passage, at, place + 1, word)) return undefined
-  const next = noun > 0 ? noun : place + 1
+  if (noun === 0 && !isDrillLetter(passage, at, behind, word)) return undefined
+  const next = noun > 0 ? noun : behind
   return { measurements: [sized(passage, at, next, 'drill', drill, drill.name)], next }
 }
 
@@ -94,6 +117,8 @@ export function readLoneLetter(passage: Passage, at: number): Finding | undefine
   const letter = capitalAt(passage, at)
   const noun = nounBehind(passage, at + 1)
   if (letter === '' || letter === 'A' || letter === 'I' || noun === 0 || (isAttached(passage, at) && signAt(passage, at - 1) !== '(')) return undefined
+  // An 18 V drill, a 600 W drill: what drives it.
+  if ((letter === 'V' || letter === 'W') && numberAt(passage, at - 1)) return undefined
   const drill = drillNamed(letter)
   return drill && { measurements: [sized(passage, at, noun, 'drill', drill, drill.name)], next: noun }
 }

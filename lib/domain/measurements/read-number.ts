@@ -1,5 +1,5 @@
 // One number as the trade writes it: 36, .032, 3/16, 2 1/8, 2-1/8, 3½, twenty-one, three eighths. Units and ranges are not read here.
-import { signAt, wordAt, type Passage } from './passage'
+import { isAttached, signAt, wordAt, type Passage } from './passage'
 import { countedNouns } from './surroundings'
 
 export interface NumberRead {
@@ -27,9 +27,16 @@ export function readNumber(passage: Passage, at: number): NumberRead | undefined
   if (type === 'whole') {
     const mixed = readMixed(passage, at, n)
     if (mixed) return mixed
+    const part = n > 0 && n <= mostWhole ? partBehindAnd(passage, at + 1) : undefined
+    if (part) return { ...inWords(n * part.parts + part.count, part.parts, at, part.next), form: 'words' }
   }
-  return d === 0 ? undefined : { n, d, form: type, text, from: at, next: at + 1 }
+  return d === 0 ? undefined : { n, d, form: type, text, from: at, next: type === 'fraction' ? behindEnding(passage, at + 1) : at + 1 }
 }
+
+const endings = new Set(['th', 'ths', 'nd', 'nds', 'rd', 'rds'])
+
+/** 1/16th, 3/32nds. */
+const behindEnding = (passage: Passage, at: number): number => (isAttached(passage, at) && endings.has(wordAt(passage, at)) ? at + 1 : at)
 
 function readMixed(passage: Passage, at: number, whole: number): NumberRead | undefined {
   const hyphen = signAt(passage, at + 1) === '-' && passage.lexemes[at + 1]?.gap === 0
@@ -39,7 +46,7 @@ function readMixed(passage: Passage, at: number, whole: number): NumberRead | un
   if (whole > mostWhole || fraction.gap === 2 || (hyphen && fraction.gap !== 0)) return undefined
   // "3 1/8 rivets" are three rivets.
   if (!hyphen && fraction.gap === 1 && countedNouns.has(wordAt(passage, place + 1))) return undefined
-  return { n: whole * fraction.d + fraction.n, d: fraction.d, form: 'mixed', text: `${whole} ${fraction.text}`, from: at, next: place + 1 }
+  return { n: whole * fraction.d + fraction.n, d: fraction.d, form: 'mixed', text: `${whole} ${fraction.text}`, from: at, next: behindEnding(passage, place + 1) }
 }
 
 const ones = 'zero one two three four five six seven eight nine ten eleven twelve thirteen fourteen fifteen sixteen seventeen eighteen nineteen'.split(' ')
@@ -68,8 +75,16 @@ function readNumberWords(passage: Passage, at: number): NumberRead | undefined {
   if (!whole) return undefined
   const part = partAt(passage, signAt(passage, whole.next) === '-' ? whole.next + 1 : whole.next)
   if (part) return whole.value < part.parts ? inWords(whole.value, part.parts, at, part.next) : undefined
-  const more = wordAt(passage, whole.next) === 'and' && wordAt(passage, whole.next + 1) === 'a' ? partAt(passage, whole.next + 2) : undefined
-  return more ? inWords(whole.value * more.parts + 1, more.parts, at, more.next) : inWords(whole.value, 1, at, whole.next)
+  const more = partBehindAnd(passage, whole.next)
+  return more ? inWords(whole.value * more.parts + more.count, more.parts, at, more.next) : inWords(whole.value, 1, at, whole.next)
+}
+
+/** And a half, and three eighths. */
+function partBehindAnd(passage: Passage, at: number): { count: number; parts: number; next: number } | undefined {
+  if (wordAt(passage, at) !== 'and') return undefined
+  const counted = wordAt(passage, at + 1) === 'a' ? { value: 1, next: at + 2 } : readWholeWords(passage, at + 1)
+  const part = counted && partAt(passage, signAt(passage, counted.next) === '-' ? counted.next + 1 : counted.next)
+  return part && counted.value < part.parts ? { count: counted.value, ...part } : undefined
 }
 
 function partAt(passage: Passage, at: number): { parts: number; next: number } | undefined {

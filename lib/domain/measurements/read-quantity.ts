@@ -3,6 +3,7 @@ import { isBareLength } from './bare-length'
 import { nothing, quantity, wireGauge, type Finding } from './make-measurement'
 import type { Measurement, UnitName } from './measurement'
 import { hasWordBefore, isAttached, numberAt, signAt, wordAt, type Passage } from './passage'
+import { readUnsignedDrill } from './read-drill'
 import { readNumber, type NumberRead } from './read-number'
 import { readThread } from './read-thread'
 import { readUnit } from './read-unit'
@@ -70,7 +71,8 @@ function fits(passage: Passage, number: NumberRead, unit: UnitName): boolean {
   // Two feet may be a stand's.
   if (unit === 'ft') return footWords.has(wordAt(passage, number.next + 1)) || partNouns.has(wordAt(passage, number.next + 1))
   const word = wordAt(passage, signAt(passage, number.next) === '-' ? number.next + 1 : number.next)
-  return unit !== 'bar' && unit !== 'AWG' && (word.length > 2 || ['mm', 'cm', 'of', 'an', 'a', 'ft', 'in'].includes(word) && !(word === 'in' && unit === 'in'))
+  if (unit === 'bar') return word === 'bar' && number.d === 1 && number.n > 1
+  return unit !== 'AWG' && (word.length > 2 || ['mm', 'cm', 'of', 'an', 'a', 'ft', 'in'].includes(word) && !(word === 'in' && unit === 'in'))
 }
 
 /** "A -6 in scrap": a rivet's dash number, with a preposition behind it. */
@@ -149,6 +151,7 @@ function readUpperEnd(passage: Passage, first: Value): Value | undefined {
   if (passage.lexemes[at]?.gap === 2) return undefined
   const word = wordAt(passage, at)
   if (rangeWords.has(word) || (word === 'and' && isBetween(passage, first.from))) return readValue(passage, at + 1)
+  if (word === 'up' && wordAt(passage, at + 1) === 'to') return readValue(passage, at + 2)
   if (!dashes.has(signAt(passage, at))) return undefined
   const tight = isAttached(passage, at) && isAttached(passage, at + 1)
   const loose = !isAttached(passage, at) && !isAttached(passage, at + 1)
@@ -162,6 +165,8 @@ const isBetween = (passage: Passage, at: number): boolean => wordAt(passage, at 
 function readSingle(passage: Passage, { number, unit, from, next, value, text }: Value): Finding {
   if (unit === 'AWG') return isGauge(number) ? { measurements: [wireGauge(passage, from, next, value.n)], next } : nothing(next)
   if (unit) return { measurements: [quantity(passage, from, next, unit, value, text)], next }
+  const drill = readUnsignedDrill(passage, number)
+  if (drill) return drill
   const sheet = readSheet(passage, number)
   if (sheet) return { measurements: [sheet], next: number.next }
   if (!isBareLength(passage, number)) return nothing(number.form === 'words' ? number.from + 1 : number.next)

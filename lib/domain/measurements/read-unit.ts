@@ -60,8 +60,9 @@ function readWord(passage: Passage, at: number): UnitRead | undefined {
   switch (word) {
     case 'm': return letters(passage, at) === 'm' ? { unit: 'm', next: at + 1 } : undefined
     case 'n': case 'newton': case 'newtons': return readNewton(passage, at)
+    case 'p': return readSpelledPsi(passage, at)
     case 'oz': case 'ounce': return readOunce(passage, at)
-    case 'deg': case 'degree': case 'degrees': return readDegrees(passage, at)
+    case 'deg': case 'degs': case 'degree': case 'degrees': return readDegrees(passage, at)
     case 'f': case 'c': return readScale(passage, at)
     case 'bar': case 'bars': return ['stock', 'of'].includes(wordAt(passage, at + 1)) ? undefined : { unit: 'bar', next: at + 1 }
     case 'thousandth': case 'thousandths': return { unit: 'thou', next: behindOfAnInch(passage, at + 1) }
@@ -105,6 +106,12 @@ function readPound(passage: Passage, at: number): UnitRead | undefined {
   if (footWords.has(word)) return { unit: 'ft-lb', next: arm + 1 }
   if (!inchWords.has(word)) return undefined
   return spaced && word === 'in' && isPreposition(passage, arm + 1) ? undefined : { unit: 'in-lb', next: arm + 1 }
+}
+
+/** p.s.i. */
+function readSpelledPsi(passage: Passage, at: number): UnitRead | undefined {
+  const spelled = ['.', 's', '.', 'i'].every((piece, index) => isAttached(passage, at + 1 + index) && passage.lexemes[at + 1 + index]?.text === piece)
+  return spelled ? { unit: 'psi', next: signAt(passage, at + 5) === '.' && isAttached(passage, at + 5) ? at + 6 : at + 5 } : undefined
 }
 
 function readOunce(passage: Passage, at: number): UnitRead | undefined {

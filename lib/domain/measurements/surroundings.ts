@@ -8,7 +8,7 @@ export const labels = words(`
   rev revision version ver part parts serial sn pn model drawing dwg question lesson answer task rib ribs bay bays frame frames bulkhead station kit bulletin sb
   ac cfr far faa iso sta fs wl bl plan house mentor stamp cylinder cylinders rule room box bag row line phone tel call order job invoice lot batch line position pos
   ch channel day week chapter appendix letter code key type class grade category level phase stage round flight hull wing aircraft builder plane
-  tag label port relay fuse breaker circuit gate runway route`)
+  tag label port relay fuse breaker circuit gate runway route tank`)
 
 /** Behind these a fraction, too, is "this of that": sheet 3/4, score 3/4. */
 export const fractionLabels = words('page pages pg sheet step steps section figure fig table item rev revision score scored day lesson version question chapter rated')

@@ -85,6 +85,7 @@ const readers: readonly Reader[] = [
   // Whole diameters need the plural or a capital D: ".188 diameter" is a length.
   { needs: /\dd\b| d\b|½d\b|diameters/i, pattern: new RegExp(`(?<![\\w/.#-])(${count})(?: ?(?:-|–|to) ?(${count}))? ?(?:[x×] ?|times )?(?:(?:a |the |its |of the )?(?:rivet |shank |bolt |hole )?diameters\\b|(?:a )?D\\b(?! ?(?:drill|bit)))`, 'giu'), read: multiple('diameters') },
   { needs: /diameter|dia\b/i, pattern: new RegExp(`(?<![\\w/.#-])(${count})(?: (?:-|–|to) (${count}))? ?(?:(?:[x×]|times) (?:the |its |a )?|(?<=half |twice )(?:the |its |a ))(?:rivet |shank |bolt |rivet's )?(?:diameter|dia)\\b`, 'giu'), read: multiple('diameters') },
+  { needs: /one (?:\w+ )?diameter/i, pattern: /\bone (?:rivet |shank |hole |bolt )?diameter(?= (?:from|off|away|to|between|apart|is)\b)/giu, read: () => ({ what: 'diameters', low: 1, high: 1, unit: 'D' }) },
   { needs: /\dt\b| t\b|thickness/i, pattern: new RegExp(`(?<![\\w/.#-])(${count})(?: ?(?:-|–|to) ?(${count}))? ?(?:t\\b|(?:[x×] ?|times )(?:the |its )?(?:sheet |metal |material |skin )?(?:thickness|t\\b)|thicknesses\\b)`, 'giu'), read: multiple('thicknesses') },
   { needs: /screw|nutplate/i, pattern: new RegExp(`(?:#|\\bno\\.? ?|\\bnumber )(\\d{1,2})(?= (?:${screwWords} ){0,3}(?:screws?|nutplates?)\\b)`, 'giu'), read: (match) => ({ what: 'screw', name: match[1] ?? '' }) },
   { needs: /931|35489/, pattern: /\bAN ?931-(\d{1,2})-(\d{1,2})\b|\bMS ?35489-(\d{1,3})\b/giu, read: (match) => ({ what: 'grommet', name: match[0].toUpperCase().replaceAll(' ', '') }) },
@@ -95,7 +96,7 @@ const readers: readonly Reader[] = [
   { needs: /rivet/i, pattern: /(?<![\w-])(?:-|dash[ -]?)(\d)(?= (?:(?:solid|flush|universal|AD|blind|pop|pull|round|countersunk) ){0,2}rivets?\b)/giu, read: (match) => ({ what: 'rivet', low: Number(match[1]) / 32, high: Number(match[1]) / 32 }), yields: true },
   { needs: /4[27][06]|1097/, pattern: /\b(?:AN ?(?:426|470)|MS ?20(?:426|470)|NAS ?1097)(?:AD)?\b/gu, read: (match) => ({ what: 'head', name: /470/.test(match[0]) ? 'universal' : 'flush' }), yields: true },
   { needs: /cent(?:er|re)/i, pattern: /(?<=\bon )(\d{1,2})\/(\d{1,2})(?= (?:inch )?cent(?:er|re)s?\b)/giu, read: (match) => ({ what: 'length', low: Number(match[1]) / Number(match[2]), high: Number(match[1]) / Number(match[2]), unit: 'in' }), yields: true },
-  { needs: /letter|drill|size/i, pattern: /\b(?:letter|drill|size) ([A-Z])\b(?![-'’])/gu, read: (match) => drillMark(match[1] ?? ''), yields: true },
+  { needs: /letter|drill|size/i, pattern: /\b(?:letter|drill|size) ["“]?([A-Z])\b["”]?(?![-'’])/gu, read: (match) => drillMark(match[1] ?? ''), yields: true },
   { needs: /\d ?a/i, pattern: /(?<![\w./-])(\d{1,3}(?:\.\d)?) ?(?:A\b|amps?\b|amperes?\b)/gu, read: (match) => ({ what: 'amps', low: Number(match[1]), unit: 'A' }), yields: true },
   { needs: /thread/i, pattern: /(?<![\w./-])(\d(?:\.\d)?|no|one|two|three|four|five) (?:full |whole |complete )?threads?\b/giu, read: (match) => ({ what: 'threads', low: match[1]?.toLowerCase() === 'no' ? 0 : countOf(match[1] ?? '') }) },
   { needs: /\d ?[a-z]/i, pattern: /(?<![\w./#-])(\d{1,6}(?:\.\d{1,4})?) ?(km\/h|m\/s|[a-z]{1,9})\b(?![-·])/giu, read: amountMark, yields: true },

@@ -78,7 +78,10 @@ export function quotedSpans(text: string): { start: number; end: number }[] {
   for (let at = 0; at < text.length; at += 1) {
     const sign = text.charAt(at)
     if (open >= 0 && (sign === closer || sign === '\n' || at - open > 2 * longest)) {
-      if (sign === closer && !(closer === '"' && isInchMark(text, at, open))) spans.push({ start: open, end: at + 1 })
+      if (sign === closer && !(closer === '"' && isInchMark(text, at, open))) {
+        // A letter in quotation marks is a drill's name and not somebody's words.
+        if (at - open > 2) spans.push({ start: open, end: at + 1 })
+      }
       else if (sign === closer) continue
       open = -1
     } else if (open < 0) {

@@ -2,7 +2,7 @@
 import type { Mark } from './marks'
 import type { ClaimRole } from './numbers-check'
 
-const asking = /^\W*(?:is|are|does|do (?:i|you|we|they|these|those|the)|can (?:i|you|we|one|a|an|the|somebody|anyone)|should|would|could|will|shall|what|which|how|why|has|did|anyone|anybody)\b|\b(?:i wonder|wondering|not sure|unsure|don't know|do not know|no idea|anyone know|question is)\b/i
+const asking = /^\W*(?:is|are|does|do (?:i|you|we|they|these|those|the)|can (?:i|you|we|one|a|an|the|somebody|anyone)|should|would|could|will|shall|what|which|how|why|has|did|anyone|anybody)\b|\b(?:i wonder(?:ed)?|we wondered|wondering|not sure|unsure|don't know|do not know|no idea|anyone know|question is)\b/i
 const reading = /\b(?:(?:i|we|he|she|they|mine|it|that|this|these|those|ours|caliper|calipers|gauge|gage|micrometer|rule|ruler|wrench|which|holes?|heads?|tails?|edges?|bolts?|rivets?|drills?|bits?|sheets?|skins?|grommets?|one|ones) (?:all |now |actually |only |just )?(?:measured?s?|reads?|read|mic(?:'d|ed|s)|came out|comes out|turned out|shows?|showed)|measured|measuring|as measured|calipers? (?:say|says|said)|came out|turned out|i get|i got|i have only|i've only|i've got|mic'd|miked)\b/i
 const shouldMeasure = /\b(?:should|must|ought to|has to|have to|needs? to|will) (?:\w+ )?(?:measure|read|come out|show)\b/i
 const speaker = '(?:he|she|they|someone|somebody|people|some|everyone|everybody|friend|guy|fellow|buddy|neighbou?r|mate|instructor|inspector|mechanic|vendor|seller|shop|supplier|builder|owner|mentor|dealer|chart|book|manual|handbook|video|forum|page|site|website|internet|web|post|poster|label|sticker|placard|card|box|package|packet|bag|catalog(?:ue)?|drawing|drawings|plans?|kit|sheet|note|notes|instructions?|leaflet|article|table|text|maker|factory)'

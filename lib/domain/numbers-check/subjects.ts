@@ -71,11 +71,13 @@ const isRivetOf = (statement: Statement, mark: Mark): boolean => statement.items
 
 /** "#30 for 1/8", "for 1/8, #30": a rivet's size beside a number drill, where nothing else is spoken of. */
 function forFraction(statement: Statement): Subject[] {
-  if (!statement.marks.some(({ what }) => what === 'drill') || hasAny(statement, 'bolt', 'bolts', 'screw', 'screws', 'tap', 'wire', 'tube', 'pin', 'pins', 'hinge', 'grommet', 'bushing', 'cable')) return []
+  const isOfHeads = hasAny(statement, 'tail', 'tails', 'shop-head', 'edge') || /\b(?:formed|shop|driven|bucked)[ -]heads?\b/i.test(statement.text)
+  if (!(isOfHeads || statement.marks.some(({ what }) => what === 'drill')) || hasAny(statement, 'bolt', 'bolts', 'screw', 'screws', 'tap', 'wire', 'tube', 'pin', 'pins', 'hinge', 'grommet', 'bushing', 'cable')) return []
   return statement.marks.flatMap((mark) => {
     const size = mark.what === 'length' && mark.raw.includes('/') && nounOf(statement, mark) === '' ? rivetSize(mark.low) : undefined
     const at = placeOf(statement, mark)
-    return size && (wordAt(statement, at - 1) === 'for' || ['takes', 'take', 'gets', 'get', 'wants', 'needs'].includes(wordAt(statement, at + 1))) ? [{ kind: 'rivet' as const, mark, inches: inchesOf(size), name: size }] : []
+    const lead = ['the', 'a', 'an'].includes(wordAt(statement, at - 1)) ? wordAt(statement, at - 2) : wordAt(statement, at - 1)
+    return size && (lead === 'for' || (isOfHeads && lead === 'on') || ['takes', 'take', 'gets', 'get', 'wants', 'needs'].includes(wordAt(statement, at + 1))) ? [{ kind: 'rivet' as const, mark, inches: inchesOf(size), name: size }] : []
   })
 }
 

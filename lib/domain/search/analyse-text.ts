@@ -2,6 +2,7 @@
 // Stems are Porter's (the stemmer package); numbers and designations are designations.ts.
 import { stemmer } from 'stemmer'
 import { findSpacedDesignations, isUnit, spellChunk } from './designations'
+import { anyStepTerm, exactStepTerm, findPlansReferences } from './plans-reference'
 import { isStopWord } from './stop-words'
 
 export interface Token {
@@ -124,13 +125,17 @@ function push(analysis: Analysis, raw: string, also: readonly string[], start: n
   if (term !== '') analysis.tokens.push({ term, also, kind, word, start, end })
 }
 
-/** "step 6" is also one term, so that a plans reference finds its step and not every six. */
+/** "step 6" is also one term, and with its page two more, so that a plans reference finds its step and not every six. */
 function joinSteps(analysis: Analysis): Analysis {
   for (const [index, token] of analysis.tokens.entries()) {
     const before = analysis.tokens[index - 1]
     if (before?.term === 'step' && token.kind === 'number' && /^\d{1,3}[a-z]?$/.test(token.term)) {
       analysis.tokens[index] = { ...token, also: [...token.also, `step${token.term}`] }
     }
+  }
+  for (const { page, step, number } of findPlansReferences(analysis.tokens)) {
+    const token = analysis.tokens[number]
+    if (token) analysis.tokens[number] = { ...token, also: [...token.also, exactStepTerm(page, step), anyStepTerm(page)] }
   }
   return analysis
 }

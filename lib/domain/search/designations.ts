@@ -34,13 +34,18 @@ export function findSpacedDesignations(text: string): Found[] {
   return found.sort((a, b) => a.start - b.start)
 }
 
-/** Spellings of a chunk that holds a digit, lower case: one, or two when a unit is stuck on ("18mm"). */
+/** A plans page and its step in one: w3-2/6. A page begins with a letter here, because 1-1/16 is a length. */
+const pageAndStep = /^([a-z]{1,3}\d{1,3}-\d{1,3}[a-z]?)\/(\d{1,3}[a-z]?)$/
+
+/** Spellings of a chunk that holds a digit, lower case: one, or two when a unit is stuck on ("18mm") or a step ("W3-2/6"). */
 export function spellChunk(chunk: string): Spelling[] {
   const drill = /^#(\d{1,3})(?:-(\d{1,3}))?$/.exec(chunk)
   if (drill) return [drill[2] ? { term: `${Number(drill[1])}-${drill[2]}`, also: [`#${Number(drill[1])}`] } : { term: `#${Number(drill[1])}`, also: [] }]
   const bare = chunk.replaceAll('#', '')
   const stuck = numberWithUnit.exec(bare)
   if (stuck) return [spellNumber(stuck[1] ?? ''), { term: stuck[2] ?? '', also: [] }]
+  const slashed = pageAndStep.exec(bare)
+  if (slashed) return [spellDesignation(slashed[1] ?? ''), { term: slashed[2] ?? '', also: [`step${slashed[2] ?? ''}`] }]
   return [/^[\d.,/-]+$/.test(bare) ? spellNumber(bare) : spellDesignation(bare)]
 }
 

@@ -9,10 +9,15 @@ export interface WeighedEntry {
 /** A question that nobody has answered helps least. */
 const unanswered = 0.95
 
+/** The passage whose evidence counts for the entry. */
+export function decidingPassage<P extends { weight: number }>({ kind, passages }: { kind: WeighedEntry['kind']; passages: readonly P[] }): P | undefined {
+  const [own, ...answers] = passages
+  return kind === 'lesson' ? own : answers.reduce<P | undefined>((best, answer) => (best && best.weight >= answer.weight ? best : answer), undefined) ?? own
+}
+
 /** Factor on the text score. A question is as good as its best answer, because that is what its reader will go by. */
 export function entryWeight({ kind, passages }: WeighedEntry): number {
-  const [own, ...answers] = passages
-  if (!own) return 0
-  if (kind === 'lesson') return own.weight
-  return answers.length === 0 ? own.weight * unanswered : Math.max(...answers.map((answer) => answer.weight))
+  const deciding = decidingPassage({ kind, passages })
+  if (!deciding) return 0
+  return kind === 'question' && passages.length === 1 ? deciding.weight * unanswered : deciding.weight
 }

@@ -1,4 +1,5 @@
-// How much what is proven counts in the order of search results. One formula, here and nowhere else.
+// How much what is proven counts in the order of search results: score = text × evidence (here) × directness (directness.ts).
+// The evidence formula stands here and nowhere else.
 import type { StampState } from '../stamps/stamp-state'
 import { successBound } from '../evidence/order-posts'
 
@@ -19,17 +20,30 @@ const weightOfState: Record<StampState, number> = {
 const least = 0.85
 const most = 1.25
 
+/** The evidence factor and what it is made of. */
+export interface EvidenceParts {
+  ofState: number
+  /** What how it went adds; 0 on critical systems and where nobody has told. */
+  ofOutcomes: number
+  factor: number
+}
+
 /**
  * Factor on the text score: weight of the stamp state, plus off critical systems 0.1 × the Wilson lower bound of how it
  * went (−0.05 where the bound is 0: tried, and never worked), kept within 0.85 … 1.25. Withdrawn gives 0: never shown.
  */
 export function evidenceWeight(fact: EvidenceFact): number {
-  const ofState = weightOfState[fact.stampState]
-  if (ofState === 0) return 0
-  return Math.min(most, Math.max(least, ofState + ofOutcomes(fact)))
+  return weighEvidence(fact).factor
 }
 
-function ofOutcomes(fact: EvidenceFact): number {
+/** The same factor with its parts, for showing. */
+export function weighEvidence(fact: EvidenceFact): EvidenceParts {
+  const ofState = weightOfState[fact.stampState]
+  const ofOutcomes = outcomesWeight(fact)
+  return { ofState, ofOutcomes, factor: ofState === 0 ? 0 : Math.min(most, Math.max(least, ofState + ofOutcomes)) }
+}
+
+function outcomesWeight(fact: EvidenceFact): number {
   const bound = fact.critical ? null : successBound(fact)
   if (bound === null) return 0
   return bound === 0 ? -0.05 : 0.1 * bound

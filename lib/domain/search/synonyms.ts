@@ -24,6 +24,8 @@ export class Synonyms {
   /** What a question is widened by: the same groups, and the one-way ones by their left side. */
   private readonly inQuery: Lexicon = new Map()
 
+  private readonly phrases = new Map<string, readonly string[]>()
+
   constructor(list: SynonymList) {
     list.twoWay.forEach((group, index) => this.addGroup(group, `${groupMark}${index}`))
     list.oneWay.forEach(({ from, to }, index) => this.addOneWay(from, to, `${groupMark}o${index}`))
@@ -32,6 +34,11 @@ export class Synonyms {
   /** Group terms of a text, once for every place. */
   labelText(tokens: readonly Token[]): PhraseMatch[] {
     return matchAll(this.inText, tokens)
+  }
+
+  /** The phrases a group's term stands for; empty for other terms. */
+  phrasesOf(term: string): readonly string[] {
+    return this.phrases.get(term) ?? []
   }
 
   /** Phrases of a question, longest first and without overlaps: in "drill stop", "drill" is not widened by itself. */
@@ -50,6 +57,7 @@ export class Synonyms {
     const phrases = new Map(group.map(phraseTerms).filter((p) => p !== null).map((p) => [p.join(' '), p] as const))
     // A group whose phrases all stem to the same word says nothing that stemming has not said.
     if (phrases.size < 2) return
+    this.phrases.set(term, group)
     for (const phrase of phrases.values()) {
       addTo(this.inText, phrase, [term])
       addTo(this.inQuery, phrase, [term])
@@ -63,7 +71,10 @@ export class Synonyms {
     for (const target of to.map(phraseTerms)) {
       if (!target) continue
       const groups = groupsOf(this.inText, target)
-      if (groups.length === 0) addTo(this.inText, target, [ownTerm])
+      if (groups.length === 0) {
+        addTo(this.inText, target, [ownTerm])
+        this.phrases.set(ownTerm, to)
+      }
       for (const term of groups.length > 0 ? groups : [ownTerm]) terms.add(term)
     }
     addTo(this.inQuery, source, [...terms])

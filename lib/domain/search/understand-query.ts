@@ -2,8 +2,12 @@
 // Pure: what the corpus knows comes in as `Corpus`; scoring and MiniSearch stand in lib/search.
 import { analyseText, stemOf, type Token } from './analyse-text'
 import { findMeantWords, splitCompound } from './find-meant-words'
+import { findValueRoutes, joinRoutes, type ValueOfTokens } from './number-routes'
+import { isAskedAround } from './order-question'
+import { readPlaces, type AskedPlace } from './place-concepts'
 import type { Synonyms } from './synonyms'
 import type { Candidate, Vocabulary } from './vocabulary'
+import type { SearchWeights } from './weights'
 
 export interface Corpus {
   documents: number
@@ -11,6 +15,8 @@ export interface Corpus {
   frequency(term: string): number
   vocabulary: Vocabulary
   synonyms: Synonyms
+  /** How much each kind of route counts. */
+  factor: SearchWeights['factor']
 }
 
 /** One way to hold a concept: all of `terms`. */
@@ -20,6 +26,8 @@ export interface Route {
   weight: number
   /** Share of the concept that is covered, 0 … 1. */
   strength: number
+  /** Adds to the score only where this term is not held: another spelling of the same says nothing more. */
+  unless?: string
 }
 
 export interface Concept {
@@ -32,6 +40,8 @@ export interface Concept {
 
 export interface UnderstoodQuery {
   concepts: Concept[]
+  /** Steps of plans pages that are asked for. */
+  places: AskedPlace[]
   ignored: string[]
   didYouMean: string | null
 }
@@ -43,11 +53,6 @@ export interface QueryOptions {
   correct: boolean
 }
 
-/** Fitted on a small trade collection and on a large one of abstracts; see the tests for what they promise. */
-const factor = {
-  synonym: 0.5, also: 0.25, joined: 0.2, splitUnknown: 0.9, splitKnown: 0.2, corrected: [0.9, 0.6, 0.5], completed: 0.8,
-  unit: 0.3, unknownNumber: 0.4,
-}
 const shortestPrefix = 3
 const mostCompletions = 16
 const mostCorrected = 8
@@ -55,13 +60,20 @@ const mostCorrected = 8
 /** Reads `text` for this corpus. Never throws; at most `mostConcepts` concepts, the rarest, the rest named in `ignored`. */
 export function understandQuery(text: string, corpus: Corpus, options: QueryOptions): UnderstoodQuery {
   const { tokens, stopped } = analyseText(text)
-  if (tokens.length === 0) return { concepts: [], ignored: distinct(stopped), didYouMean: null }
-  const drafts = draftConcepts(tokens, corpus)
-  const { kept, dropped } = keepRarest(drafts, options.mostConcepts)
-  const corrections = options.correct || options.completeLast ? fillUnknown(kept, tokens, text, corpus, options) : []
+  if (tokens.length === 0) return { concepts: [], places: [], ignored: distinct(stopped), didYouMean: null }
+  const { places, concepts: placed, taken } = readPlaces(text, tokens, corpus, (frequency) => rarity(frequency, corpus.documents))
+  const isAround = isAskedAround(text)
+  const words = tokens.filter((token, place) => !taken.has(place) && !isAround(token.word))
+  const drafts = draftConcepts(text, words, corpus)
+  const { kept, dropped } = keepRarest(drafts, Math.max(0, options.mostConcepts - placed.length))
+  const corrections = options.correct || options.completeLast ? fillUnknown(kept, words, text, corpus, options) : []
   return {
-    concepts: kept.filter((draft) => draft.mass > 0).map(({ token, mass, routes }) => ({ word: text.slice(token.start, token.end), mass, routes })),
-    ignored: distinct(dropped.map(({ token }) => text.slice(token.start, token.end))),
+    concepts: [
+      ...placed.slice(0, options.mostConcepts),
+      ...kept.filter((draft) => draft.mass > 0).map(({ token, mass, routes }) => ({ word: text.slice(token.start, token.end), mass, routes })),
+    ],
+    places,
+    ignored: distinct([...placed.slice(options.mostConcepts).map(({ word }) => word), ...dropped.map(({ token }) => text.slice(token.start, token.end))]),
     didYouMean: corrections.length > 0 ? replaceWords(text, corrections) : null,
   }
 }
@@ -73,7 +85,7 @@ export function rarity(frequency: number, documents: number): number {
 
 interface Draft { token: Token; position: number; mass: number; known: boolean; routes: Route[] }
 
-function draftConcepts(tokens: readonly Token[], corpus: Corpus): Draft[] {
+function draftConcepts(text: string, tokens: readonly Token[], corpus: Corpus): Draft[] {
   const drafts = new Map<string, Draft>()
   tokens.forEach((token, position) => {
     if (!drafts.has(token.term)) drafts.set(token.term, draftOf(token, position, corpus))
@@ -81,21 +93,22 @@ function draftConcepts(tokens: readonly Token[], corpus: Corpus): Draft[] {
   for (const { first, last, terms } of corpus.synonyms.widenQuery(tokens)) {
     for (const token of tokens.slice(first, last + 1)) widen(drafts.get(token.term), terms, last - first + 1, corpus)
   }
+  for (const value of findValueRoutes(text, tokens, (term) => corpus.frequency(term))) widenByValue(drafts, value, corpus)
   joinNeighbours(tokens, drafts, corpus)
   return [...drafts.values()]
 }
 
 function draftOf(token: Token, position: number, corpus: Corpus): Draft {
   const frequency = corpus.frequency(token.term)
-  const scale = token.kind === 'unit' ? factor.unit : 1
+  const scale = token.kind === 'unit' ? corpus.factor.unit : 1
   const routes: Route[] = frequency > 0 ? [{ terms: [token.term], weight: scale, strength: 1 }] : []
   for (const term of token.also) {
-    if (corpus.frequency(term) > 0) routes.push({ terms: [term], weight: factor.also * scale, strength: frequency > 0 ? 0.6 : 0.8 })
+    if (corpus.frequency(term) > 0) routes.push({ terms: [term], weight: corpus.factor.also * scale, strength: frequency > 0 ? 0.6 : 0.8 })
   }
   const known = routes.length > 0
   const split = token.kind === 'word' && frequency > 0 && token.word.length >= 7 ? splitCompound(token.word, corpus.vocabulary) : null
-  if (split) routes.push({ terms: split.map(stemOf), weight: factor.splitKnown, strength: 0.7 })
-  const missing = token.kind === 'word' ? 1 : factor.unknownNumber
+  if (split) routes.push({ terms: split.map(stemOf), weight: corpus.factor.splitKnown, strength: 0.7 })
+  const missing = token.kind === 'word' ? 1 : corpus.factor.unknownNumber
   const rarest = Math.max(frequency, ...token.also.map((term) => corpus.frequency(term)))
   return { token, position, known, mass: rarity(rarest, corpus.documents) * (known ? 1 : missing) * scale, routes }
 }
@@ -104,10 +117,22 @@ function draftOf(token: Token, position: number, corpus: Corpus): Draft {
 function widen(draft: Draft | undefined, terms: readonly string[], length: number, corpus: Corpus): void {
   if (!draft) return
   const present = terms.filter((term) => corpus.frequency(term) > 0)
-  for (const term of present) draft.routes.push({ terms: [term], weight: factor.synonym / Math.sqrt(length), strength: 0.9 })
+  for (const term of present) draft.routes.push({ terms: [term], weight: corpus.factor.synonym / Math.sqrt(length), strength: 0.9 })
   if (present.length > 0 && !draft.known) {
     draft.known = true
     draft.mass = rarity(Math.max(...present.map((term) => corpus.frequency(term))), corpus.documents)
+  }
+}
+
+/** A number is also looked up by its value. */
+function widenByValue(drafts: Map<string, Draft>, value: ValueOfTokens, corpus: Corpus): void {
+  for (const token of value.tokens) {
+    const draft = drafts.get(token.term)
+    if (!draft) continue
+    draft.routes = joinRoutes(draft.routes, token, value)
+    if (draft.known || value.routes.length === 0) continue
+    const scale = token.kind === 'unit' ? corpus.factor.unit : 1
+    Object.assign(draft, { known: true, mass: rarity(Math.max(...value.routes.map(({ term }) => corpus.frequency(term))), corpus.documents) * scale })
   }
 }
 
@@ -119,7 +144,7 @@ function joinNeighbours(tokens: readonly Token[], drafts: Map<string, Draft>, co
     const term = stemOf(before.word + token.word)
     if (corpus.frequency(term) === 0) return
     for (const draft of [drafts.get(before.term), drafts.get(token.term)]) {
-      draft?.routes.push({ terms: [term], weight: factor.joined, strength: 1 })
+      draft?.routes.push({ terms: [term], weight: corpus.factor.joined, strength: 1, unless: draft.token.term })
       if (draft && !draft.known) Object.assign(draft, { known: true, mass: rarity(corpus.frequency(term), corpus.documents) })
     }
   })
@@ -143,18 +168,18 @@ function fillUnknown(kept: Draft[], tokens: readonly Token[], text: string, corp
     const isHalfTyped = options.completeLast && token === lastTyped && token.end === text.length && token.word.length >= shortestPrefix
     const completed = isHalfTyped ? corpus.vocabulary.startingWith(token.word, mostCompletions) : []
     if (completed.length > 0) {
-      addRoutes(draft, completed, { weights: [], otherwise: factor.completed, certainty: 1 }, corpus)
+      addRoutes(draft, completed, { weights: [], otherwise: corpus.factor.completed, certainty: 1 }, corpus)
       continue
     }
     if (!options.correct) continue
     const meant = findMeantWords(token.word, corpus.vocabulary)
     const split = (meant[0]?.cost ?? Infinity) <= 1 ? null : splitCompound(token.word, corpus.vocabulary)
     if (split) {
-      draft.routes.push({ terms: split.map(stemOf), weight: factor.splitUnknown, strength: 1 })
+      draft.routes.push({ terms: split.map(stemOf), weight: corpus.factor.splitUnknown, strength: 1 })
       corrections.push({ token, word: split.join(' ') })
     } else if (meant[0]) {
       // Three letters with a slip may be anything: what is found by them counts half, and its loss in full.
-      addRoutes(draft, meant, { weights: factor.corrected, otherwise: 0.4, certainty: token.word.length <= 3 ? 0.5 : 1 }, corpus)
+      addRoutes(draft, meant, { weights: corpus.factor.corrected, otherwise: 0.4, certainty: token.word.length <= 3 ? 0.5 : 1 }, corpus)
       corrections.push({ token, word: meant[0].word })
     }
   }
@@ -169,7 +194,7 @@ function addRoutes(draft: Draft, candidates: readonly Candidate[], { weights, ot
     const weight = weights[rank] ?? otherwise
     draft.routes.push({ terms: [term], weight, strength: certainty })
     // A word meant by mistake is still a word of the trade, with all that it is called.
-    for (const group of groupsOf(term, corpus)) draft.routes.push({ terms: [group], weight: weight * factor.synonym, strength: 0.9 * certainty })
+    for (const group of groupsOf(term, corpus)) draft.routes.push({ terms: [group], weight: weight * corpus.factor.synonym, strength: 0.9 * certainty })
   })
   if (certainty === 1) draft.mass = rarity(Math.max(...stems.map((term) => corpus.frequency(term))), corpus.documents)
 }

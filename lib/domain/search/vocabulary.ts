@@ -16,9 +16,9 @@ export class Vocabulary {
   /** Which letters a word holds, one bit each: a distance is at least half the differing bits, so most words are passed over by one AND. */
   private letters = new Int32Array(1024)
 
-  add(word: string): void {
+  add(word: string, documents = 1): void {
     const place = this.places.get(word) ?? this.append(word)
-    this.documents[place] = (this.documents[place] ?? 0) + 1
+    this.documents[place] = (this.documents[place] ?? 0) + documents
   }
 
   remove(word: string): void {

@@ -14,6 +14,16 @@ export function readAs({ title, inputs: declared }: Declared, inputs: ShopInputs
   return said.length === 0 ? title : `${title}: ${said.join(' · ')}`
 }
 
+/** "thread 10-32 (AN3) · nut Tension: MS20365, AN310": some inputs as they were written, '' for none. */
+export function inputWords({ inputs: declared }: Pick<ShopTable, 'inputs'>, named: Readonly<Record<string, string>>): string {
+  return declared.flatMap(({ name, label, options, unit, kind }) => {
+    const text = named[name]
+    if (text === undefined) return []
+    const said = options?.find(({ value }) => value === text)?.label ?? (kind !== 'choice' && /[\d.]$/.test(text) ? `${text} ${unit === 'lbf-in' ? 'in-lb' : unit}`.trim() : text)
+    return [`${lowerFirst(label)} ${said}`]
+  }).join(' · ')
+}
+
 function valueWords({ kind, unit, options = [] }: ShopInput, value: string | number): string {
   if (typeof value === 'string') return options.find((option) => option.value === value)?.label ?? value
   if (kind === 'torque') return `${Number(value.toFixed(2))} in-lb`
@@ -22,7 +32,7 @@ function valueWords({ kind, unit, options = [] }: ShopInput, value: string | num
 }
 
 /** AD and A stay as they are; "Bore" becomes "bore". */
-const lowerFirst = (text: string): string => (/^[A-Z][A-Z]/.test(text) ? text : text.charAt(0).toLowerCase() + text.slice(1))
+export const lowerFirst = (text: string): string => (/^[A-Z][A-Z]/.test(text) ? text : text.charAt(0).toLowerCase() + text.slice(1))
 
 /**
  * Every input as it was sent, or its default, so that a kept link gives the same answer after a default has changed. Only for

@@ -2,6 +2,7 @@
 import type { Measurement } from '@/lib/domain/measurements/measurement'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { BOLTS, boltThread } from './bolt-designation'
+import { SCREWS, smallestDrillFor } from './screw-clearance'
 
 export interface ShopReading {
   table: string
@@ -18,7 +19,7 @@ export function readShopQuery(text: string): ShopReading[] {
   const query = text.slice(0, 300)
   const words = new Set(query.toLowerCase().match(/[a-z]+/g) ?? [])
   const found = findMeasurements(query)
-  return [...grommets(query, words, found), ...torques(query, words), ...rivets(words, found), ...bolts(query, words), ...drills(words, found)]
+  return [...grommets(query, words, found), ...torques(query, words), ...rivets(words, found), ...bolts(query, words), ...screws(query, words), ...drills(words, found)]
 }
 
 const has = (words: ReadonlySet<string>, ...any: string[]) => any.some((word) => words.has(word))
@@ -31,7 +32,9 @@ function grommets(query: string, words: ReadonlySet<string>, found: readonly Mea
   const size = aSize(found)
   if (!size || !has(words, 'grommet', 'grommets')) return []
   const inches = sizeOf(size)
+  const through = has(words, 'tube', 'tubing', 'conduit', 'line', 'hose', 'cable', 'bundle') ? [{ table: 'grommet', inputs: { bore: inches, through: inches }, label: `a grommet for ${inches} tube or conduit` }] : []
   return [
+    ...through,
     { table: 'grommet', inputs: { bore: inches }, label: `a grommet with a ${inches} bore` },
     { table: 'grommet', inputs: { hole: inches }, label: `a ${inches} hole that takes a grommet` },
   ]
@@ -52,8 +55,10 @@ function rivets(words: ReadonlySet<string>, found: readonly Measurement[]): Shop
   const inches = designation?.diameter ?? found.find((m) => m.kind === 'length')?.inches
   const diameter = rivetSizes.find((size) => { const [n = 0, d = 1] = size.split('/').map(Number); return inches !== undefined && Math.abs(n / d - inches) < 0.002 })
   if (!diameter) return []
-  const head = has(words, 'flush', 'countersunk') || /(?:426|1097)/.test(designation?.raw ?? '') ? 'flush' : has(words, 'pop', 'pull', 'blind') ? 'blind' : 'universal'
-  return [{ table: 'rivet', inputs: { diameter, head }, label: `a ${head === 'universal' ? 'solid' : head} rivet of ${diameter} in` }]
+  const isFlush = has(words, 'flush', 'countersunk') || /(?:426|1097)/.test(designation?.raw ?? '')
+  const said = isFlush ? 'flush' : has(words, 'pop', 'pull', 'blind') ? 'blind' : designation || has(words, 'universal', 'solid') ? 'universal' : null
+  // A rivet whose head nobody named is most often a solid one, but a flush or a blind one is a tap away.
+  return (said ? [said] : ['universal', 'flush', 'blind']).map((head) => ({ table: 'rivet', inputs: { diameter, head }, label: `a ${head === 'universal' ? 'solid' : head} rivet of ${diameter} in` }))
 }
 
 function bolts(query: string, words: ReadonlySet<string>): ShopReading[] {
@@ -62,6 +67,14 @@ function bolts(query: string, words: ReadonlySet<string>): ShopReading[] {
   const part = /\ban\d{1,2}h?-\d{1,3}a?\b/i.exec(query)?.[0]
   if (!bolt || (!part && !has(words, 'bolt', 'bolts', 'grip', 'length'))) return []
   return [{ table: 'bolt', inputs: { bolt, ...(part ? { part: part.toUpperCase() } : {}) }, label: part ? `the bolt ${part.toUpperCase()}` : `an ${bolt} bolt` }]
+}
+
+/** A hole for a numbered screw; "10-32" is its thread. Not a tapped hole: no table here gives tap drills. */
+function screws(query: string, words: ReadonlySet<string>): ShopReading[] {
+  if (!has(words, 'screw', 'screws') || !has(words, 'hole', 'holes', 'drill', 'clearance') || has(words, 'tap', 'tapped', 'torque')) return []
+  const size = Number(/(?<![\w./-])(?:#|no\.? ?)?(\d{1,2})(?:-\d{2})?(?![\w/.])/i.exec(query)?.[1])
+  const drill = SCREWS.some((known) => known === size) ? smallestDrillFor(size) : null
+  return drill ? [{ table: 'drills', inputs: { screw: `#${size}`, size: drill.name }, label: `a hole that passes a #${size} screw` }] : []
 }
 
 function drills(words: ReadonlySet<string>, found: readonly Measurement[]): ShopReading[] {

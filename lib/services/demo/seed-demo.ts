@@ -10,6 +10,7 @@ import type { Renderer } from '@/lib/render/renderer'
 import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
 import { seedBuilds } from './seed-builds'
 import { seedEntry, type SeedPeople } from './seed-entry'
+import { seedLimits } from './seed-limits'
 import { seedPlaces } from './seed-places'
 
 const dayMs = 24 * 3600 * 1000
@@ -31,6 +32,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   const at = (daysAgo: number) => Math.round(now - daysAgo * dayMs)
   const people = await seedPeople(database, at)
   await seedPlaces(database, at(joinedDaysAgo))
+  await seedLimits(database, people, at)
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
   await seedBuilds(database, people, at)
   await keepState(database, 'complete')

@@ -3,7 +3,7 @@ import 'server-only'
 import { and, eq } from 'drizzle-orm'
 import type { Database, Transaction } from '@/db/client'
 import { insertPost, insertRevision, saveRendering } from '@/db/mutations/posts'
-import { getCautionedPost, remarkRenderingKey, renderingKey } from '@/db/queries/cautioned-post'
+import { getCautionedPost, remarkRenderingKey } from '@/db/queries/cautioned-post'
 import { outcome, postCaution, reliance, remark, stamp } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { DemoAnswer, DemoEntry, DemoText } from '@/lib/content/demo-content'
@@ -16,6 +16,7 @@ import { judgePost } from '@/lib/services/posts/judge-post'
 import { placeEntry } from '@/lib/services/posts/place-entry'
 import { rejudgeAnswers } from '@/lib/services/posts/rejudge-answers'
 import { renderText, type Rendered } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 
 export type SeedPeople = Map<string, { id: number; mark: string | null }>
 type At = (daysAgo: number) => number
@@ -52,7 +53,7 @@ function entryEvents(entry: DemoEntry, people: SeedPeople, at: At, rendered: Map
         posts.set(entry.ref, postId)
         await insertRevision(tx, { postId, number: i + 1, authorId: author.id, ...judged, contentHash: contentHash(judged), createdAt: at(version.day) },
           { sectionIds: place.sections.map((s) => s.id), taskIds: place.taskIds, operationIds: place.operationIds, hardware })
-        await saveRendering(tx, { key: renderingKey(postId, i + 1), ...need(rendered, `${entry.ref}:${i}`) })
+        await saveText(tx, postId, i + 1, need(rendered, `${entry.ref}:${i}`))
         const required = cautionsOfEntry(entry.kind, judged, place.sections.flatMap((s) => s.jasc ?? []))
         await acknowledgeCautions(tx, postId, required, await allCodes(tx, postId, required), at(version.day))
         if (i > 0) await rejudgeAnswers(tx, postId, at(version.day))
@@ -73,7 +74,7 @@ function answerEvents(entry: DemoEntry, answer: DemoAnswer, people: SeedPeople, 
         const postId = posts.get(answer.ref) ?? (await insertPost(tx, { kind: 'answer', parentId, authorId: author.id, ref: answer.ref, createdAt: at(version.day) }))
         posts.set(answer.ref, postId)
         await insertRevision(tx, { postId, number: i + 1, authorId: author.id, ...judged, contentHash: contentHash(judged), createdAt: at(version.day) }, null)
-        await saveRendering(tx, { key: renderingKey(postId, i + 1), ...need(rendered, `${answer.ref}:${i}`) })
+        await saveText(tx, postId, i + 1, need(rendered, `${answer.ref}:${i}`))
         const question = await getCautionedPost(tx, parentId)
         if (!question) throw new Error('The question is missing')
         const required = cautionsOfAnswer(question, version.body)

@@ -10,6 +10,7 @@ import type { NumbersCheck } from '@/lib/domain/numbers-check/numbers-check'
 import { can } from '@/lib/policy/can'
 import type { AskFor } from '@/lib/schemas/acts'
 import type { Answer, Entry } from '@/lib/schemas/post'
+import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import { loadEntry } from '@/lib/services/posts/load-entry'
 
 export interface DeskSheet {
@@ -35,7 +36,7 @@ export async function loadSheet(context: AppContext & { actor: Member }, entryId
   const row = entry ? entry.answers.findIndex((a) => a.id === postId) : -1
   const post = entry?.id === postId ? entry : entry?.answers[row]
   if (!entry || !post || entry.state !== 'visible') return null
-  const [kit, requests] = await Promise.all([getKit(context.reader, entry.kit), listOpenRequests(context.reader, [postId])])
+  const [kit, requests, limits] = await Promise.all([getKit(context.reader, entry.kit), listOpenRequests(context.reader, [postId]), loadMakerLimits(context.reader, entry.kit)])
   const subject = {
     kind: post.kind, state: post.state, authorIds: post.revisions.flatMap((r) => r.author.id ?? []),
     makerReply: 'makerReply' in post ? (post.makerReply ?? null) : null,
@@ -44,7 +45,7 @@ export async function loadSheet(context: AppContext & { actor: Member }, entryId
   return {
     entry, post, row: row < 0 ? null : row + 1, maker: kit?.maker,
     systems: entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? []).map((s) => (s.jasc ? `${s.jasc} ${s.title}` : s.title)),
-    checks: checkNumbers(post.text, { tasks: entry.tasks, hardware: entry.hardware }),
+    checks: checkNumbers(post.text, { tasks: entry.tasks, hardware: entry.hardware, limits }),
     mayStamp: can(context.actor, 'post.stamp', subject) && !standsMine,
     mayAsk: can(context.actor, 'post.ask-for', subject),
     requests: requests.map((r) => r.what),

@@ -1,7 +1,7 @@
 // A member says what to do under a question.
 import 'server-only'
-import { insertPost, insertRevision, saveRendering } from '@/db/mutations/posts'
-import { getCautionedPost, renderingKey } from '@/db/queries/cautioned-post'
+import { insertPost, insertRevision } from '@/db/mutations/posts'
+import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { refuse } from '@/lib/errors'
@@ -12,6 +12,7 @@ import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 import { renderText } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 import { afterWrite } from '@/lib/services/posts/after-write'
 
 const nowhere = { title: '', kitId: null, sections: [], tasks: [], operations: [], hardware: [], plans: [], orderAdvice: [], parts: null }
@@ -32,7 +33,7 @@ export async function createAnswer(context: AppContext, questionId: number, inpu
     const judged = answerRevision(input.body, input.makerReply)
     const postId = await insertPost(tx, { kind: 'answer', parentId: questionId, authorId: actor.id, createdAt: now })
     await insertRevision(tx, { postId, number: 1, authorId: actor.id, ...judged, contentHash: contentHash(judged), createdAt: now }, null)
-    await saveRendering(tx, { key: renderingKey(postId, 1), ...rendered })
+    await saveText(tx, postId, 1, rendered)
     await acknowledgeCautions(tx, postId, cautionsOfAnswer(question, input.body), input.acknowledgedCautions, now)
     await judgePost(tx, postId)
     record('answer.publish', `post:${postId}`, `post:${questionId}`)

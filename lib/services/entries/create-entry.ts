@@ -1,7 +1,6 @@
 // A member asks a question or writes a lesson.
 import 'server-only'
-import { insertPost, insertRevision, saveRendering } from '@/db/mutations/posts'
-import { renderingKey } from '@/db/queries/cautioned-post'
+import { insertPost, insertRevision } from '@/db/mutations/posts'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { textFields } from '@/lib/domain/entries/entry-text'
@@ -14,6 +13,7 @@ import { contentHash } from '@/lib/services/posts/content-hash'
 import { judgePost } from '@/lib/services/posts/judge-post'
 import { placeEntry } from '@/lib/services/posts/place-entry'
 import { renderText } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 import { afterWrite } from '@/lib/services/posts/after-write'
 
 /** Publishes and returns the id. 401 for a visitor; 422 for unknown names, refused text or cautions not acknowledged. */
@@ -33,7 +33,7 @@ export async function createEntry(context: AppContext, input: NewEntry): Promise
     const postId = await insertPost(tx, { kind: input.kind, authorId: actor.id, createdAt: now })
     await insertRevision(tx, { postId, number: 1, authorId: actor.id, ...judged, contentHash: contentHash(judged), createdAt: now },
       { sectionIds: place.sections.map((s) => s.id), taskIds: place.taskIds, operationIds: place.operationIds, hardware: judged.hardware })
-    await saveRendering(tx, { key: renderingKey(postId, 1), ...rendered })
+    await saveText(tx, postId, 1, rendered)
     const required = cautionsOfEntry(input.kind, judged, place.sections.flatMap((s) => s.jasc ?? []))
     await acknowledgeCautions(tx, postId, required, input.acknowledgedCautions, now)
     await judgePost(tx, postId)

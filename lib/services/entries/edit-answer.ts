@@ -1,7 +1,7 @@
 // Its author edits what they said to do: a new revision, and the stamps on the old one lapse.
 import 'server-only'
-import { insertRevision, saveRendering } from '@/db/mutations/posts'
-import { getCautionedPost, renderingKey } from '@/db/queries/cautioned-post'
+import { insertRevision } from '@/db/mutations/posts'
+import { getCautionedPost } from '@/db/queries/cautioned-post'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
@@ -16,6 +16,7 @@ import { judgePost } from '@/lib/services/posts/judge-post'
 import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
 import { requirePost } from '@/lib/services/posts/require-post'
 import { renderText } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 import { answerRevision } from './create-answer'
 import { afterWrite } from '@/lib/services/posts/after-write'
 
@@ -40,7 +41,7 @@ export async function editAnswer(context: AppContext, id: number, input: AnswerE
     }
     const number = found.current.number + 1
     await insertRevision(tx, { postId: id, number, authorId: actor.id, ...judged, contentHash: hash, createdAt: now }, null)
-    await saveRendering(tx, { key: renderingKey(id, number), ...rendered })
+    await saveText(tx, id, number, rendered)
     await acknowledgeCautions(tx, id, cautionsOfAnswer(question, input.body), input.acknowledgedCautions, now)
     await judgePost(tx, id)
     await answerRequests(tx, id, actor.id, now)

@@ -1,7 +1,7 @@
 // Its author edits an entry: a new revision. An edit of a question lapses the stamps on its answers and re-runs their cautions.
 import 'server-only'
-import { insertRevision, saveRendering } from '@/db/mutations/posts'
-import { getCautionedPost, renderingKey, type CautionedPost } from '@/db/queries/cautioned-post'
+import { insertRevision } from '@/db/mutations/posts'
+import { getCautionedPost, type CautionedPost } from '@/db/queries/cautioned-post'
 import { listTasksBySlug } from '@/db/queries/kits'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
@@ -18,6 +18,7 @@ import { loadEntry, subjectOf } from '@/lib/services/posts/load-entry'
 import { placeEntry, type Placement } from '@/lib/services/posts/place-entry'
 import { rejudgeAnswers } from '@/lib/services/posts/rejudge-answers'
 import { renderText } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 import { answerRequests } from '@/lib/services/posts/answer-requests'
 import { cleanParts } from './create-entry'
 import { afterWrite } from '@/lib/services/posts/after-write'
@@ -53,7 +54,7 @@ export async function editEntry(context: AppContext, id: number, input: EntryEdi
     }
     const number = found.current.number + 1
     await insertRevision(tx, { postId: id, number, authorId: actor.id, ...revisionColumns(judged), contentHash: hash, createdAt: now }, projectionsOf(place, judged.hardware))
-    await saveRendering(tx, { key: renderingKey(id, number), ...rendered })
+    await saveText(tx, id, number, rendered)
     const required = cautionsOfEntry(found.kind, judged, place.sections.flatMap((s) => s.jasc ?? []))
     await acknowledgeCautions(tx, id, required, input.acknowledgedCautions, now)
     await judgePost(tx, id)

@@ -16,6 +16,7 @@ import type { Answer, Entry } from '@/lib/schemas/post'
 import type { Hit } from '@/lib/schemas/search'
 import { loadEntryWithPosts, subjectOf } from '@/lib/services/posts/load-entry'
 import { checkPostNumbers } from '@/lib/services/posts/check-post-numbers'
+import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import { findOtherCases } from '@/lib/services/search/find-similar'
 
 /** What this reader may do with one post, and what they have marked on it. */
@@ -51,13 +52,13 @@ export interface EntryPage {
 export async function getEntryPage(context: AppContext, id: number): Promise<EntryPage> {
   const { entry, posts } = await loadEntryWithPosts(context, id)
   const ids = [entry.id, ...entry.answers.map((a) => a.id)]
-  const [kit, tasks, otherCases] = await Promise.all([
-    getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), otherCasesOf(context, entry),
+  const [kit, tasks, limits, otherCases] = await Promise.all([
+    getKit(context.reader, entry.kit), listTasksBySlug(context.reader, [...entry.tasks, ...entry.orderAdvice.flatMap((o) => [o.before, o.after])]), loadMakerLimits(context.reader, entry.kit), otherCasesOf(context, entry),
   ])
   const requests = await listOpenRequests(context.reader, ids)
   const own = context.actor ? await listOwnMarks(context.reader, context.actor.id, ids) : { outcomes: [], reliances: [] }
   const [found] = posts
-  const rights = new Map(posts.map((p) => [p.id, { checks: checkPostNumbers(p, p.parentId === null ? null : (found ?? null)), ...rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what)) }]))
+  const rights = new Map(posts.map((p) => [p.id, { checks: checkPostNumbers(p, p.parentId === null ? null : (found ?? null), limits), ...rightsOn(context, subjectOf(p), [entry, ...entry.answers].find((x) => x.id === p.id), p.stateReason, own, requests.filter((r) => r.postId === p.id).map((r) => r.what)) }]))
   const sections = entry.sections.flatMap((code) => kit?.sections.find((s) => s.code === code) ?? [])
   return {
     entry, kit: { slug: entry.kit, name: kit?.name ?? '', maker: kit?.maker ?? '' }, sections, tasks: entry.tasks.map((slug) => ({ slug, title: tasks.find((t) => t.slug === slug)?.title ?? slug })),

@@ -14,7 +14,7 @@ export interface TimeToAnswer {
   curve: SurvivalCurve
   asked: number
   open: number
-  /** The longest that any question was watched, in days: where the curve ends. */
+  /** The longest that a question without an answer has waited, in days. */
   longestDays: number
 }
 
@@ -25,6 +25,6 @@ export async function getTimeToAnswer({ actor, reader, now }: AppContext): Promi
   const observations = questions.map(({ askedAt, answeredAt }) => ({ time: Math.max(0, (answeredAt ?? now) - askedAt) / dayMs, happened: answeredAt !== null }))
   return {
     curve: kaplanMeier(observations), asked: questions.length, open: questions.filter((q) => q.answeredAt === null).length,
-    longestDays: observations.reduce((longest, { time }) => Math.max(longest, time), 0),
+    longestDays: observations.reduce((longest, { time, happened }) => (happened ? longest : Math.max(longest, time)), 0),
   }
 }

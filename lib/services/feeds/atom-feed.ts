@@ -25,13 +25,16 @@ function feedEntry(entry: Entry, baseUrl: string): string {
   const worst = cautions[0]
   const address = escapeXml(`${baseUrl}${entry.url}`)
   const lines = cautions.map((c) => `<p><strong>${c.signalWord}</strong> ${escapeXml(c.title)}. ${escapeXml(c.text)}</p>`).join('')
-  const html = `${lines}${entry.html}<p>The plans win: the kit maker’s current plans and bulletins, your authority’s rules and a licensed mechanic come first.</p>`
+  const html = `${lines}${entry.html.replace(hiddenForm, '')}<p>The plans win: the kit maker’s current plans and bulletins, your authority’s rules and a licensed mechanic come first.</p>`
   return [
     '<entry>', `<title>${escapeXml(worst ? `${worst.signalWord} ${worst.title}: ${entry.title}` : entry.title)}</title>`, `<id>${address}</id>`, `<link href="${address}"/>`,
     `<published>${entry.createdAt}</published>`, `<updated>${entry.updatedAt}</updated>`, `<author><name>${escapeXml(entry.author.name)}</name></author>`,
     `<content type="html">${escapeXml(html)}</content>`, '</entry>',
   ].join('\n')
 }
+
+/** The form of a measurement that our style sheet may show instead: readers that drop attributes would show both. */
+const hiddenForm = /<span class="measure-lead" hidden>[^<]*<\/span>/g
 
 /** Text for XML 1.0, which knows five entities and forbids most control characters. */
 function escapeXml(text: string): string {

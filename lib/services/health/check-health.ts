@@ -13,6 +13,5 @@ export async function checkHealth(context: AppContext): Promise<Health> {
     logError('health', error)
     return 'failing' as const
   })
-  const { state, documents, sequence } = context.search.health()
-  return { status: db, version: manifest.version, schema: expectedSchema().tag, db, search: { state, documents, sequence }, mail: 'none', storage: 'none' }
+  return { status: db, version: manifest.version, schema: expectedSchema().tag, db, search: context.search.health(), mail: 'none', storage: 'none' }
 }

@@ -2,13 +2,13 @@
 import 'server-only'
 import { and, eq, isNull } from 'drizzle-orm'
 import type { Transaction } from '@/db/client'
-import { insertPost, insertRevision, saveRendering, type Projections } from '@/db/mutations/posts'
-import { renderingKey } from '@/db/queries/cautioned-post'
+import { insertPost, insertRevision, type Projections } from '@/db/mutations/posts'
 import { stamp, type revision } from '@/db/schema'
 import { judgeStamps } from '@/lib/domain/stamps/stamp-state'
 import type { RequiredCaution } from '@/lib/domain/cautions/rule-table'
 import { attachCautions } from '@/lib/services/posts/attach-cautions'
 import type { Rendered } from '@/lib/services/posts/render-text'
+import { saveText } from '@/lib/services/posts/save-text'
 
 export const unknownAuthor = 'author unknown'
 
@@ -58,7 +58,7 @@ export async function updateImported(tx: Transaction, known: Known, text: Import
 
 async function addRevision(tx: Transaction, postId: number, number: number, text: ImportedText, createdAt: number): Promise<void> {
   await insertRevision(tx, { postId, number, authorName: text.author ?? unknownAuthor, ...text.judged, contentHash: text.hash, createdAt }, text.projections)
-  if (text.rendered) await saveRendering(tx, { key: renderingKey(postId, number), ...text.rendered })
+  if (text.rendered) await saveText(tx, postId, number, text.rendered)
 }
 
 /** An imported stamp says that another group stamped this text: below stamped, never one of two. False when it stands already. */

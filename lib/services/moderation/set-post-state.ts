@@ -1,4 +1,4 @@
-// A moderator hides a post or restores it, with a reason. Nothing is ever deleted.
+// A moderator hides a post or restores it (a merged one too), with a reason. Nothing is ever deleted.
 import 'server-only'
 import { eq } from 'drizzle-orm'
 import { getCautionedPost } from '@/db/queries/cautioned-post'
@@ -12,7 +12,7 @@ import { judgePost } from '@/lib/services/posts/judge-post'
 import { subjectOf } from '@/lib/services/posts/load-entry'
 import { afterWrite } from '@/lib/services/posts/after-write'
 
-/** Returns the entry it belongs to. 409 for a post that is merged or withdrawn, or in that state already. */
+/** Returns the entry it belongs to. 409 for a post that is withdrawn, for hiding a merged one, and for one in that state already. */
 export async function setPostState(context: AppContext, postId: number, input: { state: 'visible' | 'hidden'; reason: string }): Promise<{ entryId: number }> {
   const { actor, now } = context
   if (!actor) throw refuse.signIn()
@@ -20,9 +20,9 @@ export async function setPostState(context: AppContext, postId: number, input: {
     const found = await getCautionedPost(tx, postId)
     if (!found || !can(actor, 'post.read', subjectOf(found))) throw refuse.notFound('This post')
     if (!can(actor, 'post.hide', subjectOf(found))) throw refuse.forbidden(whyNot['post.hide'])
-    const isOpen = found.state === 'visible' || found.state === 'hidden'
+    const isOpen = found.state === 'visible' || found.state === 'hidden' || (found.state === 'merged' && input.state === 'visible')
     if (!isOpen || found.state === input.state) throw new AppError('conflict', `This post is ${found.state} already.`)
-    await tx.update(post).set({ state: input.state, stateReason: input.reason, stateBy: actor.id, stateAt: now }).where(eq(post.id, postId))
+    await tx.update(post).set({ state: input.state, stateReason: input.reason, mergedIntoId: null, stateBy: actor.id, stateAt: now }).where(eq(post.id, postId))
     await judgePost(tx, postId)
     record(input.state === 'hidden' ? 'post.hide' : 'post.restore', `post:${postId}`)
     return { entryId: found.parentId ?? postId }

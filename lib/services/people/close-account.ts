@@ -15,7 +15,7 @@ export async function closeAccount(context: AppContext, input: { currentPassword
   const { id, email } = await confirmPassword(context, input.currentPassword)
   const { now } = context
   await keepingLastSteward(() => write(context.database, { actorId: id, at: now }, async (tx, record) => {
-    await tx.update(member).set({ name: formerMember, email: null, passwordHash: null, bio: '', role: 'member', state: 'closed' }).where(eq(member.id, id))
+    await tx.update(member).set({ name: formerMember, email: null, passwordHash: null, bio: '', units: null, role: 'member', state: 'closed' }).where(eq(member.id, id))
     await tx.update(token).set({ revokedAt: now }).where(and(eq(token.memberId, id), isNull(token.revokedAt)))
     await tx.update(mentorship).set({ endedAt: now, endedBy: id, endReason: 'The account was closed.' }).where(and(eq(mentorship.memberId, id), isNull(mentorship.endedAt)))
     // What was said of the person goes with them; number and dates stay, since stamps point at them.

@@ -3,6 +3,7 @@ import 'server-only'
 import { getMember, listTokens } from '@/db/queries/people'
 import type { AppContext } from '@/lib/context'
 import { refuse } from '@/lib/errors'
+import type { UnitsChoice } from '@/lib/format/units-choice'
 
 export interface Account {
   id: number
@@ -10,6 +11,7 @@ export interface Account {
   email: string
   bio: string
   mark: string | null
+  units: UnitsChoice
   tokens: { id: number; name: string; createdAt: number }[]
 }
 
@@ -18,6 +20,6 @@ export async function getAccount(context: AppContext): Promise<Account> {
   if (!context.actor) throw refuse.signIn()
   const [found, tokens] = await Promise.all([getMember(context.reader, context.actor.id), listTokens(context.reader, context.actor.id)])
   if (!found) throw refuse.signIn()
-  const { id, name, email, bio } = found.member
-  return { id, name, email: email ?? '', bio, mark: found.mark, tokens: tokens.filter((t) => t.revokedAt === null).map((t) => ({ id: t.id, name: t.name, createdAt: t.createdAt })) }
+  const { id, name, email, bio, units } = found.member
+  return { id, name, email: email ?? '', bio, mark: found.mark, units: units ?? 'written', tokens: tokens.filter((t) => t.revokedAt === null).map((t) => ({ id: t.id, name: t.name, createdAt: t.createdAt })) }
 }

@@ -7,12 +7,15 @@ import { writeQuietly } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { textFields } from '@/lib/domain/entries/entry-text'
 import { orderPosts } from '@/lib/domain/evidence/order-posts'
+import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
+import { parserVersion } from '@/lib/domain/measurements/measurement'
 import { refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { rendererVersion } from '@/lib/render/markdown-to-html'
 import type { Entry } from '@/lib/schemas/post'
 import { presentAnswer, presentEntry, type RemarkRenderings } from './present-post'
 import { renderText } from './render-text'
+import { saveText } from './save-text'
 
 /** The entry as the actor may see it, answers in their order; throws not-found when it is not there or not to be seen. */
 export const loadEntry = async (context: AppContext, id: number): Promise<Entry> => (await loadEntryWithPosts(context, id)).entry
@@ -36,13 +39,14 @@ export async function loadEntryWithPosts(context: AppContext, id: number): Promi
 export const subjectOf = (found: CautionedPost) => ({ kind: found.kind, state: found.state, authorIds: found.authorIds, makerReply: found.current.makerReplyScope })
 
 /** Posts whose HTML is there: a missing or outdated rendering is made now and kept. */
-export async function withRenderings(context: AppContext, posts: readonly CautionedPost[]): Promise<CautionedPost[]> {
+export async function withRenderings(context: Pick<AppContext, 'renderer' | 'database'>, posts: readonly CautionedPost[]): Promise<CautionedPost[]> {
   return Promise.all(posts.map(async (found) => {
     if (found.rendering && found.rendering.renderer === rendererVersion) return found
     const fields = textFields(found.kind, found.current.parts, found.current.body)
-    const made = { key: renderingKey(found.id, found.current.number), ...(await renderText(context.renderer, fields)) }
-    await writeQuietly(context.database, (tx) => saveRendering(tx, made))
-    return { ...found, plain: made.plain, rendering: made }
+    const made = await renderText(context.renderer, fields)
+    const { number } = found.current
+    await writeQuietly(context.database, (tx) => saveText(tx, found.id, number, made))
+    return { ...found, plain: made.plain, rendering: { key: renderingKey(found.id, number), ...made }, measuredBy: parserVersion, measurements: findMeasurements(made.plain) }
   }))
 }
 

@@ -6,8 +6,11 @@ import { unionCautions } from '@/lib/domain/cautions/group-cautions'
 import { requiredCautions } from '@/lib/domain/cautions/required-cautions'
 import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
+import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
+import { parserVersion } from '@/lib/domain/measurements/measurement'
 import { isLive } from '@/lib/domain/stamps/stamp-state'
 import { paths } from '@/lib/paths'
+import type { Measurement } from '@/lib/schemas/measurement'
 import type { Answer, Caution, Entry, Outcomes, Post, Remark, Stamp } from '@/lib/schemas/post'
 import { judge } from './judge-post'
 
@@ -73,13 +76,17 @@ function presentRemarks(found: CautionedPost, rendered: ReadonlyMap<number, { ht
 
 export type RemarkRenderings = ReadonlyMap<number, { html: string; plain: string }>
 
+/** The stored ones; found anew where an older parser stored them. Places are those of the plain text. */
+const measurementsOf = (found: CautionedPost): Measurement[] =>
+  (found.measuredBy >= parserVersion ? found.measurements : findMeasurements(found.plain ?? ''))
+
 /** The fields that questions, lessons and answers share. */
 export function presentPost(found: CautionedPost, questionRevision: number, remarks: RemarkRenderings): Post {
   const { state, missing } = judge(found, questionRevision)
   return {
     id: found.id, kind: found.kind, ...(found.parentId !== null ? { parentId: found.parentId } : {}), ...(found.ref !== null ? { ref: found.ref } : {}),
     revision: revisionLetter(found.current.number), author: person(found.author), createdAt: iso(found.createdAt), updatedAt: iso(found.updatedAt),
-    html: wholeHtml(found), text: found.plain ?? '', measurements: [],
+    html: wholeHtml(found), text: found.plain ?? '', measurements: measurementsOf(found),
     cautions: presentCautions(found), stamp: state, missing, stamps: presentStamps(found, questionRevision), needsTwo: found.needsTwo,
     outcomes: presentOutcomes(found), goingByThis: found.goingByThis, remarks: presentRemarks(found, remarks),
     revisions: found.revisions.map((r) => ({ revision: revisionLetter(r.number), author: person(r.author), createdAt: iso(r.createdAt) })),

@@ -1,5 +1,6 @@
 // One answer of a shop table as pages and API show it: results with their labels, what was understood, cautions, permanent link.
 import 'server-only'
+import { tableFigures } from '@/lib/domain/shop/figures/table-figures'
 import { linkInputs, readAs } from '@/lib/domain/shop/input-words'
 import { withMakerLimits, type MakerLimit } from '@/lib/domain/shop/maker-limits'
 import type { InputError, RawInputs } from '@/lib/domain/shop/shop-input'
@@ -14,17 +15,23 @@ interface Beside {
   alternatives?: ShopAnswer['alternatives']
   /** The kit maker's own limits, which come before the handbook's. */
   limits?: readonly MakerLimit[]
+  /** Slug of the kit they are of: the permanent link keeps it. */
+  kit?: string | undefined
 }
 export type TableAnswer = { ok: true; answer: ShopAnswer } | { ok: false; errors: InputError[] }
+
+/** Any width gives the same balloons; only their places differ. */
+const FIGURE_WIDTH = 640
 
 /** Never throws: inputs out of limits come back as errors that name the field. */
 export function answerTable(table: ShopTable, raw: RawInputs, beside: Beside = {}): TableAnswer {
   const outcome = table.compute(raw)
   if (!outcome.ok) return outcome
-  const results = withMakerLimits(table.slug, outcome.results, beside.limits ?? [])
+  const results = withMakerLimits(table, outcome.inputs, outcome.results, beside.limits ?? [])
+  const balloons = tableFigures(table.slug, outcome.inputs, results, FIGURE_WIDTH).flatMap((figure) => figure.balloons.map(({ n, label, note }) => ({ n, label, note })))
   const answer: ShopAnswer = {
     table: table.slug, inputs: { ...outcome.inputs }, readAs: beside.readAs ?? readAs(table, outcome.inputs), alternatives: beside.alternatives ?? [],
-    results: results.map((result) => labelled(table, result)), cautions: shopCautions(table), url: paths.shopTable(table.slug, linkInputs(table, raw)),
+    results: results.map((result) => labelled(table, result)), cautions: shopCautions(table), url: paths.shopTable(table.slug, { ...linkInputs(table, raw), ...(beside.kit ? { kit: beside.kit } : {}) }), balloons,
   }
   return { ok: true, answer }
 }

@@ -11,6 +11,7 @@ import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
 import type { NewStamp } from '@/lib/schemas/acts'
 import { advisedConflicts } from '@/lib/domain/numbers-check/advised-conflicts'
+import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import { checkPostNumbers } from '@/lib/services/posts/check-post-numbers'
 import { judge, judgePost } from '@/lib/services/posts/judge-post'
 import { requirePost } from '@/lib/services/posts/require-post'
@@ -32,7 +33,7 @@ export async function pressStamp(context: AppContext, postId: number, input: New
       const current = { id: postId, revision: revisionLetter(found.current.number) }
       throw new AppError('conflict', `This is Rev ${current.revision} now. Read it again before you stamp it.`, { current })
     }
-    const [conflict] = advisedConflicts(checkPostNumbers(found, question))
+    const [conflict] = advisedConflicts(checkPostNumbers(found, question, await loadMakerLimits(tx, (question ?? found).kit?.slug)))
     if (conflict && input.conflictReason === undefined) {
       throw refuse.invalid('conflictReason', `“${conflict.claim}” differs from the shop table${conflict.expected ? ` (${conflict.expected})` : ''}. Write why it is right all the same, or ask its author.`)
     }

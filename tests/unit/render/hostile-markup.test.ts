@@ -4,8 +4,8 @@ import { describe, expect, it } from 'vitest'
 import { markdownToHtml } from '@/lib/render/markdown-to-html'
 import { countStrayTags, readTags } from '@/tests/support/read-tags'
 
-const allowedTags = ['a', 'blockquote', 'br', 'code', 'del', 'div', 'em', 'h4', 'h5', 'h6', 'hr', 'input', 'li', 'ol', 'p', 'pre', 'strong', 'table', 'tbody', 'td', 'th', 'thead', 'tr', 'ul']
-const allowedAttributes = ['align', 'aria-label', 'checked', 'class', 'dir', 'disabled', 'href', 'rel', 'role', 'start', 'tabindex', 'title', 'type']
+const allowedTags = ['a', 'blockquote', 'br', 'code', 'del', 'div', 'em', 'h4', 'h5', 'h6', 'hr', 'input', 'li', 'ol', 'p', 'pre', 'span', 'strong', 'table', 'tbody', 'td', 'th', 'thead', 'tr', 'ul']
+const allowedAttributes = ['align', 'aria-label', 'checked', 'class', 'dir', 'disabled', 'hidden', 'href', 'rel', 'role', 'start', 'tabindex', 'title', 'type']
 
 /** What nobody may find in rendered text, whatever was typed. */
 function expectHarmless(html: string): void {
@@ -17,6 +17,8 @@ function expectHarmless(html: string): void {
       expect(allowedAttributes).toContain(name)
       if (name === 'href') expect(value).toMatch(/^(?:https?:|mailto:|[^:]*$|[^:]*[/?#])/i)
     }
+    // Measurements are dressed in these and no others, whatever stands in the number.
+    if (tag.name === 'span') expect(tag.attributes['class']).toMatch(/^measure(?:-lead|-more|-also)?(?: measure-(?:inch|metric|arrows|whole))*$/)
     if (tag.name === 'a') expect(tag.attributes['rel']).toBe('nofollow noopener ugc')
   }
 }
@@ -58,6 +60,8 @@ const attacks: [string, string][] = [
   ['a picture whose words break out', '![x" onerror="alert(1)](https://a.example/p.png)'],
   ['a bare address that breaks out', 'https://a.example/"onmouseover="alert(1)'],
   ['a code language that breaks out', '```"><script>alert(1)</script>\ncode\n```'],
+  ['a tag inside a size', '3/16<img src=x onerror=alert(1)> in, #<b>30</b> and 4.8<script>alert(1)</script> mm'],
+  ['the dressing of a size, typed', '<span class="measure-lead" hidden>1 mm · </span>3/16'],
   ['an id that shadows a global', '<a id="location" name="cookie">x</a>'],
   ['a footnote with the name of a global', 'x[^__proto__]\n\n[^__proto__]: y'],
 ]
@@ -86,6 +90,7 @@ describe('nothing runs from a text', () => {
     const pieces = fc.constantFrom(
       '<', '>', '"', "'", '`', '=', '/', '\\', ' ', '\n', '\n\n', '&', ';', '#', ':', '(', ')', '[', ']', '!', '|', '-', '*', '_', '~', '<script', '</script>', '<img src=x',
       ' onerror=alert(1)', 'javascript:', 'data:', 'java&#x73;cript:', '&lt;', '<svg', '<!--', '-->', '<a href=', '](', '[x]: ', ' "<script>")', 'https://a.example/', 'a@b.example', '| - |', '```', '    ', '> ', '- [x] ',
+      '3/16', '#30', ' in', '4.8 mm', '20-25 in-lb', '"3/8"', 'number thirty', '°C', '<span class="measure">', 'measure-lead',
     )
     fc.assert(fc.property(fc.array(fc.oneof({ weight: 5, arbitrary: pieces }, fc.string({ maxLength: 4 })), { maxLength: 40 }), (parts) => {
       expectHarmless(markdownToHtml(parts.join('')).html)
@@ -113,7 +118,7 @@ describe('what a page needs of a text', () => {
   })
 
   it('marks right-to-left text so that each paragraph finds its direction', () => {
-    expect(markdownToHtml('שלום 3/16\n\nplain').html).toBe('<p dir="auto">שלום 3/16</p>\n<p>plain</p>')
+    expect(markdownToHtml('שלום 3/16\n\nplain').html).toMatch(/^<p dir="auto">שלום .*3\/16.*<\/p>\n<p>plain<\/p>$/)
   })
 
   it('keeps emoji with their joiners whole', () => {

@@ -53,7 +53,7 @@ export function OpenSheet({ sheet, next, closed, isHanging }: OpenSheetProps) {
             <Advice post={post} />
           </div>
         )}
-        {sheet.checks.length > 0 ? <div className="border-t border-line px-5 py-4"><NumbersCheckList posts={[{ label: '', checks: sheet.checks }]} /></div> : null}
+        {sheet.checks.length > 0 ? <div className="border-t border-line px-5 py-4"><NumbersCheckList posts={[{ label: '', checks: sheet.checks }]} kit={sheet.entry.kit} /></div> : null}
         <div className="grid border-t border-ink lg:grid-cols-[13rem_auto_minmax(0,1fr)]">
           <Facts sheet={sheet} />
           <Pressed post={post} />

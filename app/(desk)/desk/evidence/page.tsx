@@ -26,11 +26,11 @@ function Curve({ told: { curve, asked, open, longestDays } }: { told: TimeToAnsw
   const sentence = curve.median === null
     ? `More than half of ${asked === 1 ? 'the one question' : `the ${asked} questions`} still wait, so there is no median yet.`
     : `Half of the ${asked} questions had an answer within ${spanWords(curve.median)}.`
-  const waiting = open === 0 ? 'None is open now.' : open === 1 ? 'One is open now.' : `${open} are open now.`
+  const waiting = open === 0 ? 'None is open now.' : `${open === 1 ? 'One is' : `${open} are`} open now, the oldest for ${spanWords(longestDays)}.`
   return (
     <section className="sheet chart-sheet" aria-label="Time to an answer">
       <p className="text-heading"><strong>{sentence}</strong> {waiting}</p>
-      <SurvivalCurveChart curve={curve} longestDays={longestDays} label={`Share of questions still without an answer, by days since asked. ${sentence} ${waiting}`} />
+      <SurvivalCurveChart curve={curve} endDays={endOf(curve, longestDays)} label={`Share of questions still without an answer, by days since asked. ${sentence} ${waiting}`} />
       <Disclosure summary="The same as rows">
         <div className="table-scroll" tabIndex={0} role="region" aria-label="The curve as rows">
           <table className="figures-table">
@@ -46,4 +46,10 @@ function Curve({ told: { curve, asked, open, longestDays } }: { told: TimeToAnsw
       <p className="text-small text-ink-soft">Product-limit estimate (Kaplan and Meier, 1958); ± is 1.96 standard errors by Greenwood’s formula. Hidden questions and answers are left out.</p>
     </section>
   )
+}
+
+/** Answers come early or not at all: one question that waits for a year must not press all the others into a line. */
+function endOf({ steps }: TimeToAnswer['curve'], longestDays: number): number {
+  const last = steps[steps.length - 1]?.time ?? 0
+  return last === 0 ? longestDays : Math.min(Math.max(last, longestDays), last * 2)
 }

@@ -13,6 +13,7 @@ import { groupCautions } from '@/lib/domain/cautions/group-cautions'
 import { env } from '@/lib/env'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { paths } from '@/lib/paths'
+import { getMergedInto } from '@/lib/services/entries/get-merged-into'
 import { getEntryPage, type EntryPage } from '@/lib/services/entries/get-entry-page'
 import { DiscrepancySheet } from './_components/discrepancy-sheet'
 import { LessonSheet } from './_components/lesson-sheet'
@@ -27,7 +28,7 @@ export async function generateMetadata({ params }: PageProps<'/entries/[id]'>): 
 /** Once a request: the title needs the entry as much as the page does. */
 const load = cache(async (id: string): Promise<EntryPage & { now: number }> => {
   const context = await pageContext()
-  return { ...(await orNotFound(id, (entryId) => getEntryPage(context, entryId))), now: context.now }
+  return { ...(await orNotFound(id, (entryId) => getEntryPage(context, entryId), (entryId) => getMergedInto(context, entryId))), now: context.now }
 })
 
 export default async function EntryPageView({ params }: PageProps<'/entries/[id]'>) {

@@ -15,11 +15,15 @@ import { ErrorSummary } from '@/components/ui/error-summary'
 import { LinkButton } from '@/components/ui/link-button'
 import { PrintButton } from '@/components/ui/print-button'
 import { pageContext } from '@/lib/auth/guards'
+import { readerUnits } from '@/lib/auth/reader-units'
 import { loadPage } from '@/lib/content/load-page'
 import { SHOP_TABLES, shopTable } from '@/lib/domain/shop/shop-tables'
 import { env } from '@/lib/env'
+import { firstSystem } from '@/lib/format/units-choice'
 import { paths } from '@/lib/paths'
 import { answerTable } from '@/lib/services/shop/answer-table'
+import { listLimitKits } from '@/lib/services/kits/list-limit-kits'
+import { loadMakerLimits } from '@/lib/services/kits/load-maker-limits'
 import { shopCautions } from '@/lib/services/shop/shop-cautions'
 import { readShopAddress } from './read-shop-address'
 
@@ -31,19 +35,23 @@ export default async function ShopTablePage({ params, searchParams }: PageProps<
   const context = await pageContext()
   const table = shopTable((await params).table)
   if (!table) notFound()
-  const { raw, values, first, units } = readShopAddress(table, await searchParams)
-  const answered = answerTable(table, raw)
+  const { raw, values, first, units, kit: asked } = readShopAddress(table, await searchParams, firstSystem(await readerUnits()))
+  const kits = await listLimitKits(context, asked)
+  const kit = kits.find(({ slug }) => slug === asked)
+  const answered = answerTable(table, raw, { kit: kit?.slug, limits: await loadMakerLimits(context.reader, kit?.slug, table.slug) })
   const [answer, errors] = answered.ok ? [answered.answer, []] : [null, answered.errors]
+  const unknownKit = asked && !kit ? [{ message: 'There is no kit of this name. These are the handbook’s values.' }] : []
   const note = await loadPage(table.slug, {}, 'shop-notes')
-  const address = answer?.url ?? paths.shopTable(table.slug)
-  const inUnits = (system: 'inch' | 'metric') => paths.shopTable(table.slug, { ...values, units: system })
+  const kept: Record<string, string> = kit ? { kit: kit.slug } : {}
+  const address = answer?.url ?? paths.shopTable(table.slug, kept)
+  const inUnits = (system: 'inch' | 'metric') => paths.shopTable(table.slug, { ...values, ...kept, units: system })
   return (
     <div className="shop-room">
-      <ShopContents tables={SHOP_TABLES} current={table.slug} />
+      <ShopContents tables={SHOP_TABLES} current={table.slug} kit={kit?.slug} />
       <div className="shop-main">
         <PageTitle title={table.title} lead={note?.summary} aside={<UnitsSwitch first={first} hrefs={{ inch: inUnits('inch'), metric: inUnits('metric') }} />} />
-        <ErrorSummary errors={errors.map(({ path, message }) => (table.inputs.some(({ name }) => name === path) ? { id: shopFieldId(path), message } : { message }))} />
-        <ShopAnswerSheet table={table} answer={answer} values={values} errors={errors} first={first} units={units} />
+        <ErrorSummary errors={[...errors.map(({ path, message }) => (table.inputs.some(({ name }) => name === path) ? { id: shopFieldId(path), message } : { message })), ...unknownKit]} />
+        <ShopAnswerSheet table={table} answer={answer} values={values} errors={errors} first={first} units={units} kits={kits} kit={kit?.slug} />
         <CautionPlate cautions={shopCautions(table)} />
         {answer ? (
           <Sheet as="section" labelledBy="results">

@@ -11,17 +11,20 @@ export interface ShopAddress {
   first: FirstSystem
   /** The address's own word on units, or undefined. */
   units: FirstSystem | undefined
+  /** Slug of the kit whose maker's limits are asked for. */
+  kit: string | undefined
 }
 
-/** `units` is no input of any table. */
-export function readShopAddress(table: Pick<ShopTable, 'title' | 'inputs'>, query: Readonly<Record<string, string | string[] | undefined>>): ShopAddress {
+/** `units` and `kit` are no inputs of any table; `preferred` stands first when the address says nothing. */
+export function readShopAddress(table: Pick<ShopTable, 'title' | 'inputs'>, query: Readonly<Record<string, string | string[] | undefined>>, preferred: FirstSystem): ShopAddress {
   const given = Object.entries(query).flatMap(([name, value]): [string, string][] => {
     const one = Array.isArray(value) ? value[0] : value
     return one === undefined ? [] : [[name, one]]
   })
   const asked = given.find(([name]) => name === 'units')?.[1]
   const units = asked === 'metric' || asked === 'inch' ? asked : undefined
-  const raw = Object.fromEntries(given.filter(([name]) => name !== 'units'))
+  const kit = given.find(([name]) => name === 'kit')?.[1] || undefined
+  const raw = Object.fromEntries(given.filter(([name]) => name !== 'units' && name !== 'kit'))
   const values = { ...Object.fromEntries(table.inputs.map(({ name }) => [name, ''])), ...linkInputs(table, raw) }
-  return { raw, values, first: units ?? 'inch', units }
+  return { raw, values, first: units ?? preferred, units, kit }
 }

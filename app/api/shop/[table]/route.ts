@@ -5,7 +5,7 @@ import { getShopAnswer } from '@/lib/services/shop/get-shop-answer'
 
 export const { GET, POST, PUT, PATCH, DELETE } = routes({
   GET: endpoint({
-    summary: 'A shop table computed; its inputs, named by GET /api/shop, are the query', query: shopQuerySchema, response: shopAnswerSchema,
-    handle: async ({ params, query }) => ({ body: getShopAnswer(params['table'] ?? '', query) }),
+    summary: 'A shop table computed; its inputs, named by GET /api/shop, are the query, with `kit` for its maker’s own limits', query: shopQuerySchema, response: shopAnswerSchema,
+    handle: async ({ context, params, query: { kit, ...raw } }) => ({ body: await getShopAnswer(context, params['table'] ?? '', raw, kit) }),
   }),
 })

@@ -113,7 +113,7 @@ export const dashUnits: Kind = ({ statement }) => {
   const { text } = statement
   if (statement.marks.some(({ standing }) => standing === 'subject') || hasAny(statement, 'sheet', 'tolerance', 'gap')) return []
   const unit = /\b(?:in|counts?|of|means?|is|are)\s+(?:the )?(thirty-?seconds?|32nds|sixteenths?|16ths|eighths?|8ths)\b/.exec(text)
-  const about = /\b(?:dash|number|digit|code|designation|diameters? (?:is|are|of)|lengths? (?:is|are|of))\b/.test(text)
+  const about = /\b(?:dash|number|digit|code|designation|(?:diameters?|lengths?) (?:is|are|of|in))\b/.test(text)
   const isRivet = hasAny(statement, 'rivet', 'rivets') || statement.marks.some(({ what }) => what === 'rivet' || what === 'head')
   const isBolt = hasAny(statement, 'bolt', 'bolts') || statement.marks.some(({ what }) => what === 'bolt')
   if (!unit || !about || isRivet === isBolt || hasAny(statement, 'nas')) return []

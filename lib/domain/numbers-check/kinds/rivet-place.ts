@@ -70,7 +70,7 @@ function withRivets(scene: Scene, values: readonly Mark[], judged: (value: Mark,
   return [...multiples.map((value) => judged(value)), ...paired(scene.statement, lengths, rivetsOf(scene)).map(({ value, subject }) => judged(value, subject))]
 }
 
-function place({ limits }: Scene, value: Mark, subject: Subject | undefined, allowed: readonly Allowed[], result: string, doubtful: boolean): Finding {
+function place(scene: Scene, value: Mark, subject: Subject | undefined, allowed: readonly Allowed[], result: string, doubtful: boolean): Finding {
   const slack = subject ? Math.max(0.002, Math.min(value.step / 2, 0.005)) : 0.01
-  return judge({ marks: subject ? spanOf(subject, value) : [value], low: value.low, high: value.high, slack, table: 'rivet', result, ...(subject ? { size: subject.inches } : {}) }, allowed, subject ? limits : [], doubtful)
+  return judge({ marks: subject ? spanOf(subject, value) : [value], low: value.low, high: value.high, slack, table: 'rivet', result, ...(subject ? { size: subject.inches } : {}), ...(isFlush(scene.statement) || subject?.flush ? { said: { head: 'flush' } } : {}) }, allowed, scene.limits, doubtful)
 }

@@ -36,7 +36,7 @@ function judgedBend(alloy: Mark, sheet: Mark | undefined, radius: Mark, limits: 
   const least = rows.map(({ minTimes }) => minTimes * thickness)
   const allowed: Allowed[] = rows.length === 0 ? [] : [{ low: Math.max(...least), high: Infinity, expected: `at least ${rows.map(({ minTimes, maxTimes, thickness: row }) => `${minTimes} to ${maxTimes} t (row ${decimalInches(row)})`).join(', ')}`, citation: cite(bends.radii.cite, 'worked') }]
   const scale = radius.what === 'thicknesses' ? thickness : 1
-  return judge({ marks, low: radius.low * scale, high: radius.high * scale, slack: Math.max(0.002, thickness * 0.03), table: 'bend', result: 'radius-least', size: thickness }, allowed, limits, radius.low * scale >= Math.min(...least))
+  return judge({ marks, low: radius.low * scale, high: radius.high * scale, slack: Math.max(0.002, thickness * 0.03), table: 'bend', result: 'radius-least', size: thickness, said: { alloy: alloy.name } }, allowed, limits, radius.low * scale >= Math.min(...least))
 }
 
 const cutting = /\b(?:machine[ -]|press[ -]|drill[ -])?(?:counter ?-?sink|countersinks|countersunk|countersinking|csk|csunk)\b/

@@ -70,7 +70,7 @@ function boltTorqueOf({ statement, limits }: Scene, value: Mark, subject: Subjec
   const slack = Math.max(value.low * 0.005, value.unit === 'in-lb' ? 0.1 : Math.min(value.step / 2, value.low * 0.04))
   // Up to the table's maximum a bolt may be turned to line up its cotter hole.
   const doubtful = (wet && value.high <= top) || (bound === 'most' && value.high < top) || (hasAny(statement, 'cotter', 'castle', 'castellated') && value.high <= top)
-  return judge({ marks, low: value.low, high: value.high, slack, table: 'torque', result: 'torque', size: subject.inches }, allowed, limits, doubtful)
+  return judge({ marks, low: value.low, high: value.high, slack, table: 'torque', result: 'torque', size: subject.inches, ...(nut ? { said: { nut } } : {}) }, allowed, limits, doubtful)
 }
 
 function prevailing(marks: readonly Mark[], threads: readonly string[], value: Mark, statement: Statement): Finding {
@@ -85,5 +85,5 @@ function tubeTorque({ statement, limits }: Scene, value: Mark, tube: { mark: Mar
   const joints: TubeJoint[] = hasAny(statement, 'steel', 'stainless') ? ['steel'] : hasAny(statement, 'aluminum', 'aluminium', 'soft', '5052') ? ['aluminium'] : hasAny(statement, 'hose', 'hoses') ? ['hose'] : ['aluminium', 'steel']
   const allowed: Allowed[] = joints.flatMap((joint) => tubeNutTorque(tube.size, joint).map(({ cite: key, min, max }) => ({ low: min, high: max, expected: `${inchPounds(min, max)} (-${tube.size}, ${joint})`, citation: cite(key) })))
   const slack = value.unit === 'in-lb' ? 0.1 : Math.min(value.step / 2, value.low * 0.04)
-  return judge({ marks: [tube.mark, value], low: value.low, high: value.high, slack, table: 'tube', result: 'torque', size: tube.size / 16 }, allowed, limits)
+  return judge({ marks: [tube.mark, value], low: value.low, high: value.high, slack, table: 'tube', result: 'torque', size: tube.size / 16, ...(joints.length === 1 && joints[0] ? { said: { joint: joints[0] } } : {}) }, allowed, limits)
 }

@@ -122,6 +122,9 @@ function grommet({ given, found, width, system }: Answered): Figure | null {
   const groove = given.optionalNumber('groove')
   const hole = groove ?? found('hole')
   const bore = found('bore') ?? given.number('bore')
+  // A hole that is there takes another grommet than the bore asked for: drawing that one beside it would show a wrong fit.
+  const there = given.optionalNumber('hole')
+  if (there !== undefined && groove === undefined && hole !== undefined && Math.abs(there - hole) > 1e-6) return null
   return hole !== undefined && hole > bore ? grommetFigure({ bore, hole }, width, system) : null
 }
 

@@ -115,22 +115,45 @@ describe('what is spoken of', () => {
 })
 
 describe("the maker's limit", () => {
-  const limit = (section: string): MakerLimit => ({
-    table: 'torque', result: 'torque', value: { min: 28, max: 32 }, unit: 'lbf-in', display: { inch: '28 to 32 in-lb', metric: '3.2 to 3.6 N·m' }, reference: { title: 'Bulletin 7', section, year: '2025' },
+  const limit = (inputs: MakerLimit['inputs'] = {}): MakerLimit => ({
+    inputs, table: 'torque', result: 'torque', value: { min: 28, max: 32 }, unit: 'lbf-in', display: { inch: '28 to 32 in-lb', metric: '3.2 to 3.6 N·m' }, reference: { title: 'Bulletin 7', section: 'page 12', year: '2025' },
   })
+
+  const edge = (inputs: MakerLimit['inputs'], value: MakerLimit['value'] = { min: 7 / 32 }, unit = 'in'): MakerLimit =>
+    ({ ...limit(inputs), table: 'rivet', result: 'edge-centre', value, unit, display: { inch: 'at least 7/32 in', metric: 'at least 5.56 mm' } })
 
   it('allows what no handbook lists, and is named', () => {
     expect(first('AN3 at 30 in-lb.')?.verdict).toBe('conflicts')
-    expect(first('AN3 at 30 in-lb.', { limits: [limit('AN3 in the flap bracket')] })).toMatchObject({ verdict: 'agrees', basis: 'maker', source: { title: 'Bulletin 7' } })
+    expect(first('AN3 at 30 in-lb.', { limits: [limit({ thread: 'AN3' })] })).toMatchObject({ verdict: 'agrees', basis: 'maker', source: { title: 'Bulletin 7' } })
   })
 
   it('is named first where a number contradicts it too, and leaves what a handbook allows', () => {
-    expect(first('AN3 at 60 in-lb.', { limits: [limit('page 12')] })).toMatchObject({ verdict: 'conflicts', basis: 'maker' })
-    expect(first('AN3 at 22 in-lb.', { limits: [limit('page 12')] })).toMatchObject({ verdict: 'agrees', basis: 'seen' })
+    expect(first('AN3 at 60 in-lb.', { limits: [limit()] })).toMatchObject({ verdict: 'conflicts', basis: 'maker' })
+    expect(first('AN3 at 22 in-lb.', { limits: [limit()] })).toMatchObject({ verdict: 'agrees', basis: 'seen' })
   })
 
   it('for one bolt says nothing about another', () => {
-    expect(first('AN5 with a full nut at 30 in-lb.', { limits: [limit('AN3 in the flap bracket')] })?.verdict).toBe('conflicts')
+    expect(first('AN5 with a full nut at 30 in-lb.', { limits: [limit({ thread: 'AN3' })] })?.verdict).toBe('conflicts')
+    expect(first('AN5 with a full nut at 30 in-lb.', { limits: [limit()] })?.verdict).toBe('agrees')
+  })
+
+  it('holds for a size however it is spelled', () => {
+    for (const diameter of ['1/8', '0.125', '-4']) expect(first('Edge distance 7/32 for the 1/8 rivets.', { limits: [edge({ diameter })] }), diameter).toMatchObject({ verdict: 'agrees', basis: 'maker' })
+    expect(first('Edge distance 7/32 for the 1/8 rivets.', { limits: [edge({ diameter: '5/32' })] })?.verdict).toBe('conflicts')
+  })
+
+  it('for a nut that the text leaves open excuses a number and confirms none', () => {
+    const tension = [limit({ thread: '10-32', nut: 'tension' })]
+    expect(first('AN3 at 30 in-lb.', { limits: tension })?.verdict).toBe('cannot-tell')
+    expect(first('AN3 with a full tension nut at 30 in-lb.', { limits: tension })?.verdict).toBe('agrees')
+    expect(first('AN3 with a thin shear nut at 30 in-lb.', { limits: tension })?.verdict).toBe('conflicts')
+  })
+
+  it('in diameters is worked out for the rivet, and met by what is said in diameters', () => {
+    const twoAndAHalf = [edge({}, { min: 1.75 }, 'D')]
+    expect(first('Edge distance 7/32 for the 1/8 rivets.', { limits: twoAndAHalf })).toMatchObject({ verdict: 'agrees', basis: 'maker' })
+    expect(first('Edge distance 3/16 for the 1/8 rivets.', { limits: twoAndAHalf })?.verdict).toBe('conflicts')
+    expect(first('The rivets need an edge distance of 1.75 D.', { limits: twoAndAHalf })).toMatchObject({ verdict: 'agrees', basis: 'maker' })
   })
 })
 

@@ -47,6 +47,11 @@ describe('The leading result', () => {
     expect(lead('grommet', { bore: '3/8', groove: '0.61' })).toEqual([['hole-groove', '0.610 in']])
   })
 
+  it('is what fits the hole that is there, and plainly nothing where the list has none', () => {
+    expect(lead('grommet', { hole: '5/8' })).toEqual([['for-hole', 'AN931-6-10']])
+    expect(lead('grommet', { hole: '3/8' })).toEqual([['for-hole', 'no value']])
+  })
+
   it('is the nearest drill where none has the diameter', () => {
     expect(lead('drills', { size: '0.13' })).toEqual([['nearest', '#30 · 0.1285 in']])
   })

@@ -12,8 +12,20 @@ describe('a query that asks for a number', () => {
     ['drill for 1/8 rivet', { table: 'rivet', diameter: '1/8', head: 'universal' }], ['hole for AN426AD3-4', { table: 'rivet', diameter: '3/32', head: 'flush' }],
     ['AN3 torque', { table: 'torque', thread: '10-32' }], ['torque 1/4-28', { table: 'torque', thread: '1/4-28' }],
     ['AN3-5A grip', { table: 'bolt', bolt: 'AN3', part: 'AN3-5A' }], ['#30', { table: 'drills', size: '#30' }],
+    ['clearance hole #8 screw', { table: 'drills', screw: '#8', size: '#19' }], ['hole for 10-32 screw', { table: 'drills', screw: '#10', size: '#11' }],
+    ['grommet for 3/8 conduit', { table: 'grommet', bore: '3/8', through: '3/8' }],
   ])('%s', (text, expected) => {
     expect(first(text)).toEqual(expected)
+  })
+
+  it('offers flush and blind where nobody said which rivet, and nothing else where somebody did', () => {
+    expect(readShopQuery('drill for 1/8 rivet').map((r) => r.inputs.head)).toEqual(['universal', 'flush', 'blind'])
+    expect(readShopQuery('1/8 flush rivet').map((r) => r.inputs.head)).toEqual(['flush'])
+  })
+
+  it('takes a screw’s number for no drill, and a tapped hole for none of its tables', () => {
+    expect(readShopQuery('drill for #8 screw').map((r) => r.label)).toEqual(['a hole that passes a #8 screw'])
+    expect(readShopQuery('tap drill for 8-32 screw')).toEqual([])
   })
 
   it('offers the other reading of a grommet size', () => {

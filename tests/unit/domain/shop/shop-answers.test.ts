@@ -2,7 +2,8 @@
 import Fraction from 'fraction.js'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { withMakerLimits } from '@/lib/domain/shop/maker-limits'
+import { withMakerLimits, type MakerLimit } from '@/lib/domain/shop/maker-limits'
+import { shopTable } from '@/lib/domain/shop/shop-tables'
 import { findDrill } from '@/lib/domain/shop/drill-series'
 import { decodeGrommet } from '@/lib/domain/shop/grommet-rules'
 import { decodeRivet, rivetDesignation } from '@/lib/domain/shop/rivet-designation'
@@ -137,18 +138,57 @@ describe('A wrong bolt', () => {
 })
 
 describe("The maker's own limits", () => {
-  const limit = { table: 'rivet', result: 'edge-centre', value: { number: 0.2188 }, unit: 'in', display: { inch: '7/32 in', metric: '5.56 mm' }, reference: { title: 'Bulletin 7', section: 'page 2', year: '2024' } }
+  const withLimits = (slug: string, raw: Record<string, string>, limits: readonly MakerLimit[]) => {
+    const table = shopTable(slug)
+    const outcome = table?.compute(raw)
+    if (!table || !outcome?.ok) throw new Error(`no answer of ${slug}`)
+    return withMakerLimits(table, outcome.inputs, outcome.results, limits)
+  }
+  const edges = (raw: Record<string, string>, limits: readonly MakerLimit[]) => named(withLimits('rivet', raw, limits), 'edge-centre').filter(({ basis }) => basis === 'maker')
+
+  const limit = { table: 'rivet', inputs: {}, result: 'edge-centre', value: { number: 0.2188 }, unit: 'in', display: { inch: '7/32 in', metric: '5.56 mm' }, reference: { title: 'Bulletin 7', section: 'page 2', year: '2024' } }
 
   it('stand first and are named; the handbook stays listed', () => {
-    const results = withMakerLimits('rivet', ask('rivet', {}), [limit])
+    const results = withLimits('rivet', {}, [limit])
     const edges = named(results, 'edge-centre')
     expect(edges.map(({ basis, source }) => [basis, source?.title.slice(0, 10)])).toEqual([['maker', 'Bulletin 7'], ['arithmetic', 'US Army TM']])
     expect(edges[1]?.note).toContain('the kit maker’s own limit wins')
   })
 
   it('stand alone where the handbook has no such result, and not in other tables', () => {
-    expect(withMakerLimits('rivet', ask('rivet', {}), [{ ...limit, result: 'dent' }])[0]?.name).toBe('dent')
-    expect(withMakerLimits('bolt', ask('bolt', {}), [limit])).toEqual(ask('bolt', {}))
+    expect(withLimits('rivet', {}, [{ ...limit, result: 'dent' }])[0]?.name).toBe('dent')
+    expect(withLimits('bolt', {}, [limit])).toEqual(ask('bolt', {}))
+  })
+
+  it('hold only where the inputs they name have that value, however it is spelled', () => {
+    for (const diameter of ['1/8', '0.125', '0.125 in', '-4']) {
+      expect(edges({ diameter: '1/8' }, [{ ...limit, inputs: { diameter } }]), diameter).toHaveLength(1)
+      expect(edges({ diameter: '5/32' }, [{ ...limit, inputs: { diameter } }]), diameter).toEqual([])
+    }
+    expect(edges({ stack: '1.6256 mm' }, [{ ...limit, inputs: { stack: '0.064' } }])).toHaveLength(1)
+    expect(edges({}, [{ ...limit, inputs: { edge: '1/4' } }]), 'an input that was not given').toEqual([])
+    expect(edges({ head: 'universal' }, [{ ...limit, inputs: { diameter: '1/8', head: 'flush' } }]), 'one of two').toEqual([])
+  })
+
+  it('leave what the table works out from the handbook, and say so', () => {
+    const torque = { ...limit, table: 'torque', result: 'torque', value: { min: 26, max: 31 }, unit: 'lbf-in' }
+    // AN3 at 20 to 25 in-lb (AC 43.13-1B, Table 7-1) and 6 in-lb of drag.
+    expect(named(withLimits('torque', { thread: 'AN3', drag: '6' }, [torque]), 'with-drag')[0]).toMatchObject({ value: { min: 26, max: 31 }, note: expect.stringContaining('not from the kit maker’s limit') })
+    expect(named(withLimits('torque', { thread: 'AN4', drag: '6' }, [{ ...torque, inputs: { thread: 'AN3' } }]), 'with-drag')[0]?.note ?? '').not.toContain('kit maker')
+  })
+
+  it('are held against what was measured, also where the handbook is met', () => {
+    const three = { ...limit, value: { min: 3 }, unit: 'D', display: { inch: 'at least 3 D', metric: 'at least 3 D' } }
+    // 3 × 1/8 less 5/16 is 1/16; the handbook's 2 D is met.
+    expect(edges({ edge: '5/16' }, [three])[0]).toMatchObject({ against: 'short by 1/16 in of the kit maker’s least' })
+    expect(edges({ edge: '3/8' }, [three])[0]?.against).toBeUndefined()
+    const support = { ...limit, table: 'wire', result: 'support', value: { max: 12 } }
+    expect(named(withLimits('wire', { spacing: '18' }, [support]), 'support')[0]).toMatchObject({ basis: 'maker', against: 'over the kit maker’s most by 6 in' })
+  })
+
+  it('in diameters are worked out for the rivet asked for: 2 D of 5/32 is 5/16', () => {
+    const twice = { ...limit, value: { min: 2 }, unit: 'D', display: { inch: 'at least 2 D', metric: 'at least 2 D' } }
+    expect(edges({ diameter: '5/32' }, [twice])).toMatchObject([{ value: { min: 0.3125 }, unit: 'in', display: { inch: 'at least 5/16 in', metric: 'at least 7.94 mm' }, how: 'at least 2 D' }])
   })
 })
 
@@ -209,6 +249,10 @@ describe('Numbered screws', () => {
     expect(machineScrewDiameter(8)).toBe(0.164)
     expect([findDrill('#30')!, findDrill('#19')!].map(({ inches }) => passesScrew(inches, 8))).toEqual([false, true])
     expect(smallestDrillFor(8)?.name).toBe('#19')
+    // #4 0.112, #6 0.138, #10 0.190: Machinery's Handbook, American standard machine screws, basic major diameters.
+    expect([4, 6, 10].map(machineScrewDiameter)).toEqual([0.112, 0.138, 0.19])
+    expect(one(ask('drills', { screw: '8' }), 'screw-drill')).toMatchObject({ value: { number: 0.166, label: '#19' }, basis: 'memory' })
+    expect(named(ask('drills', {}), 'screw-drill')).toEqual([])
     expect([machineScrewDiameter(13), machineScrewDiameter(-1), machineScrewDiameter(1.5)]).toEqual([null, null, null])
   })
 })

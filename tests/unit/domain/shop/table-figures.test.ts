@@ -55,6 +55,9 @@ describe('Every table', () => {
 describe('A figure', () => {
   it('shows what was asked and what was worked out', () => {
     expect(labels(figuresOf('grommet', { bore: '3/8' }))).toEqual({ bore: '3/8', hole: '5/8' })
+    // A hole that is there and takes another grommet: none is drawn rather than the wrong one.
+    expect(figuresOf('grommet', { bore: '3/8', hole: '3/8' })).toEqual([])
+    expect(labels(figuresOf('grommet', { bore: '3/8', hole: '5/8' }))).toEqual({ bore: '3/8', hole: '5/8' })
     expect(labels(figuresOf('rivet', { diameter: '1/8', stack: '0.065', edge: '7/32', pitch: '3/4' }))).toMatchObject({ hole: '#30 · 0.1285', length: '1/4', edge: '7/32', pitch: '3/4' })
   })
 

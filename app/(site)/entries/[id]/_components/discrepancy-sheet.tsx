@@ -28,9 +28,9 @@ export function DiscrepancySheet({ page, allCautions }: { page: EntryPage; allCa
           {own ? <PostStateNotice post={entry} rights={own} /> : null}
           <div className="sheet-cautions"><CautionLine cautions={entry.cautions.filter((c) => !c.waived)} wide /><WaivedCautions post={entry} /></div>
           <SheetParts parts={parts.map((p) => ({ label: p.label || 'Found', content: p.name === 'plansSay' ? <><PlansLines page={page} /><Prose html={p.html} small /></> : <Prose html={p.html} small /> }))} />
-          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} /> : null}
+          {own ? <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} similar={page.otherCases} /> : null}
         </Sheet>
-        <NumbersCheckSheet posts={[{ label: 'Found', checks: own?.checks ?? [] }, ...entry.answers.map((a, i) => ({ label: `Row ${i + 1}`, checks: rights.get(a.id)?.checks ?? [] }))]} />
+        <NumbersCheckSheet posts={[{ label: 'Found', checks: own?.checks ?? [] }, ...entry.answers.map((a, i) => ({ label: `Row ${i + 1}`, checks: rights.get(a.id)?.checks ?? [] }))]} kit={entry.kit} />
       </div>
       <div className="discrepancy-do">
         <RivetLine title="What to do" note={count === 0 ? 'no rows yet' : `${count} ${count === 1 ? 'row' : 'rows'}, stamped first`} />

@@ -30,9 +30,9 @@ export function LessonSheet({ page, allCautions }: { page: EntryPage; allCaution
         <PostOutcomes post={entry} />
       </div>
       <PostTitleBlock post={entry} extra={typeof hours === 'number' ? [{ label: 'Hours', value: String(hours), width: 'half' }] : []} />
-      <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} />
+      <PostActs post={entry} rights={own} allCautions={allCautions} plans={entry.plans[0]} similar={page.otherCases} />
     </Sheet>
-    <NumbersCheckSheet posts={[{ label: 'Lesson', checks: own.checks }]} />
+    <NumbersCheckSheet posts={[{ label: 'Lesson', checks: own.checks }]} kit={entry.kit} />
     </>
   )
 }

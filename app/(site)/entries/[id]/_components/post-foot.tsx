@@ -7,7 +7,7 @@ import { OutcomeForm } from '@/components/entries/outcome-form'
 import { RelianceForm } from '@/components/entries/reliance-form'
 import { TitleBlock, type TitleBlockCell } from '@/components/entries/title-block'
 import { AskedForLine } from '@/components/desk/asked-for-line'
-import { ModerationPanel } from '@/components/moderation/moderation-panel'
+import { ModerationPanel, type Duplicate } from '@/components/moderation/moderation-panel'
 import { StampForm } from '@/components/stamps/stamp-form'
 import { StampRow, stampCount } from '@/components/stamps/stamp-row'
 import { WithdrawStampForm } from '@/components/stamps/withdraw-stamp-form'
@@ -19,8 +19,9 @@ import { basisLabel, scopeLabel } from '@/lib/format/basis'
 import { formatDate } from '@/lib/format/date'
 import { paths } from '@/lib/paths'
 import type { Answer, Entry } from '@/lib/schemas/post'
+import type { Hit } from '@/lib/schemas/search'
 import type { PostRights } from '@/lib/services/entries/get-entry-page'
-import { addCautionAction, setStateAction, waiveCautionAction } from '@/app/(site)/moderation-actions'
+import { addCautionAction, mergeEntryAction, setStateAction, waiveCautionAction } from '@/app/(site)/moderation-actions'
 import { pressStampAction, withdrawStampAction } from '@/app/(site)/stamp-actions'
 import { outcomeAction, relianceAction } from '../../actions'
 import { Remarks } from './remarks'
@@ -76,7 +77,7 @@ export function PostOutcomes({ post }: { post: Shown }) {
 const outcomeWords = { 'as-written': 'As written', 'with-change': 'With a change', 'did-not-work': 'Did not work' } as const
 
 /** The row of acts. Nothing is disabled: what one may not do is not there. */
-export function PostActs({ post, rights, allCautions, plans }: { post: Shown; rights: PostRights; allCautions: { code: string; title: string }[]; plans: Entry['plans'][number] | undefined }) {
+export function PostActs({ post, rights, allCautions, plans, similar = [] }: { post: Shown; rights: PostRights; allCautions: { code: string; title: string }[]; plans: Entry['plans'][number] | undefined; similar?: readonly Hit[] }) {
   const isOneSerial = 'makerReply' in post && post.makerReply === 'one-serial'
   const older = post.revisions.at(-2)
   return (
@@ -90,15 +91,23 @@ export function PostActs({ post, rights, allCautions, plans }: { post: Shown; ri
         {rights.tell ? <Disclosure summary={rights.told ? 'Change how it went' : 'Tell how it went'}><OutcomeForm action={outcomeAction} postId={post.id} revision={post.revision} critical={post.needsTwo} told={rights.told} /></Disclosure> : null}
         {rights.stamp && (rights.ownStampId === null || post.stamp === 'in-question') ? <Disclosure summary={`Stamp Rev ${post.revision}`}><StampForm action={pressStampAction} postId={post.id} revision={post.revision} missing={post.missing} single={!post.needsTwo} plans={plans} conflicts={advisedConflicts(rights.checks)} submission={randomUUID()} /></Disclosure> : null}
         {rights.ownStampId !== null ? <Disclosure summary="Withdraw my stamp" look="quiet"><WithdrawStampForm action={withdrawStampAction} stampId={rights.ownStampId} /></Disclosure> : null}
-        {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
+        {rights.cautions ? <Disclosure summary="Moderate" look="quiet"><ModerationPanel postId={post.id} state={post.state} cautions={post.cautions} allCautions={allCautions} duplicates={duplicatesOf(post, similar)} mergeAction={mergeEntryAction} addCautionAction={addCautionAction} waiveCautionAction={waiveCautionAction} setStateAction={setStateAction} /></Disclosure> : null}
       </div>
       <Remarks post={post} mayRemark={rights.remark} memberId={rights.memberId} />
     </>
   )
 }
 
-/** Says that a post is hidden or withdrawn, to those who still see it. */
+/** What a duplicate could be merged into. */
+function duplicatesOf(post: Shown, similar: readonly Hit[]): Duplicate[] {
+  if (post.kind === 'answer' || ('answers' in post && post.answers.some((a) => a.state === 'visible'))) return []
+  return similar.filter((hit) => hit.kind === post.kind).map((hit) => ({ id: hit.id, title: hit.title, caution: hit.cautions.find((c) => !c.waived) ?? null }))
+}
+
+/** Says that a post is hidden, merged or withdrawn, to those who still see it. */
 export function PostStateNotice({ post, rights }: { post: Shown; rights: PostRights }) {
   if (post.state === 'visible') return null
-  return <NoticeLine boxed><b>{post.state === 'withdrawn' ? 'Withdrawn: do not go by this.' : 'Hidden.'}</b> {rights.stateReason ?? ''}</NoticeLine>
+  return <NoticeLine boxed><b>{stateWords[post.state]}</b> {rights.stateReason ?? ''}</NoticeLine>
 }
+
+const stateWords = { visible: '', hidden: 'Hidden.', merged: 'Merged into another entry: others are led there.', withdrawn: 'Withdrawn: do not go by this.' } as const

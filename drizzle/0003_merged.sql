@@ -1,0 +1,1 @@
+ALTER TABLE `post` ADD `merged_into_id` integer REFERENCES post(id);
