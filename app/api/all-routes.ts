@@ -2,6 +2,15 @@
 // A test compares it with the folders, so that no route stays undescribed.
 import type { Handler, Method } from '@/lib/http/route'
 import * as answer from './answers/[id]/route'
+import * as build from './builds/[id]/route'
+import * as closing from './builds/[id]/closing/[item]/route'
+import * as hold from './builds/[id]/holds/[hold]/route'
+import * as holdRelease from './builds/[id]/holds/[hold]/release/route'
+import * as logLine from './builds/[id]/log/[line]/route'
+import * as buildSection from './builds/[id]/sections/[section]/route'
+import * as holds from './builds/[id]/sections/[section]/holds/route'
+import * as log from './builds/[id]/sections/[section]/log/route'
+import * as builds from './builds/route'
 import * as requiredCautions from './cautions/required/route'
 import * as entry from './entries/[id]/route'
 import * as answers from './entries/[id]/answers/route'
@@ -46,6 +55,15 @@ export const allRoutes: Record<string, Record<Method, Handler>> = {
   '/api/posts/{id}/outcome': outcome,
   '/api/posts/{id}/reliance': reliance,
   '/api/stamps/{id}/withdraw': withdraw,
+  '/api/builds': builds,
+  '/api/builds/{id}': build,
+  '/api/builds/{id}/sections/{section}': buildSection,
+  '/api/builds/{id}/sections/{section}/log': log,
+  '/api/builds/{id}/sections/{section}/holds': holds,
+  '/api/builds/{id}/log/{line}': logLine,
+  '/api/builds/{id}/holds/{hold}': hold,
+  '/api/builds/{id}/holds/{hold}/release': holdRelease,
+  '/api/builds/{id}/closing/{item}': closing,
   '/api/cautions/required': requiredCautions,
   '/api/kits': kits,
   '/api/kits/{kit}': kit,

@@ -1,5 +1,6 @@
 // The demo scenario under content/demo: invented people, kits and posts. Times are days before the seed day.
 import 'server-only'
+import builds from '@/content/demo/builds.json'
 import entries1 from '@/content/demo/entries-1.json'
 import entries2 from '@/content/demo/entries-2.json'
 import entries3 from '@/content/demo/entries-3.json'
@@ -33,6 +34,12 @@ export interface DemoEntry extends DemoMarks, DemoText {
 }
 export interface DemoMember { key: string; name: string; email: string; role: 'member' | 'moderator' | 'steward'; bio: string; mentor?: { number: string; fields: string; reason: string } }
 
+export interface DemoBuild {
+  member: string; kit: string; name: string; serial: string; day: number
+  sections: { code: string; state: 'in-work' | 'waiting' | 'done'; day: number }[]
+  log: { section: string; day: number; minutes: number; page: string; steps: string; helpers: string; line: string }[]
+  holds: { section: string; kind: 'hold' | 'left-open'; what: string; page: string; step: string; until?: string; notWaiting?: string; untilSection?: string; day: number; released?: { day: number; note: string } }[]
+}
 export interface DemoLimit { kit: string; by: string; day: number; table: string; result: string; inputs: Record<string, string>; value: { number?: string; min?: string; max?: string; words?: string }; unit: string; reference: { title: string; section: string; year: string }; note: string }
 /** Page, step and task of each plan step of a section, in order. */
 export interface DemoPlanSteps { kit: string; section: string; revision: string; steps: [string, string, string][] }
@@ -50,6 +57,6 @@ export interface DemoPlans {
 export const demoPassword = 'whimbrel-demo'
 
 export const demoContent = {
-  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[], planSteps: planSteps as unknown as DemoPlanSteps[], plans: plans as unknown as DemoPlans,
+  kits, operations, members: members as DemoMember[], limits: limits as unknown as DemoLimit[], planSteps: planSteps as unknown as DemoPlanSteps[], plans: plans as unknown as DemoPlans, builds: builds as unknown as DemoBuild[],
   entries: [...(entries1 as unknown as DemoEntry[]), ...(entries2 as unknown as DemoEntry[]), ...(entries3 as unknown as DemoEntry[])],
 }

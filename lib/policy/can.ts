@@ -37,6 +37,8 @@ export interface Acts {
   'notice.close': { memberId: number }
   'import': undefined
   'account.open': undefined
+  'builds.keep': undefined
+  'build.open': { ownerId: number }
 }
 export type Act = keyof Acts
 
@@ -75,6 +77,9 @@ const rules: { [A in Act]: Rule<A> } = {
   'notice.close': (actor, notice) => actor !== null && actor.id === notice.memberId,
   'import': (actor) => isAtLeast(actor, 'steward'),
   'account.open': (actor) => actor !== null,
+  'builds.keep': (actor) => actor !== null,
+  // Private whatever the role: neither moderators nor stewards look into somebody's garage.
+  'build.open': (actor, build) => actor !== null && actor.id === build.ownerId,
 }
 
 /** Whether `actor` may do `act` on `subject`. */

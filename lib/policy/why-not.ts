@@ -27,4 +27,6 @@ export const whyNot: Record<Act, string> = {
   'notice.close': 'What waits for somebody is theirs to close.',
   'import': 'Stewards import.',
   'account.open': 'Sign in to see your account.',
+  'builds.keep': 'Sign in to keep a build.',
+  'build.open': 'A build is open to its owner alone.',
 }

@@ -10,12 +10,16 @@ let rib: Published
 let lesson: Published
 let own: Published
 let answer: number
+let build: string
+let held: string
 beforeAll(async () => {
   rib = await demoEntry('demo-rib-7-edge')
   lesson = await demoEntry('demo-trailing-edge-wave')
   own = await publish('dela')
   answer = await say('bryn', own)
   await stampIt('jory', answer)
+  build = (await must('dela', 'GET', '/api/builds')).items[0].url
+  held = (await must('dela', 'GET', `/api${build}`)).holds[0].url
 })
 
 interface Look { name: string; as?: Who; address: () => string; status?: number }
@@ -59,6 +63,13 @@ const looks: readonly Look[] = [
   { name: 'one’s own question', as: 'dela', address: () => own.url },
   { name: 'editing it', as: 'dela', address: () => `${own.url}/edit` },
   { name: 'editing a row', as: 'bryn', address: () => `/answers/${answer}/edit` },
+  { name: 'my build', as: 'dela', address: () => '/builds' },
+  { name: 'one aeroplane', as: 'dela', address: () => build },
+  { name: 'a section of it', as: 'dela', address: () => `${build}/W-3` },
+  { name: 'hold tags', as: 'dela', address: () => `${build}/tags` },
+  { name: 'a visit sheet', as: 'dela', address: () => `${build}/W-3/visit` },
+  { name: 'a hold by its code', as: 'dela', address: () => held },
+  { name: 'somebody’s hold', address: () => held },
   { name: 'a question for a mentor', as: 'tobias', address: () => own.url },
   { name: 'the desk', as: 'jory', address: () => '/desk' },
   { name: 'time to an answer', as: 'jory', address: () => '/desk/evidence' },

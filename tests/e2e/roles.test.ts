@@ -13,6 +13,8 @@ let question: Published
 let answer: number
 let hidden: Published
 let suspended: Who
+let buildId: number
+let heldAt: string
 let people: Record<Role, Who | null>
 
 beforeAll(async () => {
@@ -22,6 +24,8 @@ beforeAll(async () => {
   await sql("update post set state = 'hidden', state_reason = 'Spam.', state_by = ?, state_at = ? where id = ?", [await idOf('kofi'), Date.now(), hidden.id])
   suspended = await newPerson({ name: 'Suspended Sam' })
   await sql("update member set state = 'suspended' where email = ?", [suspended])
+  buildId = (await must('dela', 'POST', '/api/builds', { kit: 'whimbrel-2', name: 'Private' })).id
+  heldAt = (await must('dela', 'POST', `/api/builds/${buildId}/sections/W-3/holds`, { key: 'roles-hold', kind: 'hold', what: 'Rib 7', until: 'a reply' })).url
   people = { visitor: null, ...who, suspended }
 })
 
@@ -57,6 +61,18 @@ const table: Record<string, () => readonly [string, readonly number[]]> = {
   'ask': () => ['/ask', members],
   'lesson': () => ['/lesson', members],
   'account': () => ['/account', members],
+  'my build': () => ['/builds', members],
+  'somebody’s build': () => [`/builds/${buildId}`, [404, 200, 404, 404, 404, 404]],
+  'a section of it': () => [`/builds/${buildId}/W-3`, [404, 200, 404, 404, 404, 404]],
+  'its tags': () => [`/builds/${buildId}/tags`, [404, 200, 404, 404, 404, 404]],
+  'its visit sheet': () => [`/builds/${buildId}/W-3/visit`, [404, 200, 404, 404, 404, 404]],
+  'its data': () => [`/api/builds/${buildId}`, [404, 200, 404, 404, 404, 404]],
+  'a section’s data': () => [`/api/builds/${buildId}/sections/W-3`, [404, 200, 404, 404, 404, 404]],
+  'the code of a hold': () => [heldAt, everybody],
+  'a code on no tag': () => ['/holds/AAAAAAAAAAAAAAAAAAAAAA', nobody],
+  'a link to no visit': () => ['/visits/AAAAAAAAAAAAAAAAAAAAAA', nobody],
+  'an unknown build': () => ['/builds/999999', nobody],
+  'an unknown section of a build': () => [`/builds/${buildId}/Z-9`, nobody],
   'desk': () => ['/desk', [401, 403, 200, 403, 403, 401]],
   'why this order': () => ['/search/explain?q=rivet', [401, 403, 403, 403, 200, 401]],
   'time to an answer': () => ['/desk/evidence', [401, 403, 200, 403, 200, 401]],
@@ -227,7 +243,7 @@ test('with public reading off a visitor reads nothing but the sign-in and health
 
 test('the API without a session: reading is open, writing is not', async () => {
   expect((await must(null, 'GET', '/api/search?q=rivet')).results.length).toBeGreaterThan(0)
-  for (const [method, address] of [['POST', '/api/entries'], ['PATCH', `/api/entries/${question.id}`], ['POST', `/api/entries/${question.id}/answers`], ['PATCH', `/api/answers/${answer}`], ['POST', `/api/posts/${answer}/remarks`], ['POST', `/api/posts/${answer}/stamps`], ['PUT', `/api/posts/${answer}/outcome`], ['PUT', `/api/posts/${answer}/reliance`], ['DELETE', `/api/posts/${answer}/reliance`], ['POST', '/api/stamps/1/withdraw'], ['POST', '/api/import']] as const) {
+  for (const [method, address] of [['POST', '/api/entries'], ['PATCH', `/api/entries/${question.id}`], ['POST', `/api/entries/${question.id}/answers`], ['PATCH', `/api/answers/${answer}`], ['POST', `/api/posts/${answer}/remarks`], ['POST', `/api/posts/${answer}/stamps`], ['PUT', `/api/posts/${answer}/outcome`], ['PUT', `/api/posts/${answer}/reliance`], ['DELETE', `/api/posts/${answer}/reliance`], ['POST', '/api/stamps/1/withdraw'], ['POST', '/api/import'], ['POST', '/api/builds'], ['PATCH', `/api/builds/${buildId}/sections/W-3`], ['POST', `/api/builds/${buildId}/sections/W-3/log`], ['POST', `/api/builds/${buildId}/sections/W-3/holds`], ['POST', `/api/builds/${buildId}/holds/1/release`]] as const) {
     expect([method, address, (await call(null, method, address, method === 'DELETE' ? undefined : {})).status]).toEqual([method, address, 401])
     expect([method, address, (await call(suspended, method, address, method === 'DELETE' ? undefined : {})).status]).toEqual([method, address, 401])
   }

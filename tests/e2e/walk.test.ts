@@ -101,6 +101,13 @@ const table: Record<string, readonly Check[]> = {
   '(site)/ask/page.tsx': [{ without: () => '/ask', as: author, why: 'an empty form; what may already answer it has a test of its own below' }],
   '(site)/lesson/page.tsx': [{ without: () => '/lesson', as: author, why: 'an empty form' }],
   '(site)/guide/[slug]/page.tsx': [{ without: () => '/guide/how-stamps-work', why: 'prose of the house' }],
+  '(site)/builds/page.tsx': [{ without: () => '/builds', as: author, why: 'names of one’s own aeroplanes' }],
+  '(site)/builds/[id]/page.tsx': [{ page: () => `/builds/${buildId}`, as: 'dela', shows: ['title', 'lesson'], within: 'block' }],
+  '(site)/builds/[id]/[section]/page.tsx': [{ page: () => `/builds/${buildId}/${section}`, as: 'dela', shows: ['title', 'lesson'], within: 'block' }],
+  '(site)/builds/[id]/[section]/visit/page.tsx': [{ page: () => `/builds/${buildId}/${section}/visit`, as: 'dela', shows: ['title', 'lesson'], within: 'block' }],
+  '(site)/builds/[id]/tags/page.tsx': [{ without: () => `/builds/${buildId}/tags`, as: 'dela', why: 'the builder’s own words and a code' }],
+  '(site)/holds/[code]/page.tsx': [{ without: () => heldAt, as: 'dela', why: 'the builder’s own words' }],
+  '(site)/visits/[token]/page.tsx': [{ page: () => visitAt, shows: ['title', 'lesson'], within: 'block' }],
   '(desk)/desk/page.tsx': [
     { page: () => `/desk?open=${answer}&section=whimbrel-2:${section}`, as: 'ansel', shows: ['open'], within: 'block' },
     { page: () => `/desk?open=${open.id}`, as: 'ansel', shows: ['open', 'openText'], within: 'block' },
@@ -142,6 +149,21 @@ const table: Record<string, readonly Check[]> = {
   'api/stamps/[id]/withdraw/route.ts': [{ api: async () => must('ansel', 'POST', `/api/stamps/${await stampIt('ansel', lesson.id)}/withdraw`, { reason: 'Read the wrong page.' }), shows: [] }],
   'api/posts/[id]/outcome/route.ts': [{ api: () => must('dela', 'PUT', `/api/posts/${lesson.id}/outcome`, { result: 'as-written', note: '' }), shows: [] }],
   'api/posts/[id]/reliance/route.ts': [{ api: () => must('dela', 'PUT', `/api/posts/${lesson.id}/reliance`, {}), shows: [] }],
+  'api/builds/route.ts': [{ without: () => '/api/builds', as: 'dela', why: 'names and counts only' }],
+  'api/builds/[id]/route.ts': [{ api: () => get(`/api/builds/${buildId}`, 'dela'), shows: ['title', 'lesson'] }],
+  'api/builds/[id]/sections/[section]/route.ts': [
+    { api: () => get(`/api/builds/${buildId}/sections/${section}`, 'dela'), shows: ['title', 'lesson'] },
+    { api: () => must('dela', 'PATCH', `/api/builds/${buildId}/sections/${section}`, { state: 'waiting' }), shows: ['title', 'lesson'] },
+  ],
+  'api/builds/[id]/sections/[section]/log/route.ts': [{ api: () => must('dela', 'POST', `/api/builds/${buildId}/sections/${section}/log`, { key: 'walk-line', day: '2026-03-09', minutes: 30 }), shows: [] }],
+  'api/builds/[id]/sections/[section]/holds/route.ts': [{ api: () => must('dela', 'POST', `/api/builds/${buildId}/sections/${section}/holds`, hold), shows: [] }],
+  'api/builds/[id]/log/[line]/route.ts': [{ api: async () => {
+    const { id } = await must('dela', 'POST', `/api/builds/${buildId}/sections/${section}/log`, { key: 'walk-line', day: '2026-03-09', minutes: 30 })
+    return get(`/api/builds/${buildId}/log/${id}`, 'dela')
+  }, shows: [] }],
+  'api/builds/[id]/holds/[hold]/route.ts': [{ api: () => get(`/api/builds/${buildId}/holds/${holdId}`, 'dela'), shows: [] }],
+  'api/builds/[id]/holds/[hold]/release/route.ts': [{ api: () => must('dela', 'POST', `/api/builds/${buildId}/holds/${holdId}/release`, { note: 'The kit maker wrote.' }), shows: [] }],
+  'api/builds/[id]/closing/[item]/route.ts': [{ api: async () => (await call('dela', 'PUT', `/api/builds/${buildId}/closing/999999`, { isDone: true })).body, shows: [] }],
   'api/cautions/required/route.ts': [{ api: () => must(null, 'POST', '/api/cautions/required', { body: word.openText, kit: 'whimbrel-2', sections: [section] }), shows: [] }],
   'api/preview/route.ts': [{ api: async () => { const { html } = await must(null, 'POST', '/api/preview', { body: 'Only what was sent.' }); return html }, shows: [] }],
   'api/notices/route.ts': [{ api: () => must('odile', 'GET', '/api/notices'), shows: ['lesson'] }],
@@ -170,6 +192,25 @@ const table: Record<string, readonly Check[]> = {
 let authorId = 0
 let answererId = 0
 beforeAll(async () => { [authorId, answererId] = [await idOf(author), await idOf('bryn')] })
+
+// A build whose owner goes by the row and the lesson, with a hold and a link to its visit sheet.
+const hold = { key: 'walk-hold', kind: 'hold', what: 'Belt anchor: do not close the floor', until: 'the kit maker’s reply' }
+let buildId = 0
+let holdId = 0
+let heldAt = ''
+let visitAt = ''
+beforeAll(async () => {
+  for (const id of [answer, lesson.id]) await must('dela', 'PUT', `/api/posts/${id}/reliance`, {})
+  buildId = (await must('dela', 'POST', '/api/builds', { kit: 'whimbrel-2', name: 'Walked over' })).id
+  const made = await must('dela', 'POST', `/api/builds/${buildId}/sections/${section}/holds`, hold)
+  ;[holdId, heldAt] = [made.id, made.url]
+  const page = await openPage({ as: 'dela', javaScript: false })
+  await page.goto(`/builds/${buildId}/${section}`)
+  await page.evaluate(() => { for (const details of document.querySelectorAll('details')) details.open = true })
+  await page.getByLabel('Whom is it for?').fill('An inspector')
+  await page.getByRole('button', { name: 'Make a link' }).click()
+  visitAt = new URL((await page.locator('a[href*="/visits/"]').getAttribute('href')) ?? '').pathname
+})
 
 /** One more open question that holds `text`; returns its id. Its creation is checked like every answer. */
 async function publishWith(text: string): Promise<number> {

@@ -8,6 +8,7 @@ import { hashPassword } from '@/lib/auth/password'
 import { demoContent, demoPassword } from '@/lib/content/demo-content'
 import type { Renderer } from '@/lib/render/renderer'
 import { noteRulesVersion } from '@/lib/services/cautions/reapply-rules'
+import { seedBuilds } from './seed-builds'
 import { seedEntry, type SeedPeople } from './seed-entry'
 import { seedLimits } from './seed-limits'
 import { seedPlanSteps } from './seed-plan-steps'
@@ -37,6 +38,7 @@ export async function seedDemo(database: Database, renderer: Renderer, now: numb
   await seedPlanSteps(database, at(joinedDaysAgo))
   for (const entry of [...demoContent.entries].sort((a, b) => b.day - a.day)) await seedEntry(database, renderer, people, entry, at)
   await seedPlans(database, people, at, at(joinedDaysAgo))
+  await seedBuilds(database, people, at)
   await keepState(database, 'complete')
   return demoContent.entries.length
 }

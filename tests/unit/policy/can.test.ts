@@ -178,6 +178,10 @@ const otherTable: readonly (readonly [Act, string, string, Ask])[] = [
   ['notice.close', 'of the mentor of the table', '...T....', (a) => can(a, 'notice.close', { memberId: 4 })],
   ['import', '', '......SX', (a) => can(a, 'import')],
   ['account.open', '', '.MATWOSX', (a) => can(a, 'account.open')],
+  ['builds.keep', '', '.MATWOSX', (a) => can(a, 'builds.keep')],
+  ['build.open', 'of the member of the table', '.M......', (a) => can(a, 'build.open', { ownerId: 2 })],
+  ['build.open', 'of the moderator of the table', '.....O..', (a) => can(a, 'build.open', { ownerId: 6 })],
+  ['build.open', 'of somebody else', '........', (a) => can(a, 'build.open', { ownerId: 99 })],
 ]
 
 const postActs = ['post.read', 'post.edit', 'post.remark', 'post.stamp', 'post.ask-for', 'post.tell-how-it-went', 'post.go-by', 'post.set-cautions', 'post.hide'] as const

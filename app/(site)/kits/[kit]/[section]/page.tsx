@@ -26,7 +26,7 @@ export default async function SectionPage({ params }: PageProps<'/kits/[kit]/[se
   const here = { kit: page.kit.slug, section: page.code }
   return (
     <>
-      <PageTitle kicker={`${page.kit.name} · ${page.system}`} title={`${page.code} ${page.title}`} aside={<div className="button-row"><LinkButton href={paths.brief(here.kit, here.section)} look="primary">Brief</LinkButton><LinkButton href={paths.ask(here)}>Ask about it</LinkButton><LinkButton href={paths.lesson(here)}>Write a lesson</LinkButton></div>} />
+      <PageTitle kicker={`${page.kit.name} · ${page.system}`} title={`${page.code} ${page.title}`} aside={<div className="button-row"><LinkButton href={paths.brief(here.kit, here.section)} look="primary">Brief</LinkButton><LinkButton href={paths.ask(here)}>Ask about it</LinkButton><LinkButton href={paths.lesson(here)}>Write a lesson</LinkButton>{page.buildId === null ? null : <LinkButton href={paths.buildSection(page.buildId, page.code)}>My section</LinkButton>}</div>} />
       <p className="flex flex-wrap gap-x-6 gap-y-2"><Link href={paths.planSteps(here.kit, here.section)}>Plan steps</Link><Link href={paths.sectionLists(here.kit, here.section)}>Hardware and closing list</Link><Link href={paths.bulletins(here.kit)}>Bulletins</Link></p>
       {page.hits.length === 0 ? <EmptyState title="Nothing yet about this section" action={<LinkButton href={paths.ask(here)} look="primary">Ask the first question</LinkButton>}>Whoever finishes it first can spare the others an evening.</EmptyState> : (
         <>
