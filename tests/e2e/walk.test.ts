@@ -34,7 +34,8 @@ beforeAll(async () => {
   lesson = await publish(author, { kind: 'lesson', title: `Belt order ${word.lesson}`, section, text: `Anchors first ${word.lessonText}.` })
   await stampIt('jory', answer)
   await stampIt('tobias', answer)
-  const followed = await publish(author, { kind: 'lesson', title: `Belt page ${word.lesson}`, section, text: 'Anchors first, by the page.', plans: [{ page: 'ZW-1', step: '1' }] })
+  // Of other words than the lesson above: a brief shows one of several that say the same.
+  const followed = await publish(author, { kind: 'lesson', title: `Inertia reel cover ${word.lesson}`, section, text: 'The cover of the reel goes on from below, with its slot towards the seat.', plans: [{ page: 'ZW-1', step: '1' }] })
   for (const follower of ['odile', 'ife'] as const) await must(follower, 'PUT', `/api/posts/${followed.id}/reliance`, {})
   await enterBulletin({ number: 'SB-walk', steps: 'ZW-1, 1, B' })
   notice = (await must('ife', 'GET', '/api/notices')).items.find((n: { post: { id: number } }) => n.post.id === followed.id).id
