@@ -11,5 +11,6 @@ export async function onRequestError(error: unknown, request: { path: string; me
   // Imported here, not above: the framework also bundles this file for a runtime without process.
   const { logError } = await import('@/lib/log')
   const digest = error instanceof Error && 'digest' in error ? String(error.digest) : ''
-  logError('request', error, { path: request.path.split('?')[0] ?? '', method: request.method, route: context.routePath, digest })
+  // The route and not the address: of a visit sheet or a hold tag the address is the key.
+  logError('request', error, { method: request.method, route: context.routePath, digest })
 }

@@ -2,6 +2,7 @@
 import Link from 'next/link'
 import type { Route } from 'next'
 import { HowItWent } from '@/components/entries/how-it-went'
+import { PlanChanges } from '@/components/entries/plan-changes'
 import { DimensionText } from '@/components/shop/dimension-text'
 import { StampFlat } from '@/components/stamps/stamp-flat'
 import { builderWords } from '@/lib/format/brief-order-words'
@@ -26,6 +27,7 @@ export function KnowHowRow({ item }: { item: BriefItem }) {
   return (
     <BriefRow label={item.stamp === 'stamped' ? 'Stamped' : 'One stamp'} aside={<Stamps item={item} />}>
       <h3><Link href={item.url as Route}>{item.title}</Link></h3>
+      <PlanChanges changes={item.planChanges} brief />
       <p>{item.passage}</p>
       <HowItWent outcomes={item.outcomes} critical={item.needsTwo} notes />
     </BriefRow>
@@ -45,6 +47,7 @@ export function LessonRow({ lesson: { lead, builders, others } }: { lesson: Brie
   return (
     <BriefRow label="Lesson" aside={lead.stamps.length > 0 ? lead.stamps.map((stamp) => <StampFlat key={stamp.id} stamp={stamp} state={lead.stamp} />) : undefined}>
       <h3><Link href={lead.url as Route}>{lead.title}</Link></h3>
+      <PlanChanges changes={lead.planChanges} brief />
       <p>{lead.passage}</p>
       <p className="brief-note">
         {lead.author.name}{builders > 1 ? <> · <b>{builderWords(builders)} say so</b></> : null}

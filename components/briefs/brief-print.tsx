@@ -54,6 +54,7 @@ function SecondPage({ brief }: { brief: Brief }) {
       {items.map(({ item, task, builders }) => (
         <div key={item.postId} className="brief-paper-item">
           <p><b>{capital(task)}: {item.title}</b> · {stampsOf(item)}{builders > 1 ? ` · ${builderWords(builders)} say so` : ''} <CautionMention cautions={item.cautions} /></p>
+          {item.planChanges.length > 0 ? <p><b>Plans changed: bulletin {[...new Set(item.planChanges.map((c) => c.bulletin))].join(', ')}. Measure by the page in force.</b></p> : null}
           <p>{item.passage}</p>
         </div>
       ))}
@@ -67,8 +68,10 @@ function SecondPage({ brief }: { brief: Brief }) {
   )
 }
 
-/** 'Stamps HB 031, TR 017: advice checked, work not inspected'. */
-function stampsOf({ stamps, missing }: BriefItem): string {
+/** 'Stamps HB 031, TR 017: advice checked, work not inspected'; what lies across a stamp on the page is said on paper too. */
+function stampsOf({ stamp, stamps, missing }: BriefItem): string {
+  if (stamp === 'in-question') return 'IN QUESTION: somebody told that it did not work. Its stamps do not count until a mentor looks again.'
+  if (stamp === 'plans-changed') return 'PLANS CHANGED since it was stamped: read the bulletin first.'
   const live = stamps.filter((s) => s.live)
   if (live.length === 0) return 'No stamp.'
   return `${live.length === 1 ? 'Stamp' : 'Stamps'} ${live.map((s) => s.mentor.mark).join(', ')}: ADVICE CHECKED · WORK NOT INSPECTED.${missing === null ? '' : ' A stamp is missing.'}`

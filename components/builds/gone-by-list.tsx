@@ -29,6 +29,6 @@ function news(item: GoneBy): string[] {
     item.state === 'withdrawn' ? 'Withdrawn: do not go by this. Open it for what to inspect.' : '',
     item.revision === item.currentRevision ? '' : `It is Rev ${item.currentRevision} now: read it again.`,
     item.stamp === 'in-question' ? 'In question: it did not work for a builder, a mentor has to look again.' : '',
-    item.stamp === 'plans-changed' ? 'The plans changed since it was stamped.' : '',
+    item.stamp === 'plans-changed' ? 'The plans changed since it was stamped.' : item.plansChanged ? 'The plans changed since it was written.' : '',
   ].filter(Boolean)
 }

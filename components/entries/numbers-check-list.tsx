@@ -32,6 +32,7 @@ export function NumbersCheckList({ posts, kit }: NumbersCheckProps) {
           <span className="numbers-check-mark" aria-hidden="true">{marks[check.verdict]}</span>
           <span>
             <b>{[label, check.role === 'measured' ? 'measured' : ''].filter(Boolean).join(', ')}{label || check.role === 'measured' ? ' ' : ''}“{check.claim}”</b> {words[check.verdict]}{check.expected ? `: ${check.expected}` : ''}.
+            {check.makerLimit ? <> <b>The kit maker’s own limit wins: {check.makerLimit}.</b></> : null}
             {check.role === 'measured' ? ' A measurement: charged to nobody.' : ''}
             <span className="block text-small text-ink-soft">{sourceWords(check)}{check.table ? <> <Link href={paths.shopTable(check.table, kit ? { kit } : {})}>Shop table</Link></> : null}</span>
           </span>

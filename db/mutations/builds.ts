@@ -2,7 +2,7 @@
 import 'server-only'
 import { and, eq, inArray, isNull } from 'drizzle-orm'
 import type { Transaction } from '../client'
-import { build, buildSection, closingAnswer, hold, visit, workSession } from '../schema'
+import { build, buildSection, closingAnswer, debrief, finding, hold, visit, workSession } from '../schema'
 
 type Inserted<T extends { $inferInsert: object }> = T['$inferInsert']
 
@@ -46,8 +46,10 @@ export async function clearBuilds(tx: Transaction, memberId: number, at: number)
   const own = (await tx.select({ id: build.id }).from(build).where(eq(build.memberId, memberId))).map((b) => b.id)
   if (own.length === 0) return
   await tx.update(build).set({ name: '', serial: '', endedAt: at }).where(inArray(build.id, own))
-  await tx.update(workSession).set({ helpers: '', line: '' }).where(inArray(workSession.buildId, own))
-  await tx.update(hold).set({ what: '', until: '', notWaiting: '', releaseNote: '' }).where(inArray(hold.buildId, own))
+  await tx.update(workSession).set({ helpers: '', line: '', page: '', steps: '' }).where(inArray(workSession.buildId, own))
+  await tx.update(hold).set({ what: '', page: '', step: '', until: '', notWaiting: '', releaseNote: '' }).where(inArray(hold.buildId, own))
+  await tx.update(debrief).set({ tools: '' }).where(inArray(debrief.buildId, own))
+  await tx.update(finding).set({ text: '' }).where(inArray(finding.visitId, tx.select({ id: visit.id }).from(visit).where(inArray(visit.buildId, own))))
   await tx.update(closingAnswer).set({ note: '' }).where(inArray(closingAnswer.buildId, own))
   await tx.update(visit).set({ visitor: '', revokedAt: at }).where(inArray(visit.buildId, own))
 }

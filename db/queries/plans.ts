@@ -1,6 +1,6 @@
 // What a steward keeps of the plans: steps, hardware, closing items, bulletins; and which posts of a kit cite the plans at all.
 import 'server-only'
-import { and, asc, desc, eq, isNull, sql } from 'drizzle-orm'
+import { and, asc, desc, eq, isNull, or, sql, type SQL } from 'drizzle-orm'
 import { alias } from 'drizzle-orm/sqlite-core'
 import type { ReaderOrTransaction } from '../client'
 import { bulletin, bulletinStep, closingItem, hardwareItem, planStep, post, revision, task } from '../schema'
@@ -38,12 +38,13 @@ export async function listBulletins(reader: ReaderOrTransaction, kitId: number):
   return [...found.values()]
 }
 
-/** Ids of a kit's posts, in any state, that cite plans pages: by the entry's references, or by a plans stamp that was not withdrawn. */
-export async function listPostsCitingPlans(reader: ReaderOrTransaction, kitId: number): Promise<number[]> {
+/** Ids of a kit's posts, in any state, that may cite one of these pages (in small letters, without spaces): in the entry's references, or in a plans stamp that was not withdrawn. Who judges looks closer. */
+export async function listPostsCitingPages(reader: ReaderOrTransaction, kitId: number, pages: readonly string[]): Promise<number[]> {
   const entry = alias(post, 'entry')
-  const hasPlansStamp = sql`exists (select 1 from stamp s where s.post_id = ${post.id} and s.basis = 'plans' and s.withdrawn_at is null)`
+  const holdsPage = (text: SQL) => or(...pages.map((page) => sql`instr(replace(lower(${text}), ' ', ''), ${page}) > 0`))
+  const hasPlansStamp = sql`exists (select 1 from stamp s where s.post_id = ${post.id} and s.basis = 'plans' and s.withdrawn_at is null and (${holdsPage(sql`s.reference`)}))`
   const rows = await reader.select({ id: post.id }).from(post).innerJoin(entry, eq(entry.id, sql`coalesce(${post.parentId}, ${post.id})`))
     .innerJoin(revision, and(eq(revision.postId, entry.id), eq(revision.number, entry.currentRevision)))
-    .where(and(eq(revision.kitId, kitId), sql`(json_array_length(${revision.plans}) > 0 or ${hasPlansStamp})`)).orderBy(asc(post.id))
+    .where(and(eq(revision.kitId, kitId), or(holdsPage(sql`${revision.plans}`), hasPlansStamp))).orderBy(asc(post.id))
   return rows.map((r) => r.id)
 }

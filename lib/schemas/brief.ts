@@ -1,7 +1,7 @@
 // A section's brief as the page, the print and the API show it. Whatever carries words of a post carries its cautions beside them.
 import { z } from 'zod'
 import { BASES } from '@/lib/domain/shop/shop-table'
-import { cautionSchema, outcomesSchema, plansReferenceSchema, stampSchema, stampStateSchema } from './post'
+import { cautionSchema, outcomesSchema, planChangeSchema, plansReferenceSchema, stampSchema, stampStateSchema } from './post'
 
 const cautions = z.array(cautionSchema)
 const taskName = z.object({ slug: z.string(), title: z.string() })
@@ -10,6 +10,8 @@ const postLinkSchema = z.object({ postId: z.int(), title: z.string(), url: z.str
 const briefItemSchema = z.object({
   postId: z.int(), kind: z.enum(['question', 'lesson', 'answer']), title: z.string(), passage: z.string(), url: z.string(), author: person, revision: z.string(),
   stamp: stampStateSchema, missing: z.enum(['first', 'second', 'firm-basis']).nullable(), needsTwo: z.boolean(), stamps: z.array(stampSchema), outcomes: outcomesSchema, cautions,
+  /** Where a bulletin changed the plans since it was written and looked at. */
+  planChanges: z.array(planChangeSchema),
 })
 const briefSizeSchema = z.object({
   claim: z.string(), expected: z.string(), table: z.string(), tableTitle: z.string(), url: z.string(),

@@ -13,6 +13,7 @@ export const numbersCheckSchema = z.object({
   claim: z.string(), start: z.int(), end: z.int(), role: z.enum(['advised', 'measured']), verdict: z.enum(['agrees', 'conflicts', 'cannot-tell']),
   expected: z.string().optional(), table: z.string().optional(),
   source: sourceSchema.nullable().optional(), basis: z.enum(BASES).optional(),
+  makerLimit: z.string().optional().describe('The kit maker’s own limit where it does not allow what a handbook does; it wins.'),
 })
 export const numbersCheckResultSchema = z.object({ checks: z.array(numbersCheckSchema) })
 

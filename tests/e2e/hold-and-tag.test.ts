@@ -96,7 +96,7 @@ test('a visit sheet takes findings by its link, and opens nothing once it was re
   await visitor.getByLabel('What did you find, and where?').fill('Shop head cracked at rib 4, aft row')
   await visitor.getByRole('button', { name: 'Write line 1' }).click()
   await visitor.getByRole('button', { name: 'Write line 2' }).waitFor()
-  expect((await must(builder, 'GET', `/api/builds/${id}`)).holds).toMatchObject([{ what: 'Shop head cracked at rib 4, aft row', until: 'finding 1 of The inspector is put right' }])
+  expect((await must(builder, 'GET', `/api/builds/${id}`)).holds).toMatchObject([{ what: 'Shop head cracked at rib 4, aft row', until: 'finding 1 of a visit is put right' }])
 
   await page.getByRole('button', { name: 'Revoke the link of The inspector' }).click()
   await page.getByText('revoked', { exact: false }).first().waitFor()

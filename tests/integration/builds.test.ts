@@ -278,7 +278,7 @@ describe('a visit', () => {
     expect(sheet.findings.map((f) => [f.number, f.text])).toEqual([[1, 'Clamp missing at rib 4'], [2, 'No label at the root plug']])
     expect(JSON.stringify(sheet)).toContain('Ran the loom.')
     expect(JSON.stringify(sheet)).not.toMatch(/SN-0388|Bjarte/)
-    expect((await sectionOf('W-6')).holds.map((h: { what: string; until: string }) => [h.what, h.until])).toEqual([['No label at the root plug', 'finding 2 of J. Pasternak is put right'], ['Clamp missing at rib 4', 'finding 1 of J. Pasternak is put right']])
+    expect((await sectionOf('W-6')).holds.map((h: { what: string; until: string }) => [h.what, h.until])).toEqual([['No label at the root plug', 'finding 2 of a visit is put right'], ['Clamp missing at rib 4', 'finding 1 of a visit is put right']])
     expect(await listVisits(await owner.context(), id, 'W-6')).toMatchObject([{ visitor: 'J. Pasternak', state: 'open', findings: 2 }])
   })
 

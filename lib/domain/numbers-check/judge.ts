@@ -6,7 +6,7 @@ import type { Mark } from './marks'
 import type { NumbersCheck, Verdict } from './numbers-check'
 
 /** What a kind found out. The span runs from the first to the last of its marks. */
-export interface Finding extends Pick<NumbersCheck, 'verdict' | 'expected' | 'table' | 'source' | 'basis'> {
+export interface Finding extends Pick<NumbersCheck, 'verdict' | 'expected' | 'table' | 'source' | 'basis' | 'makerLimit'> {
   marks: readonly Mark[]
 }
 
@@ -49,9 +49,12 @@ export function judge(claim: Claim, sources: readonly Allowed[], limits: readonl
   const verdict: Verdict = fitting ? 'agrees' : isOpen ? 'cannot-tell' : 'conflicts'
   const named = fitting ?? excuse ?? all[0]
   const expected = fitting ?? excuse
+  // A handbook allows it, and the kit maker's own limit does not: no conflict, but nobody should read it as the maker's word.
+  const overruled = fitting && makers.length > 0 && !makers.some((allowed) => allows(claim, allowed, slack))
   return {
     marks: claim.marks, verdict, table: claim.table,
     ...(named ? { expected: expected ? expected.expected : [...new Set(all.map(({ expected }) => expected))].join('; '), source: named.citation.source, basis: named.citation.basis } : {}),
+    ...(overruled ? { makerLimit: [...new Set(makers.map((m) => `${m.expected} (${m.citation.source?.title ?? 'the kit maker'})`))].join('; ') } : {}),
   }
 }
 

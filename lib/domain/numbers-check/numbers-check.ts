@@ -19,6 +19,8 @@ export interface NumbersCheck {
   table?: string
   source?: Source | null
   basis?: Basis
+  /** The kit maker's own limit where it does not allow what a handbook does; it wins. */
+  makerLimit?: string
 }
 
 /** What is known beside the text. Lengths of maker's limits are in inches, torques in inch-pounds (lbf-in). */

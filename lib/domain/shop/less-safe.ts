@@ -9,6 +9,7 @@ import type { ShopResult, ShopTable, ShopValue } from './shop-table'
 
 /** More combinations of choices than any table has; beyond it the limit is not looked at in every one. */
 const mostCases = 600
+const sizesLookedAt = 12
 
 type Entered = Pick<MakerLimit, 'result' | 'inputs' | 'value' | 'unit' | 'display'>
 
@@ -19,7 +20,7 @@ type Entered = Pick<MakerLimit, 'result' | 'inputs' | 'value' | 'unit' | 'displa
 export function lessSafe(table: ShopTable, limit: Entered): string | null {
   const sense = limitSense(table.slug, limit.result)
   if (!sense) return null
-  for (const raw of casesOf(table.inputs, limit.inputs)) {
+  for (const raw of [...casesOf(table.inputs, limit.inputs), ...sizesOf(table.inputs, limit.inputs)]) {
     const outcome = table.compute(raw)
     if (!outcome.ok || !holdsFor(table, limit.inputs, outcome.inputs)) continue
     const mine = allowedBy(valueFor(limit, table, outcome.inputs), sense)
@@ -47,6 +48,15 @@ function casesOf(declared: readonly ShopInput[], named: Readonly<Record<string, 
   return open.reduce<Record<string, string>[]>((cases, { name, options = [] }) =>
     (cases.length * options.length > mostCases ? cases : cases.flatMap((each) => options.map(({ value }) => ({ ...each, [name]: value })))), [{ ...named }])
 }
+
+/** Sizes from the least to the most of every one the limit leaves open: a radius that is right for thin sheet may be wrong for thick. */
+function sizesOf(declared: readonly ShopInput[], named: Readonly<Record<string, string>>): Record<string, string>[] {
+  return declared.filter(({ name, kind, max }) => kind !== 'choice' && max !== undefined && !Object.hasOwn(named, name))
+    .flatMap(({ name, min, max = 0 }) => between(min === undefined || min <= 0 ? max / 1000 : min, max).map((size) => ({ ...named, [name]: size.toFixed(4) })))
+}
+
+/** Each as many times the one before, because the tables are finer where sizes are small. Ends may lie beyond what a handbook lists. */
+const between = (least: number, most: number): number[] => Array.from({ length: sizesLookedAt }, (_, i) => least * (most / least) ** (i / (sizesLookedAt - 1)))
 
 /** What the limit names, and the choices that are not what the form assumes: the rest doesn't tell one case from another. */
 const caseWords = (declared: readonly ShopInput[], named: Readonly<Record<string, string>>, raw: Readonly<Record<string, string>>): string => declared.flatMap(({ name, label, options, default: standing }) => {

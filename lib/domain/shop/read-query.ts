@@ -72,7 +72,9 @@ function bolts(query: string, words: ReadonlySet<string>): ShopReading[] {
 /** A hole for a numbered screw; "10-32" is its thread. Not a tapped hole: no table here gives tap drills. */
 function screws(query: string, words: ReadonlySet<string>): ShopReading[] {
   if (!has(words, 'screw', 'screws') || !has(words, 'hole', 'holes', 'drill', 'clearance') || has(words, 'tap', 'tapped', 'torque')) return []
-  const size = Number(/(?<![\w./-])(?:#|no\.? ?)?(\d{1,2})(?:-\d{2})?(?![\w/.])/i.exec(query)?.[1])
+  // A screw's number stands behind its sign or right before the word: other numbers are how many, millimetres, a step.
+  const said = /(?<![\w./-])(?:#|no\.? ?|number )(\d{1,2})(?:-\d{2})?(?![\w/.])/i.exec(query) ?? /(?<![\w./-]|\bsteps? |\bpages? )(\d{1,2})(?:-\d{2})? screws?\b/i.exec(query)
+  const size = Number(said?.[1])
   const drill = SCREWS.some((known) => known === size) ? smallestDrillFor(size) : null
   return drill ? [{ table: 'drills', inputs: { screw: `#${size}`, size: drill.name }, label: `a hole that passes a #${size} screw` }] : []
 }

@@ -20,6 +20,8 @@ export interface StampFact {
   reference: string
   createdAt: number
   withdrawnAt: number | null
+  /** Of a plans stamp: the revision of the page that was before the mentor. */
+  plansRevision?: string | null
 }
 
 export interface StampSubject {
@@ -71,15 +73,26 @@ export function changeSince(pressedAt: number, changes: readonly PlansChange[]):
   return changes.find((c) => c.enteredAt >= pressedAt) ?? null
 }
 
+/** The newest bulletin that a stamp does not know: entered after it, or on a later revision of the page than the one it names. */
+export function changeUnknownTo(stamp: Pick<StampFact, 'createdAt' | 'basis' | 'plansRevision'>, changes: readonly PlansChange[]): PlansChange | null {
+  return changes.find((c) => c.enteredAt >= stamp.createdAt || (stamp.basis === 'plans' && isEarlier(stamp.plansRevision ?? '', c.revision))) ?? null
+}
+
+/** Letters only: other ways of naming a revision have no order that can be told. */
+function isEarlier(named: string, current: string): boolean {
+  const [a, b] = [named.trim().toUpperCase(), current.trim().toUpperCase()]
+  return /^[A-Z]{1,2}$/.test(a) && /^[A-Z]{1,2}$/.test(b) && (a.length < b.length || (a.length === b.length && a < b))
+}
+
 /** State and what is missing, for one post. Total and deterministic; the order of the facts does not matter. */
 export function judgeStamps(subject: StampSubject): Judgement {
   const concerning = plansChanges(subject)
   const standing = subject.stamps.filter((s) => s.withdrawnAt === null)
   const live = standing.filter((s) => isLive(s, subject) && s.mentorId !== null && !subject.authorIds.includes(s.mentorId))
   // A stamp from before a bulletin says nothing about the step as it is now.
-  const fresh = live.filter((s) => changeSince(s.createdAt, concerning) === null)
+  const fresh = live.filter((s) => changeUnknownTo(s, concerning) === null)
   const missing = missingStamp(fresh, subject.needsTwo)
-  const lastLookAt = Math.max(subject.revisedAt, ...live.map((s) => s.createdAt))
+  const lastLookAt = Math.max(subject.revisedAt, ...fresh.map((s) => s.createdAt))
   const changes = concerning.filter((c) => c.enteredAt >= lastLookAt)
   if (subject.postState === 'withdrawn') return { state: 'withdrawn', missing, changes }
   if (live.length === 0) return { state: stateWithoutLive(subject, standing, concerning), missing, changes }

@@ -12,7 +12,7 @@ import type { BriefItem, BriefSize, PostLink } from '@/lib/schemas/brief'
 import type { Caution } from '@/lib/schemas/post'
 import { checkPostNumbers } from '@/lib/services/posts/check-post-numbers'
 import { judge } from '@/lib/services/posts/judge-post'
-import { presentCautions, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
+import { presentCautions, presentChanges, presentOutcomes, presentStamps } from '@/lib/services/posts/present-post'
 
 /** A visible post with the question it answers; its title and cautions are of both. */
 export interface BriefPost { found: CautionedPost; question: CautionedPost | null }
@@ -31,11 +31,11 @@ export function presentLink(post: BriefPost): PostLink {
 
 export function presentItem(post: BriefPost): BriefItem {
   const { found, question } = post
-  const { state, missing } = judge(found, question?.current.number ?? 0)
+  const { state, missing, changes } = judge(found, question?.current.number ?? 0)
   const { id, name } = found.author
   return {
     ...presentLink(post), kind: found.kind, passage: passageOf(plainOf(found), found.current.parts), author: id === null ? { name } : { id, name }, revision: revisionLetter(found.current.number),
-    stamp: state, missing, needsTwo: found.needsTwo, stamps: presentStamps(found, question?.current.number ?? 0).filter((s) => s.withdrawn === undefined), outcomes: presentOutcomes(found),
+    stamp: state, missing, needsTwo: found.needsTwo, stamps: presentStamps(found, question?.current.number ?? 0).filter((s) => s.withdrawn === undefined), outcomes: presentOutcomes(found), planChanges: presentChanges(changes),
   }
 }
 
@@ -45,9 +45,10 @@ export const plainOf = (found: CautionedPost) => found.plain ?? wholeText(found.
 export function presentSizes(posts: readonly BriefPost[], limits: readonly MakerLimit[]): BriefSize[] {
   const sizes = new Map<string, BriefSize>()
   for (const post of posts) {
-    for (const { claim, expected, table, role, verdict, source, basis } of checkPostNumbers(post.found, post.question, limits)) {
+    for (const { claim, expected, table, role, verdict, source, basis, makerLimit } of checkPostNumbers(post.found, post.question, limits)) {
       const named = table === undefined ? null : shopTable(table)
-      if (role !== 'advised' || verdict !== 'agrees' || expected === undefined || !named || basis === undefined) continue
+      // What the maker's own limit forbids is no size to go by, whatever a handbook says.
+      if (makerLimit !== undefined || role !== 'advised' || verdict !== 'agrees' || expected === undefined || !named || basis === undefined) continue
       const key = `${named.slug}\n${expected}`
       const known = sizes.get(key) ?? { claim, expected, table: named.slug, tableTitle: named.title, url: paths.shopTable(named.slug), source: source ?? null, basis, posts: [], cautions: [] }
       if (!known.posts.some((link) => link.postId === post.found.id)) known.posts.push(presentLink(post))

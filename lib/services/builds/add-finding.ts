@@ -23,7 +23,7 @@ export async function addFinding({ database, actor, now }: AppContext, token: st
     const number = await nextFindingNumber(tx, visit.id)
     if (number > mostFindings) throw refuse.invalid('text', `At most ${mostFindings} lines on one sheet.`)
     const findingId = await insertFinding(tx, { visitId: visit.id, number, text, createdAt: now })
-    const until = `finding ${number} of ${visit.visitor} is put right`
+    const until = `finding ${number} of a visit is put right`
     const id = await insertHold(tx, { buildId: visit.buildId, sectionId: visit.sectionId, key: holdKey, kind: 'hold', what: text, until, code: newHoldCode(), findingId, createdAt: now })
     record('finding.add', `build:${visit.buildId}`, `hold:${id}`)
   })

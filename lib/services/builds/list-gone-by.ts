@@ -7,6 +7,7 @@ import { unionCautions } from '@/lib/domain/cautions/group-cautions'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { paths } from '@/lib/paths'
 import type { GoneBy } from '@/lib/schemas/builds'
+import { judge } from '@/lib/services/posts/judge-post'
 import { presentCautions } from '@/lib/services/posts/present-post'
 
 /** Newest mark first. Withdrawn advice stays and says so; what is hidden or merged is left out like everywhere. */
@@ -21,6 +22,7 @@ export async function listGoneBy({ reader }: Pick<AppContext, 'reader'>, memberI
     return [{
       postId: found.id, url: paths.entry(entry.id, found.id), kind: found.kind, title: entry.current.title, author: found.author.name, sections: entry.current.sections,
       revision: revisionLetter(row.revision), currentRevision: revisionLetter(found.current.number), state: ofEntry === 'withdrawn' ? 'withdrawn' : state, stamp: found.stampState,
+      plansChanged: judge(found, found.kind === 'answer' ? entry.current.number : 0).changes.length > 0,
       cautions: unionCautions([presentCautions(entry), presentCautions(found)]),
     }]
   })

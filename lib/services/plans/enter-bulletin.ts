@@ -4,13 +4,14 @@ import 'server-only'
 import { and, eq } from 'drizzle-orm'
 import { listCautionedPosts } from '@/db/queries/cautioned-post'
 import { listFollowers } from '@/db/queries/notices'
-import { listPostsCitingPlans } from '@/db/queries/plans'
+import { listPostsCitingPages } from '@/db/queries/plans'
 import { bulletin, bulletinStep, kit, notice } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { Transaction } from '@/db/client'
 import type { AppContext } from '@/lib/context'
 import { AppError, refuse } from '@/lib/errors'
 import type { NewBulletin } from '@/lib/schemas/plans'
+import { pageName } from '@/lib/domain/stamps/plans-change'
 import { plansChanges } from '@/lib/domain/stamps/stamp-state'
 import { afterWrite } from '@/lib/services/posts/after-write'
 import { judgePost } from '@/lib/services/posts/judge-post'
@@ -44,7 +45,8 @@ export async function insertBulletin(tx: Transaction, kitSlug: string, { steps, 
 
 /** Judges anew every post the bulletin touches and tells once whoever goes by a visible one. */
 export async function applyBulletin(tx: Transaction, entered: { id: number; kitId: number; number: string }, now: number): Promise<{ posts: number; told: number }> {
-  const citing = await listCautionedPosts(tx, await listPostsCitingPlans(tx, entered.kitId), 'plain')
+  const pages = (await tx.select({ page: bulletinStep.page }).from(bulletinStep).where(eq(bulletinStep.bulletinId, entered.id))).map(({ page }) => pageName(page))
+  const citing = await listCautionedPosts(tx, await listPostsCitingPages(tx, entered.kitId, [...new Set(pages)]), 'plain')
   const touched = citing.filter((p) => plansChanges({
     currentRevision: p.current.number, questionRevision: p.question?.currentRevision ?? 0, plans: p.plans, bulletins: p.bulletins.filter((b) => b.id === entered.id), stamps: p.stamps,
   }).length > 0)

@@ -8,7 +8,7 @@ import { textFields } from '@/lib/domain/entries/entry-text'
 import { revisionLetter } from '@/lib/domain/entries/revision-letter'
 import { findMeasurements } from '@/lib/domain/measurements/find-measurements'
 import { parserVersion } from '@/lib/domain/measurements/measurement'
-import { changeSince, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
+import { changeUnknownTo, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
 import type { PlansChange } from '@/lib/domain/stamps/plans-change'
 import { paths } from '@/lib/paths'
 import type { Measurement } from '@/lib/schemas/measurement'
@@ -47,7 +47,7 @@ export function presentStamps(found: CautionedPost, questionRevision: number): S
   const changes = plansChanges({ ...now, plans: found.plans, bulletins: found.bulletins, stamps: found.stamps })
   return found.stamps.flatMap((s): Stamp[] => {
     if (s.mentorId === null || s.basis === 'imported') return []
-    const change = isLive(s, now) ? changeSince(s.createdAt, changes) : null
+    const change = isLive(s, now) ? changeUnknownTo(s, changes) : null
     return [{
       id: s.id, revision: revisionLetter(s.revision), mentor: { id: s.mentorId, mark: s.mark }, basis: s.basis, reference: s.reference,
       ...(s.plansRevision !== null ? { plansRevision: s.plansRevision } : {}), ...(s.scope !== null ? { scope: s.scope } : {}),

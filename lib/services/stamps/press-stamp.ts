@@ -5,7 +5,7 @@ import { askedFor, stamp } from '@/db/schema'
 import { write } from '@/db/transaction'
 import type { AppContext } from '@/lib/context'
 import { revisionLetter, revisionNumber } from '@/lib/domain/entries/revision-letter'
-import { changeSince, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
+import { changeUnknownTo, isLive, plansChanges } from '@/lib/domain/stamps/stamp-state'
 import { AppError, refuse } from '@/lib/errors'
 import { can } from '@/lib/policy/can'
 import { whyNot } from '@/lib/policy/why-not'
@@ -39,7 +39,7 @@ export async function pressStamp(context: AppContext, postId: number, input: New
     }
     const own = found.stamps.find((s) => s.mentorId === actor.id && isLive(s, { currentRevision: found.current.number, questionRevision }))
     const changes = plansChanges({ currentRevision: found.current.number, questionRevision, plans: found.plans, bulletins: found.bulletins, stamps: found.stamps })
-    const change = own ? changeSince(own.createdAt, changes) : null
+    const change = own ? changeUnknownTo(own, changes) : null
     const isInQuestion = judge(found, questionRevision).state === 'in-question'
     if (own && !change && !isInQuestion) throw new AppError('conflict', 'Your stamp stands on this revision already.', { current: { id: postId, revision: input.revision } })
     if (own) await tx.update(stamp).set({ withdrawnAt: now, withdrawnReason: isInQuestion || !change ? 'Looked at again after a report that it did not work.' : `Looked at again after bulletin ${change.bulletin}.` }).where(eq(stamp.id, own.id))

@@ -65,6 +65,12 @@ describe('A limit', () => {
 })
 
 describe('A limit less safe than the handbook’s', () => {
+  it('is looked at for the thickest sheet too, when it names none', () => {
+    const table = shopTable('bend')
+    if (!table) throw new Error('no bend table')
+    expect(lessSafe(table, { result: 'radius-least', inputs: { alloy: '2024-T3' }, value: { number: 0.125 }, unit: 'in', display: { inch: '1/8 in', metric: '3.18 mm' } })).toContain('allows less than the handbook’s')
+  })
+
   it('is told before it is kept: 7/32 of a 1/8 rivet is under 2 D (TM 10-5410-229-13&P, para 5-6)', () => {
     expect(warned({ inputs: { diameter: '1/8' }, value: { min: '7/32' } })).toBe('At least 7/32 in allows less than the handbook’s 1/4 in (2 D), for rivet diameter 1/8 in (US Army TM 10-5410-229-13&P, para 5-6(3)(b)). Is the page right?')
   })

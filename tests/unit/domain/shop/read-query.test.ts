@@ -26,6 +26,8 @@ describe('a query that asks for a number', () => {
   it('takes a screw’s number for no drill, and a tapped hole for none of its tables', () => {
     expect(readShopQuery('drill for #8 screw').map((r) => r.label)).toEqual(['a hole that passes a #8 screw'])
     expect(readShopQuery('tap drill for 8-32 screw')).toEqual([])
+    expect(readShopQuery('drill holes for 2 #8 screws').map((r) => r.label)).toEqual(['a hole that passes a #8 screw'])
+    for (const other of ['clearance hole for 4 mm screw', 'W3-2 step 6 screw hole']) expect(readShopQuery(other).map((r) => r.label).join()).not.toContain('screw')
   })
 
   it('offers the other reading of a grommet size', () => {
