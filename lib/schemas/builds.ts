@@ -72,6 +72,8 @@ export const logLineSchema = z.object({ id: z.int(), key: z.string(), day: z.str
 export const goneBySchema = z.object({
   postId: z.int(), url: z.string(), kind: z.enum(['lesson', 'answer']), title: z.string(), author: z.string(), revision: z.string(), currentRevision: z.string(), sections: z.array(z.string()),
   state: z.enum(['visible', 'withdrawn']), stamp: stampStateSchema, cautions: z.array(cautionSchema),
+  /** A bulletin changed a step it is about, after it was written and looked at. */
+  plansChanged: z.boolean(),
 })
 export const closingLineSchema = z.object({
   id: z.int(), text: z.string(), origin: z.enum(['plans', 'builder', 'inspector']), reference: z.string(), answer: z.object({ isDone: z.boolean(), note: z.string(), at: iso }).nullable(),

@@ -75,7 +75,11 @@ export function changeSince(pressedAt: number, changes: readonly PlansChange[]):
 
 /** The newest bulletin that a stamp does not know: entered after it, or on a later revision of the page than the one it names. */
 export function changeUnknownTo(stamp: Pick<StampFact, 'createdAt' | 'basis' | 'plansRevision'>, changes: readonly PlansChange[]): PlansChange | null {
-  return changes.find((c) => c.enteredAt >= stamp.createdAt || (stamp.basis === 'plans' && isEarlier(stamp.plansRevision ?? '', c.revision))) ?? null
+  return changes.find((c) => !knows(stamp, c)) ?? null
+}
+
+function knows({ createdAt, basis, plansRevision }: Pick<StampFact, 'createdAt' | 'basis' | 'plansRevision'>, change: PlansChange): boolean {
+  return change.enteredAt < createdAt && !(basis === 'plans' && isEarlier(plansRevision ?? '', change.revision))
 }
 
 /** Letters only: other ways of naming a revision have no order that can be told. */
@@ -92,8 +96,7 @@ export function judgeStamps(subject: StampSubject): Judgement {
   // A stamp from before a bulletin says nothing about the step as it is now.
   const fresh = live.filter((s) => changeUnknownTo(s, concerning) === null)
   const missing = missingStamp(fresh, subject.needsTwo)
-  const lastLookAt = Math.max(subject.revisedAt, ...fresh.map((s) => s.createdAt))
-  const changes = concerning.filter((c) => c.enteredAt >= lastLookAt)
+  const changes = concerning.filter((c) => c.enteredAt >= subject.revisedAt && !live.some((s) => knows(s, c)))
   if (subject.postState === 'withdrawn') return { state: 'withdrawn', missing, changes }
   if (live.length === 0) return { state: stateWithoutLive(subject, standing, concerning), missing, changes }
   // Only critical systems need two stamps, and only there does one report put a stamp in question.
