@@ -1,16 +1,11 @@
 'use client'
 // Makes the form of a shop table answer at once: a change sends it. When the address changes (also by Back), the fields follow it.
 import { useEffect } from 'react'
+import { useSubmitOnChange } from '@/lib/client/use-submit-on-change'
 
 /** `values`: what the address says, by field name. */
 export function ShopFormScript({ formId, values }: { formId: string; values: Readonly<Record<string, string>> }) {
-  useEffect(() => {
-    const form = document.getElementById(formId)
-    if (!(form instanceof HTMLFormElement)) return
-    const send = () => form.requestSubmit()
-    form.addEventListener('change', send)
-    return () => form.removeEventListener('change', send)
-  }, [formId])
+  useSubmitOnChange(formId)
   useEffect(() => {
     const form = document.getElementById(formId)
     if (!(form instanceof HTMLFormElement)) return
